@@ -1,0 +1,19 @@
+package sill.stdlib;
+
+import java.lang.annotation.Documented;
+import java.lang.annotation.ElementType;
+import java.lang.annotation.Retention;
+import java.lang.annotation.RetentionPolicy;
+import java.lang.annotation.Target;
+
+/**
+ * The coherent SI unit of a parameter, a method's result or a record component, as a unit symbol such as {@code "V"} or
+ * {@code "Ω"}; {@code "1"} for a pure number. The value itself is always a plain {@code double} in that unit.
+ */
+@Documented
+@Retention(RetentionPolicy.RUNTIME)
+@Target({ElementType.PARAMETER, ElementType.METHOD, ElementType.RECORD_COMPONENT})
+public @interface Unit {
+    /** The unit symbol. */
+    String value();
+}
