@@ -1,0 +1,32 @@
+package sill.worksheet;
+
+import java.util.List;
+
+/**
+ * What a tolerance cell asks for.
+ *
+ * @param of the results and expressions to study
+ * @param methods how; at least one
+ * @param vary givens to vary; empty means every given with limits that the results rest on
+ * @param hold givens to hold at nominal
+ */
+public record ToleranceStudy(List<Target> of, List<Method> methods, List<Target> vary, List<Target> hold) {
+    public ToleranceStudy {
+        of = List.copyOf(of);
+        methods = List.copyOf(methods);
+        vary = List.copyOf(vary);
+        hold = List.copyOf(hold);
+    }
+
+    /** A piece of text with its place: an expression after {@code of:}, a name after {@code vary:} or {@code hold:}. */
+    public record Target(String text, int line, int column) {}
+
+    /** A way to push tolerances through the calculation. */
+    public sealed interface Method {
+        record WorstCase() implements Method {}
+
+        record RootSumSquare() implements Method {}
+
+        record MonteCarlo(int samples, long seed) implements Method {}
+    }
+}
