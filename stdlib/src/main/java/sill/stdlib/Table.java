@@ -29,12 +29,14 @@ public final class Table {
             if (column.getValue() instanceof double[] values) {
                 numberColumns.put(column.getKey(), values.clone());
                 size = values.length;
-            } else if (column.getValue() instanceof List<?> values) {
+            } else if (column.getValue() instanceof List<?> values
+                    && values.stream().allMatch(String.class::isInstance)) {
                 List<String> strings = values.stream().map(String.class::cast).toList();
                 textColumns.put(column.getKey(), strings);
                 size = strings.size();
             } else {
-                throw new IllegalArgumentException("column \"" + column.getKey() + "\" must be numbers or text");
+                throw new IllegalArgumentException(
+                        "column \"" + column.getKey() + "\" must be double[] or a list of String");
             }
             if (length >= 0 && length != size) {
                 throw new IllegalArgumentException("column \"" + column.getKey() + "\" must have " + length
@@ -69,8 +71,13 @@ public final class Table {
      * @return the values, one a row; NaN where the field is empty
      * @throws IllegalArgumentException when no number column has that name
      */
+    @Unit("?")
     public double[] column(String name) {
         double[] values = numbers.get(name);
+        if (values == null && texts.containsKey(name)) {
+            throw new IllegalArgumentException(
+                    "column \"" + name + "\" holds text, not numbers; text(\"" + name + "\") gives it");
+        }
         if (values == null) {
             throw new IllegalArgumentException("column must be one of " + numbers.keySet() + ", got \"" + name + "\"");
         }
@@ -91,5 +98,11 @@ public final class Table {
                     "text column must be one of " + texts.keySet() + ", got \"" + name + "\"");
         }
         return values;
+    }
+
+    /** The size and the columns' names, such as {@code Table of 3 rows: numbers [t, vIn], texts [note]}. */
+    @Override
+    public String toString() {
+        return "Table of " + rows + " rows: numbers " + numbers.keySet() + ", texts " + texts.keySet();
     }
 }

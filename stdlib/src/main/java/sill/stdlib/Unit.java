@@ -9,6 +9,9 @@ import java.lang.annotation.Target;
 /**
  * The coherent SI unit of a parameter, a method's result or a record component, as a unit symbol such as {@code "V"} or
  * {@code "Ω"}; {@code "1"} for a pure number. The value itself is always a plain {@code double} in that unit.
+ *
+ * <p>A symbol that starts with a question mark stands for any unit; where one method names it twice, both are the same
+ * unit. So {@code @Unit("?") nearest(@Unit("?") double x)} gives back what it was given.
  */
 @Documented
 @Retention(RetentionPolicy.RUNTIME)
