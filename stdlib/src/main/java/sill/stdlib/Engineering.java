@@ -13,7 +13,7 @@ final class Engineering {
     private Engineering() {}
 
     static String text(double value, String unit) {
-        BigDecimal rounded = new BigDecimal(value).round(new MathContext(4));
+        BigDecimal rounded = BigDecimal.valueOf(value).round(new MathContext(4));
         int power = rounded.precision() - rounded.scale() - 1;
         boolean prefixed = takesPrefix(unit) && rounded.signum() != 0;
         int group = prefixed ? Math.max(LEAST, Math.min(MOST, 3 * Math.floorDiv(power, 3))) : 0;

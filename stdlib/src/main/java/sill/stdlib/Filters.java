@@ -78,8 +78,8 @@ public final class Filters {
             String rule = "from vStart (" + vStart + " V) on and short of vFinal (" + vFinal + " V)";
             throw Arguments.broken("v", rule, v, "V");
         }
-        // log1p keeps the digits of a level close to the start.
-        return -timeConstant * StrictMath.log1p(-travelled);
+        // log1p keeps the digits of a level close to the start; it is not positive here.
+        return timeConstant * Math.abs(StrictMath.log1p(-travelled));
     }
 
     /**

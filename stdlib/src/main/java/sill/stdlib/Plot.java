@@ -138,8 +138,8 @@ public record Plot(String title, String description, Axis x, Axis y, List<Curve>
     }
 
     private Plot tripPoints(Side side, TripPoints trip) {
-        return with(new Mark(side, trip.rising(), "rising trip point", Role.TRIP_POINT))
-                .with(new Mark(side, trip.falling(), "falling trip point", Role.TRIP_POINT));
+        return with(new Mark(side, trip.rising(), "rising", Role.TRIP_POINT))
+                .with(new Mark(side, trip.falling(), "falling", Role.TRIP_POINT));
     }
 
     private Plot with(Mark mark) {

@@ -16,8 +16,7 @@ final class PlotDescription {
         }
         for (Plot.Mark mark : marks) {
             Plot.Axis axis = mark.side() == Plot.Side.X ? x : y;
-            sentences.add(role(mark.role()) + " \"" + mark.label() + "\" at " + axis.label() + " "
-                    + Engineering.text(mark.at(), axis.unit()) + ".");
+            sentences.add(role(mark) + " at " + axis.label() + " " + Engineering.text(mark.at(), axis.unit()) + ".");
         }
         return String.join(" ", sentences);
     }
@@ -62,11 +61,12 @@ final class PlotDescription {
         return Engineering.text(y, yAxis.unit()) + " at " + Engineering.text(x, xAxis.unit());
     }
 
-    private static String role(Plot.Role role) {
-        return switch (role) {
-            case LIMIT -> "Limit";
-            case TRIP_POINT -> "Trip point";
-            case REFERENCE -> "Reference";
+    private static String role(Plot.Mark mark) {
+        String name = "\"" + mark.label() + "\"";
+        return switch (mark.role()) {
+            case LIMIT -> "Limit " + name;
+            case TRIP_POINT -> "Trip point " + name;
+            case REFERENCE -> "Reference " + name;
         };
     }
 }
