@@ -56,10 +56,20 @@ public sealed interface Cell {
     /** Prose in CommonMark. */
     record Note(int number, String caption, int line, String source) implements Cell {}
 
-    /** Input values; lines that are wrong are missing from {@code givens}. */
-    record Givens(int number, String caption, int line, String source, List<Given> givens) implements Cell {
+    /**
+     * Input values; lines that are wrong are missing from {@code givens}. {@code wrong} holds the names whose value could not
+     * be read: they are declared, and what rests on them waits.
+     */
+    record Givens(int number, String caption, int line, String source, List<Given> givens, List<String> wrong)
+            implements Cell {
         public Givens {
             givens = List.copyOf(givens);
+            wrong = List.copyOf(wrong);
+        }
+
+        /** Givens that are all right. */
+        public Givens(int number, String caption, int line, String source, List<Given> givens) {
+            this(number, caption, line, source, givens, List.of());
         }
     }
 

@@ -15,4 +15,13 @@ public record Worksheet(String text, TitleBlock titleBlock, List<Cell> cells, Li
         cells = List.copyOf(cells);
         problems = List.copyOf(problems);
     }
+
+    /**
+     * Reads a worksheet. Every text has a result; what is wrong in it is among the problems.
+     *
+     * @param text the whole file; a byte order mark at its start is left out, and LF, CRLF and a lone CR end a line
+     */
+    public static Worksheet parse(String text) {
+        return WorksheetParser.parse(text);
+    }
 }
