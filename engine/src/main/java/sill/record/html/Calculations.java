@@ -1,0 +1,107 @@
+package sill.record.html;
+
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.stream.Collectors;
+import sill.markup.Markup;
+import sill.plot.PlotDrawing;
+import sill.record.DesignRecord.PlotEntry;
+import sill.record.DesignRecord.ValueEntry;
+import sill.record.RecordJson;
+import sill.values.Datum;
+
+/** A calculation cell: its results as lines <i>name = formula = value</i>, and its plots. */
+final class Calculations {
+    private Calculations() {}
+
+    static void write(Markup page, int cell, CellContent content) {
+        Map<String, PlotEntry> plots =
+                content.plots(cell).stream().collect(Collectors.toMap(PlotEntry::at, plot -> plot, (a, b) -> a));
+        for (ValueEntry value : content.values(cell)) {
+            Optional<PlotEntry> plot = Optional.ofNullable(plots.remove(value.at()));
+            if (plot.isPresent()) {
+                figure(page, plot.get());
+            } else {
+                line(page, value);
+            }
+        }
+        content.plots(cell).stream()
+                .filter(plot -> plots.containsKey(plot.at()))
+                .forEach(plot -> figure(page, plot));
+    }
+
+    private static void line(Markup page, ValueEntry value) {
+        page.open("div", "class", "line");
+        Addresses.write(page, value.at(), true);
+        page.open("div", "class", "equation");
+        boolean started = false;
+        if (!value.name().isEmpty()) {
+            page.leaf("var", value.name());
+            started = true;
+        }
+        String shown = value.shown().isEmpty() ? Values.brief(value.value(), value.unit()) : value.shown();
+        if (!value.formula().isEmpty() && !value.formula().equals(shown)) {
+            equals(page, started);
+            page.leaf("code", value.formula());
+            started = true;
+        }
+        equals(page, started);
+        result(page, value, shown);
+        page.close();
+        if (!value.caption().isEmpty()) {
+            page.leaf("div", value.caption(), "class", "meaning");
+        }
+        page.close().line();
+    }
+
+    private static void equals(Markup page, boolean started) {
+        page.text(started ? " = " : "");
+    }
+
+    /** The value in brief, and on demand in full with its type and what it rests on; needs no script. */
+    private static void result(Markup page, ValueEntry value, String shown) {
+        boolean components = value.value() instanceof Datum.Fields
+                && !value.shownComponents().isEmpty();
+        page.open("details", "class", "result");
+        page.open("summary");
+        if (components) {
+            page.open("span", "class", "components");
+            for (Map.Entry<String, String> component : value.shownComponents().entrySet()) {
+                page.open("span").leaf("var", component.getKey()).text(" " + component.getValue());
+                page.close().text(" ");
+            }
+            page.close();
+        } else {
+            page.leaf("span", shown, "class", value.value() instanceof Datum.Text ? "string" : "number");
+        }
+        page.close();
+        page.open("div", "class", "full");
+        Values.full(page, value.value(), value.unit(), value.componentUnits(), value.shownFull());
+        page.open("p", "class", "rests").text("Type ").leaf("code", value.type());
+        if (!value.dependsOn().isEmpty()) {
+            page.text(", rests on " + names(value.dependsOn()));
+        }
+        page.text(", worksheet line " + value.line() + ".").close();
+        page.close().close();
+    }
+
+    private static String names(List<String> names) {
+        return String.join(", ", names);
+    }
+
+    private static void figure(Markup page, PlotEntry plot) {
+        page.open("figure", "class", "line");
+        Addresses.write(page, plot.at(), true);
+        Tables.openScrolling(page, "Plot " + plot.at());
+        page.trusted(PlotDrawing.svg(plot.plot(), RecordJson.plotId(plot.at())));
+        page.close();
+        String title = plot.plot().title();
+        String caption = plot.caption().isEmpty() ? title : plot.caption();
+        page.open("figcaption").text(caption);
+        if (!title.isEmpty() && !title.equals(caption)) {
+            page.text(" – " + title);
+        }
+        page.close().close().line();
+    }
+}

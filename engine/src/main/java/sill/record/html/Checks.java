@@ -1,0 +1,92 @@
+package sill.record.html;
+
+import java.util.List;
+import sill.markup.Markup;
+import sill.record.DesignRecord;
+import sill.record.DesignRecord.CheckEntry;
+import sill.record.DesignRecord.Verdict;
+
+/** Requirements and how the design meets them. */
+final class Checks {
+    private Checks() {}
+
+    /** All checks of the record, at its head. */
+    static void write(Markup page, DesignRecord record) {
+        page.open("section", "class", "checks", "aria-labelledby", "checks").line();
+        page.leaf("h2", "Checks", "id", "checks").line();
+        if (record.checks().isEmpty()) {
+            page.leaf("p", "The worksheet states no checks.").line();
+        } else {
+            table(page, record.checks(), "All checks, with value, limit and margin", Place.AT_HEAD);
+        }
+        page.close().line();
+    }
+
+    /** Whether a table of checks is the summary, whose addresses lead to the cells, or stands in its cell. */
+    enum Place {
+        AT_HEAD,
+        IN_CELL
+    }
+
+    /** A table of checks; on a narrow screen each becomes a card. */
+    static void table(Markup page, List<CheckEntry> checks, String caption, Place place) {
+        page.open("table", "class", "stacking");
+        page.leaf("caption", caption, "class", "unseen").line();
+        Tables.head(page, "At", "Requirement", "Value", "Limit", "Margin", "Verdict", "Remark");
+        page.open("tbody").line();
+        for (CheckEntry check : checks) {
+            row(page, check, place);
+        }
+        page.close().close().line();
+    }
+
+    private static void row(Markup page, CheckEntry check, Place place) {
+        page.open("tr", "class", "verdict-" + verdictClass(check.verdict()));
+        page.open("th", "scope", "row", "class", "at");
+        Addresses.write(page, check.at(), place == Place.IN_CELL);
+        page.close();
+        page.open("td", "data-label", "Requirement").leaf("code", check.text());
+        page.leaf("span", basis(check), "class", "basis").close();
+        Tables.cell(page, "Value", "number", check.shownValue());
+        Tables.cell(page, "Limit", "number", check.shownLimit());
+        Tables.cell(page, "Margin", "number", margin(check));
+        page.open("td", "data-label", "Verdict");
+        page.open("span", "class", "verdict");
+        page.leaf("span", sign(check.verdict()), "class", "sign", "aria-hidden", "true");
+        page.text(" " + check.verdict().word()).close();
+        if (!check.reason().isEmpty()) {
+            page.text(" ").leaf("span", check.reason(), "class", "reason");
+        }
+        page.close();
+        Tables.cell(page, "Remark", "remark", check.remark());
+        page.close().line();
+    }
+
+    private static String basis(CheckEntry check) {
+        return switch (check.basis()) {
+            case "nominal" -> "at the nominal values";
+            case "worst-case" -> "at worst case";
+            case "share" -> "in a share of samples";
+            default -> check.basis();
+        };
+    }
+
+    private static String margin(CheckEntry check) {
+        if (check.marginShare().isEmpty() || check.shownMargin().isEmpty()) {
+            return check.shownMargin();
+        }
+        return check.shownMargin() + " (" + Numbers.percent(check.marginShare().get()) + ")";
+    }
+
+    private static String sign(Verdict verdict) {
+        return switch (verdict) {
+            case HOLDS -> "✓";
+            case FAILS -> "✗";
+            case NOT_JUDGED -> "?";
+        };
+    }
+
+    private static String verdictClass(Verdict verdict) {
+        return verdict.word().replace(' ', '-');
+    }
+}
