@@ -1,0 +1,92 @@
+package sill.record;
+
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import sill.record.DesignRecord.CheckEntry;
+import sill.record.DesignRecord.Verdict;
+import sill.values.CheckValue;
+import sill.values.Datum;
+import sill.values.RunResult;
+import sill.worksheet.Cell;
+import sill.worksheet.Check;
+import sill.worksheet.Check.Basis;
+import sill.worksheet.Worksheet;
+
+/** Judges the checks of a worksheet on the values that a run gave. */
+final class Judge {
+    private static final String NO_VALUE = "its expression has no value: see the problems and the cells it waits on";
+
+    private Judge() {}
+
+    static List<CheckEntry> judge(Worksheet worksheet, RunResult run) {
+        Map<Integer, CheckValue> values = new HashMap<>();
+        run.checks().forEach(value -> values.put(value.line(), value));
+        List<CheckEntry> entries = new ArrayList<>();
+        for (Cell cell : worksheet.cells()) {
+            if (cell instanceof Cell.Checks checks) {
+                int index = 0;
+                for (Check check : checks.checks()) {
+                    index++;
+                    Optional<Datum> value =
+                            Optional.ofNullable(values.get(check.line())).map(CheckValue::value);
+                    entries.add(judge(check, value, cell.number() + "." + index));
+                }
+            }
+        }
+        return entries;
+    }
+
+    private static CheckEntry judge(Check check, Optional<Datum> value, String at) {
+        Window window = Window.of(check.requirement());
+        if (value.isEmpty()) {
+            return entry(check, window, value, Optional.empty(), Verdict.NOT_JUDGED, NO_VALUE, at);
+        }
+        if (!(check.basis() instanceof Basis.Nominal)) {
+            return entry(check, window, value, Optional.empty(), Verdict.NOT_JUDGED, Assembly.NO_TOLERANCE_RUNS, at);
+        }
+        if (value.get() instanceof Datum.Truth truth) {
+            return entry(check, window, value, Optional.empty(), truth.value() ? Verdict.HOLDS : Verdict.FAILS, "", at);
+        }
+        double number = ((Datum.Real) value.get()).value();
+        Verdict verdict = window.holds(number) ? Verdict.HOLDS : Verdict.FAILS;
+        return entry(check, window, value, Optional.of(window.margin(number)), verdict, "", at);
+    }
+
+    private static CheckEntry entry(
+            Check check,
+            Window window,
+            Optional<Datum> value,
+            Optional<Double> margin,
+            Verdict verdict,
+            String reason,
+            String at) {
+        boolean condition = check.requirement() instanceof Check.Requirement.Holds;
+        return new CheckEntry(
+                check.text(),
+                basis(check.basis()),
+                value,
+                condition ? "" : window.unit().coherent().symbol(),
+                window.low(),
+                window.high(),
+                margin,
+                margin.flatMap(window::share),
+                value.map(datum -> ShownValue.of(datum, window.unit())).orElse(""),
+                window.shown(),
+                margin.map(window::shownMargin).orElse(""),
+                verdict,
+                reason,
+                check.remark(),
+                at,
+                check.line());
+    }
+
+    private static String basis(Basis basis) {
+        if (basis instanceof Basis.WorstCase) {
+            return "worst-case";
+        }
+        return basis instanceof Basis.Share ? "share" : "nominal";
+    }
+}

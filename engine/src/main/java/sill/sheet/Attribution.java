@@ -1,0 +1,33 @@
+package sill.sheet;
+
+import com.sun.source.tree.CompilationUnitTree;
+import com.sun.source.util.Trees;
+import java.io.IOException;
+import java.util.List;
+import java.util.Map;
+
+/**
+ * The sheet's class, attributed: what the compiler complains of, and what its one tree tells the readers.
+ *
+ * @param text the compilation unit
+ * @param errors what the compiler complains of, offsets in {@code text}
+ * @param usages uses of the sheet's own names
+ * @param helperUnits unit symbols that helpers state, by field
+ */
+record Attribution(
+        MappedText text, List<Compiler.Complaint> errors, List<Usage> usages, Map<String, String> helperUnits) {
+    static Attribution of(MappedText text, Compiler compiler) {
+        Compiler.Task task = compiler.task(List.of(text.toString()));
+        try {
+            CompilationUnitTree unit = task.task().parse().iterator().next();
+            task.task().analyze();
+            Trees trees = Trees.instance(task.task());
+            List<Usage> usages = new UsageScanner(trees, unit, text).usages();
+            HelperUnits units = new HelperUnits(trees);
+            units.scan(unit, null);
+            return new Attribution(text, task.errors(), usages, units.units());
+        } catch (IOException e) {
+            throw new java.io.UncheckedIOException(e);
+        }
+    }
+}

@@ -1,0 +1,30 @@
+package sill.sheet;
+
+/**
+ * A piece of worksheet text that goes into the class: a calculation cell or a check's expression.
+ *
+ * @param cell number of its cell
+ * @param text the piece
+ * @param line worksheet line of its first character
+ * @param column worksheet column of its first character
+ * @param where how messages call it, as in {@code cell 3 "Trip points"}
+ */
+record Piece(int cell, String text, int line, int column, String where) {
+    static Piece of(SheetSource.CodeCell cell) {
+        return new Piece(
+                cell.number(),
+                cell.source(),
+                cell.line() + 1,
+                1,
+                "cell " + cell.number() + " \"" + cell.caption() + "\"");
+    }
+
+    static Piece of(SheetSource.CheckLine check) {
+        return new Piece(
+                check.cell(), check.expression(), check.line(), check.column(), "the check on line " + check.line());
+    }
+
+    Place place(int offset) {
+        return Place.in(text, offset, line, column);
+    }
+}

@@ -1,0 +1,107 @@
+package sill.sheet;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import sill.worksheet.Problem;
+
+/**
+ * A sheet's Java, parsed: what the class is written from. The same for every pass over it.
+ *
+ * @param givens fields set from outside
+ * @param cells calculation cells, in order
+ * @param checks check lines, in order
+ */
+record Program(List<SheetSource.GivenField> givens, List<CellCode> cells, List<CheckCode> checks) {
+
+    /** Imported in every worksheet without asking. */
+    static final List<String> IMPORTS = List.of(
+            "sill.stdlib.*",
+            "java.util.*",
+            "java.util.function.*",
+            "java.util.stream.*",
+            "java.math.*",
+            "static java.lang.Math.*");
+
+    /**
+     * A parsed calculation cell.
+     *
+     * @param snippets those that could be parsed
+     * @param faults why the others could not
+     */
+    record CellCode(Piece piece, List<Snippet> snippets, List<Problem> faults) {
+        int number() {
+            return piece.cell();
+        }
+
+        /** The values it gives, in order; a bare expression's has a field's name of its own and is shown without one. */
+        List<Field> fields() {
+            List<Field> fields = new ArrayList<>();
+            for (Snippet snippet : snippets) {
+                switch (snippet.kind()) {
+                    case VARIABLES ->
+                        snippet.variables()
+                                .forEach(v -> fields.add(new Field(v.name(), v.name(), v.type(), v.typeAt(), snippet)));
+                    case CALL, EXPRESSION ->
+                        fields.add(new Field(
+                                "$value" + number() + "_" + (fields.size() + 1),
+                                "",
+                                "var",
+                                snippet.expression().start(),
+                                snippet));
+                    default -> {
+                        // Imports, methods, types and statements give no value.
+                    }
+                }
+            }
+            return fields;
+        }
+    }
+
+    /**
+     * A field of the sheet's class.
+     *
+     * @param field its name in the class
+     * @param name its name in the worksheet; empty for a bare expression
+     * @param type as written; {@code var} when open
+     * @param at offset of the type, or of the bare expression
+     */
+    record Field(String field, String name, String type, int at, Snippet snippet) {
+        boolean isOpen() {
+            return type.equals("var");
+        }
+    }
+
+    /** A parsed check line; empty when its expression can't be parsed. */
+    record CheckCode(SheetSource.CheckLine line, Piece piece, Optional<Snippet> snippet, List<Problem> faults) {}
+
+    /** The worksheet's own imports: they hold in the whole sheet, also when another line of their cell is wrong. */
+    List<Snippet> imports() {
+        return cells.stream()
+                .flatMap(cell -> cell.snippets().stream())
+                .filter(snippet -> snippet.kind() == Snippet.Kind.IMPORT)
+                .toList();
+    }
+
+    /** The givens that have a value. */
+    List<SheetSource.GivenField> presentGivens() {
+        return givens.stream()
+                .filter(given -> given.type() != SheetSource.GivenType.MISSING)
+                .toList();
+    }
+
+    /** Open fields of all cells by name. */
+    Map<String, Field> openFields() {
+        Map<String, Field> open = new LinkedHashMap<>();
+        for (CellCode cell : cells) {
+            for (Field field : cell.fields()) {
+                if (field.isOpen()) {
+                    open.put(field.field(), field);
+                }
+            }
+        }
+        return open;
+    }
+}

@@ -1,0 +1,91 @@
+package sill.sheet;
+
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import sill.worksheet.Problem;
+
+/** Splits and parses the cells and checks of a sheet into a {@link Program}. */
+final class ProgramReader {
+    private final SnippetParser parser;
+    private final Splitter splitter;
+
+    ProgramReader(SnippetParser parser, Splitter splitter) {
+        this.parser = parser;
+        this.splitter = splitter;
+    }
+
+    Program read(SheetSource source) {
+        return new Program(source.givens(), cells(source.cells()), checks(source.checks()));
+    }
+
+    private List<Program.CellCode> cells(List<SheetSource.CodeCell> cells) {
+        List<SnippetParser.Raw> raws = new ArrayList<>();
+        List<Piece> pieces = new ArrayList<>();
+        for (SheetSource.CodeCell cell : cells) {
+            Piece piece = Piece.of(cell);
+            pieces.add(piece);
+            String code = CodeText.codeOnly(piece.text());
+            for (Span span : splitter.split(piece.text())) {
+                raws.add(new SnippetParser.Raw(piece, code, span, caption(piece, code, span)));
+            }
+        }
+        Map<Integer, List<SnippetParser.Parsed>> byCell = new HashMap<>();
+        for (SnippetParser.Parsed parsed : parser.parse(raws)) {
+            byCell.computeIfAbsent(parsed.raw().piece().cell(), cell -> new ArrayList<>())
+                    .add(parsed);
+        }
+        return pieces.stream()
+                .map(piece -> cell(piece, byCell.getOrDefault(piece.cell(), List.of())))
+                .toList();
+    }
+
+    private static Program.CellCode cell(Piece piece, List<SnippetParser.Parsed> parsed) {
+        List<Snippet> snippets = new ArrayList<>();
+        List<Problem> faults = new ArrayList<>();
+        for (SnippetParser.Parsed each : parsed) {
+            each.snippet().ifPresentOrElse(snippets::add, () -> faults.add(problem(piece, each.fault())));
+        }
+        return new Program.CellCode(piece, List.copyOf(snippets), List.copyOf(faults));
+    }
+
+    private List<Program.CheckCode> checks(List<SheetSource.CheckLine> lines) {
+        List<SnippetParser.Raw> raws = new ArrayList<>();
+        for (SheetSource.CheckLine line : lines) {
+            Piece piece = Piece.of(line);
+            Span all = new Span(0, piece.text().length());
+            raws.add(new SnippetParser.Raw(piece, CodeText.codeOnly(piece.text()), all, Caption.NONE));
+        }
+        List<Program.CheckCode> checks = new ArrayList<>();
+        List<SnippetParser.Parsed> parsed = parser.parseExpressions(raws);
+        for (int i = 0; i < lines.size(); i++) {
+            Piece piece = raws.get(i).piece();
+            Optional<Snippet> snippet = parsed.get(i).snippet();
+            List<Problem> faults = snippet.isPresent()
+                    ? List.of()
+                    : List.of(problem(piece, parsed.get(i).fault()));
+            checks.add(new Program.CheckCode(lines.get(i), piece, snippet, faults));
+        }
+        return checks;
+    }
+
+    private static Problem problem(Piece piece, SnippetParser.Fault fault) {
+        return Wording.problem(piece, fault.offset(), fault.code(), fault.message(), List.of());
+    }
+
+    /** The comment behind a snippet, on the line it ends on. */
+    private static Caption caption(Piece piece, String code, Span span) {
+        int end = CodeText.endOfCode(code, span.start(), span.end());
+        int lineEnd = piece.text().indexOf('\n', end);
+        String rest = piece.text().substring(end, lineEnd < 0 ? piece.text().length() : lineEnd);
+        // With a second snippet on the line the comment belongs to that one.
+        String code2 = code.substring(end, end + rest.length()).strip();
+        int slashes = rest.indexOf("//");
+        if (slashes < 0 || !(code2.isEmpty() || code2.equals(";"))) {
+            return Caption.NONE;
+        }
+        return Caption.read(rest.substring(slashes + 2), end + slashes + 2);
+    }
+}

@@ -1,0 +1,65 @@
+package sill.sheet;
+
+import java.util.List;
+
+/**
+ * What the translation starts from: the parts of a worksheet that hold or name Java.
+ *
+ * @param givens fields that are set before any cell runs
+ * @param cells calculation cells in order
+ * @param checks check expressions in order
+ */
+public record SheetSource(List<GivenField> givens, List<CodeCell> cells, List<CheckLine> checks) {
+    public SheetSource {
+        givens = List.copyOf(givens);
+        cells = List.copyOf(cells);
+        checks = List.copyOf(checks);
+    }
+
+    /** Java type of a given. */
+    public enum GivenType {
+        NUMBER("double"),
+        NUMBERS("double[]"),
+        TEXT("String"),
+        TABLE("sill.stdlib.Table"),
+        /** Its line is wrong or its file can't be read: what uses it waits. */
+        MISSING("");
+
+        private final String java;
+
+        GivenType(String java) {
+            this.java = java;
+        }
+
+        /** The type as Java spells it. */
+        public String java() {
+            return java;
+        }
+    }
+
+    /**
+     * A given.
+     *
+     * @param unit coherent SI unit symbol; empty for a text or a table
+     */
+    public record GivenField(String name, GivenType type, int cell, int line, String unit) {}
+
+    /**
+     * A calculation cell.
+     *
+     * @param line line of the header; the source starts on the next
+     */
+    public record CodeCell(int number, String caption, int line, String source) {}
+
+    /**
+     * A check's expression.
+     *
+     * @param column column of its first character; with the line it names the check
+     * @param condition whether it must be a boolean, else a number
+     */
+    public record CheckLine(int cell, int line, int column, String expression, boolean condition) {
+        Place place() {
+            return new Place(line, column);
+        }
+    }
+}

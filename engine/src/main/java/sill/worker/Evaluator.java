@@ -1,0 +1,76 @@
+package sill.worker;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.Map;
+import jdk.jshell.Diag;
+import jdk.jshell.JShell;
+import jdk.jshell.Snippet;
+import jdk.jshell.SnippetEvent;
+import jdk.jshell.execution.DirectExecutionControl;
+import jdk.jshell.spi.ExecutionControl;
+import jdk.jshell.spi.ExecutionControlProvider;
+import jdk.jshell.spi.ExecutionEnv;
+import sill.sheet.Compiler;
+import sill.sheet.Splitter;
+import sill.sheet.TranslatedSheet;
+
+/** Evaluates a sheet's class, once, in this process. */
+final class Evaluator implements AutoCloseable {
+    private final SheetLoader loader = new SheetLoader();
+    private final JShell shell;
+
+    Evaluator(Compiler compiler) {
+        shell = JShell.builder()
+                .executionEngine(new Engine(), Map.of())
+                .fileManager(standard -> compiler.files())
+                .compilerOptions(Compiler.OPTIONS.toArray(String[]::new))
+                .build();
+    }
+
+    /** An error in the class's text, at an offset of it. */
+    record Rejection(int offset, String message) {}
+
+    /** The evaluated class's cells can be called, or the rejections say why not. */
+    record Evaluation(Class<?> sheet, List<Rejection> rejections) {}
+
+    Splitter splitter() {
+        return new PromptSplitter(shell.sourceCodeAnalysis());
+    }
+
+    /** Evaluates the imports, then the class. */
+    Evaluation evaluate(TranslatedSheet sheet) throws ClassNotFoundException {
+        sheet.imports().forEach(shell::eval);
+        List<SnippetEvent> events = shell.eval(sheet.code().text());
+        List<Rejection> rejections = new ArrayList<>();
+        for (SnippetEvent event : events) {
+            if (event.status() != Snippet.Status.VALID) {
+                shell.diagnostics(event.snippet())
+                        .filter(Diag::isError)
+                        .forEach(d ->
+                                rejections.add(new Rejection((int) d.getPosition(), d.getMessage(Locale.ENGLISH))));
+                shell.drop(event.snippet());
+            }
+        }
+        return new Evaluation(rejections.isEmpty() ? loader.withSimpleName(sheet.className()) : null, rejections);
+    }
+
+    @Override
+    public void close() {
+        shell.close();
+    }
+
+    /** JShell's port to whatever runs the code: here, this process with our own loader. */
+    private final class Engine implements ExecutionControlProvider {
+        @Override
+        public String name() {
+            return "sill";
+        }
+
+        @Override
+        public ExecutionControl generate(ExecutionEnv env, Map<String, String> parameters) {
+            return new DirectExecutionControl(loader);
+        }
+    }
+}

@@ -1,0 +1,63 @@
+package sill.worker;
+
+import sill.sheet.Place;
+import sill.sheet.TranslatedSheet;
+import sill.worksheet.Problem;
+
+/** Puts an exception that ended a cell into words, at the place of the worksheet it came from. */
+final class Failure {
+    private static final int LONGEST_MESSAGE = 2_000;
+
+    private Failure() {}
+
+    /**
+     * The problem that an exception is.
+     *
+     * @param lineOffset line number of the class text's first line in the compiled class
+     */
+    static Problem problem(TranslatedSheet sheet, TranslatedSheet.Step step, Throwable thrown, int lineOffset) {
+        Place place = place(sheet, thrown, lineOffset, step.place());
+        return Problem.error(
+                place.line(), place.column(), step.cell(), step.where() + " ended in " + words(thrown), hint(thrown));
+    }
+
+    private static Place place(TranslatedSheet sheet, Throwable thrown, int lineOffset, Place otherwise) {
+        StackTraceElement[] frames = thrown.getStackTrace();
+        if (frames != null) {
+            for (StackTraceElement frame : frames) {
+                boolean ours = frame.getClassName().endsWith("$" + sheet.className())
+                        || frame.getClassName().contains("$" + sheet.className() + "$");
+                if (ours && frame.getLineNumber() >= lineOffset) {
+                    return sheet.code().linePlace(frame.getLineNumber() - lineOffset + 1);
+                }
+            }
+        }
+        return otherwise;
+    }
+
+    private static String words(Throwable thrown) {
+        String name = thrown.getClass().getSimpleName();
+        String message;
+        try {
+            message = thrown.getMessage();
+        } catch (RuntimeException | StackOverflowError e) {
+            message = null;
+        }
+        if (message == null || message.isBlank()) {
+            return name;
+        }
+        String cut = message.length() <= LONGEST_MESSAGE ? message : message.substring(0, LONGEST_MESSAGE) + "…";
+        // The JDK's own messages name the class that the sheet became.
+        return name + ": " + cut.replaceAll("(REPL\\.)?\\$JShell\\$\\w+\\$\\$Sheet[.$]?", "");
+    }
+
+    private static String hint(Throwable thrown) {
+        if (thrown instanceof StackOverflowError) {
+            return "a method calls itself without an end: give it a case that stops";
+        }
+        if (thrown instanceof ArithmeticException) {
+            return "whole numbers divide as whole numbers: write 1.0 where a fraction is meant";
+        }
+        return "";
+    }
+}

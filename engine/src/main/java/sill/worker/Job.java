@@ -1,0 +1,93 @@
+package sill.worker;
+
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+import sill.sheet.Place;
+import sill.sheet.SheetSource;
+
+/**
+ * What a worker is to do.
+ *
+ * @param source the sheet's Java
+ * @param values values of the givens, by name
+ * @param leftOut places of the cells and checks that an earlier worker could not end
+ */
+record Job(SheetSource source, Map<String, GivenValue> values, Set<Place> leftOut) {
+
+    /** A given's value. */
+    sealed interface GivenValue {
+        record Number(double value) implements GivenValue {}
+
+        record Numbers(double[] values) implements GivenValue {}
+
+        record Text(String value) implements GivenValue {}
+
+        /** A data file, to be read as a table. */
+        record File(String path, byte[] bytes) implements GivenValue {}
+    }
+
+    byte[] bytes() {
+        WireOut out = new WireOut();
+        out.list(
+                source.givens(),
+                (o, given) -> o.text(given.name())
+                        .number(given.type().ordinal())
+                        .number(given.cell())
+                        .number(given.line())
+                        .text(given.unit()));
+        out.list(
+                source.cells(),
+                (o, cell) -> o.number(cell.number())
+                        .text(cell.caption())
+                        .number(cell.line())
+                        .text(cell.source()));
+        out.list(
+                source.checks(),
+                (o, check) -> o.number(check.cell())
+                        .number(check.line())
+                        .number(check.column())
+                        .text(check.expression())
+                        .flag(check.condition()));
+        out.map(values, Job::value);
+        out.list(leftOut, (o, place) -> o.number(place.line()).number(place.column()));
+        return out.bytes();
+    }
+
+    static Job of(byte[] message) {
+        WireIn in = new WireIn(message);
+        List<SheetSource.GivenField> givens = in.list(i -> new SheetSource.GivenField(
+                i.text(), i.constant(SheetSource.GivenType.values()), i.number(), i.number(), i.text()));
+        List<SheetSource.CodeCell> cells =
+                in.list(i -> new SheetSource.CodeCell(i.number(), i.text(), i.number(), i.text()));
+        List<SheetSource.CheckLine> checks =
+                in.list(i -> new SheetSource.CheckLine(i.number(), i.number(), i.number(), i.text(), i.flag()));
+        return new Job(
+                new SheetSource(givens, cells, checks),
+                in.map(Job::value),
+                Set.copyOf(in.list(i -> new Place(i.number(), i.number()))));
+    }
+
+    private static void value(WireOut out, GivenValue value) {
+        if (value instanceof GivenValue.Number number) {
+            out.number(0).real(number.value());
+        } else if (value instanceof GivenValue.Numbers numbers) {
+            out.number(1).reals(numbers.values());
+        } else if (value instanceof GivenValue.Text text) {
+            out.number(2).text(text.value());
+        } else if (value instanceof GivenValue.File file) {
+            out.number(3).text(file.path()).raw(file.bytes());
+        }
+    }
+
+    private static GivenValue value(WireIn in) {
+        int kind = in.number();
+        return switch (kind) {
+            case 0 -> new GivenValue.Number(in.real());
+            case 1 -> new GivenValue.Numbers(in.reals());
+            case 2 -> new GivenValue.Text(in.text());
+            case 3 -> new GivenValue.File(in.text(), in.raw());
+            default -> throw new WireIn.BadMessage("there is no kind of given " + kind);
+        };
+    }
+}

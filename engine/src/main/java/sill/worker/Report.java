@@ -1,0 +1,86 @@
+package sill.worker;
+
+import java.util.List;
+import java.util.Optional;
+import sill.sheet.Place;
+import sill.values.CellRun;
+import sill.values.CheckValue;
+import sill.values.Result;
+import sill.worksheet.Problem;
+
+/** What a worker says while it works, one message each. */
+sealed interface Report {
+    /** The sheet is translated and evaluated; these problems were found. */
+    record Translated(List<Problem> problems) implements Report {}
+
+    /** A cell or check line is about to be called. */
+    record Begun(int cell, Place place) implements Report {}
+
+    /** A calculation cell ended, or could not be called. */
+    record CellEnded(CellRun run, List<Result> results, List<Problem> problems) implements Report {}
+
+    /** A check line ended, or could not be called; without a value it could not be evaluated, for the reason given. */
+    record CheckEnded(int cell, Place place, Optional<CheckValue> value, String reason, List<Problem> problems)
+            implements Report {}
+
+    /** All is done; these problems show only at the end. */
+    record Finished(List<Problem> problems) implements Report {}
+
+    /** The worker itself went wrong. */
+    record Failed(String what) implements Report {}
+
+    /** The message's bytes. */
+    default byte[] bytes() {
+        WireOut out = new WireOut();
+        if (this instanceof Translated translated) {
+            out.number(0).list(translated.problems(), ValueWire::problem);
+        } else if (this instanceof Begun begun) {
+            out.number(1).number(begun.cell());
+            place(out, begun.place());
+        } else if (this instanceof CellEnded ended) {
+            out.number(2);
+            ValueWire.cellRun(out, ended.run());
+            out.list(ended.results(), ValueWire::result).list(ended.problems(), ValueWire::problem);
+        } else if (this instanceof CheckEnded ended) {
+            out.number(3).number(ended.cell());
+            place(out, ended.place());
+            out.flag(ended.value().isPresent());
+            ended.value().ifPresent(value -> ValueWire.checkValue(out, value));
+            out.text(ended.reason()).list(ended.problems(), ValueWire::problem);
+        } else if (this instanceof Finished finished) {
+            out.number(4).list(finished.problems(), ValueWire::problem);
+        } else if (this instanceof Failed failed) {
+            out.number(5).text(failed.what());
+        }
+        return out.bytes();
+    }
+
+    private static void place(WireOut out, Place place) {
+        out.number(place.line()).number(place.column());
+    }
+
+    private static Place place(WireIn in) {
+        return new Place(in.number(), in.number());
+    }
+
+    /** The message that the bytes are. */
+    static Report of(byte[] message) {
+        WireIn in = new WireIn(message);
+        int kind = in.number();
+        return switch (kind) {
+            case 0 -> new Translated(in.list(ValueWire::problem));
+            case 1 -> new Begun(in.number(), place(in));
+            case 2 -> new CellEnded(ValueWire.cellRun(in), in.list(ValueWire::result), in.list(ValueWire::problem));
+            case 3 ->
+                new CheckEnded(
+                        in.number(),
+                        place(in),
+                        in.flag() ? Optional.of(ValueWire.checkValue(in)) : Optional.empty(),
+                        in.text(),
+                        in.list(ValueWire::problem));
+            case 4 -> new Finished(in.list(ValueWire::problem));
+            case 5 -> new Failed(in.text());
+            default -> throw new WireIn.BadMessage("there is no kind of report " + kind);
+        };
+    }
+}

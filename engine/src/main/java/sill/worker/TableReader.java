@@ -1,0 +1,126 @@
+package sill.worker;
+
+import de.siegmar.fastcsv.reader.CsvParseException;
+import de.siegmar.fastcsv.reader.CsvReader;
+import de.siegmar.fastcsv.reader.CsvRecord;
+import java.io.ByteArrayInputStream;
+import java.io.InputStreamReader;
+import java.io.Reader;
+import java.nio.charset.CharacterCodingException;
+import java.nio.charset.CodingErrorAction;
+import java.nio.charset.StandardCharsets;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import sill.stdlib.Table;
+import sill.units.Unit;
+import sill.units.UnitException;
+
+/**
+ * Reads a data file as a table: comma separated (RFC 4180) in UTF-8, a header line first. A header such as {@code vIn [mV]}
+ * names the unit its numbers are in. A column is text as soon as one of its fields is neither a number nor empty.
+ */
+final class TableReader {
+    private TableReader() {}
+
+    /** A file that is no table; the message names the line. */
+    static final class NoTable extends Exception {
+        private static final long serialVersionUID = 1;
+
+        NoTable(String message) {
+            super(message);
+        }
+    }
+
+    static Table read(byte[] bytes) throws NoTable {
+        List<List<String>> rows = new ArrayList<>();
+        List<Long> lines = new ArrayList<>();
+        // A decoder that reports, since a wrong character would be a wrong number.
+        Reader text = new InputStreamReader(
+                new ByteArrayInputStream(withoutMark(bytes)),
+                StandardCharsets.UTF_8
+                        .newDecoder()
+                        .onMalformedInput(CodingErrorAction.REPORT)
+                        .onUnmappableCharacter(CodingErrorAction.REPORT));
+        try (CsvReader<CsvRecord> csv = CsvReader.builder().ofCsvRecord(text)) {
+            for (CsvRecord row : csv) {
+                rows.add(row.getFields());
+                lines.add(row.getStartingLineNumber());
+            }
+        } catch (CsvParseException | java.io.UncheckedIOException | java.io.IOException e) {
+            if (e instanceof CharacterCodingException
+                    || e.getCause() instanceof CharacterCodingException
+                    || (e.getCause() != null && e.getCause().getCause() instanceof CharacterCodingException)) {
+                throw new NoTable("it is not UTF-8 text");
+            }
+            throw new NoTable("it is not comma separated text: " + e.getMessage());
+        }
+        if (rows.isEmpty()) {
+            throw new NoTable("it is empty: a header line was expected");
+        }
+        return table(rows, lines);
+    }
+
+    private static byte[] withoutMark(byte[] bytes) {
+        boolean marked =
+                bytes.length >= 3 && bytes[0] == (byte) 0xEF && bytes[1] == (byte) 0xBB && bytes[2] == (byte) 0xBF;
+        return marked ? java.util.Arrays.copyOfRange(bytes, 3, bytes.length) : bytes;
+    }
+
+    private static Table table(List<List<String>> rows, List<Long> lines) throws NoTable {
+        List<String> header = rows.get(0);
+        for (int row = 1; row < rows.size(); row++) {
+            if (rows.get(row).size() != header.size()) {
+                throw new NoTable("line " + lines.get(row) + " has "
+                        + rows.get(row).size() + " fields, the header has " + header.size());
+            }
+        }
+        Map<String, Object> columns = new LinkedHashMap<>();
+        for (int i = 0; i < header.size(); i++) {
+            int column = i;
+            List<String> fields =
+                    rows.stream().skip(1).map(row -> row.get(column).strip()).toList();
+            String title = header.get(i).strip();
+            int bracket = title.endsWith("]") ? title.lastIndexOf('[') : -1;
+            String name = bracket < 0 ? title : title.substring(0, bracket).strip();
+            if (name.isEmpty()) {
+                throw new NoTable("column " + (i + 1) + " has no name in the header line");
+            }
+            Unit unit = bracket < 0 ? Unit.ONE : unit(title.substring(bracket + 1, title.length() - 1), name);
+            if (columns.put(name, values(fields, unit)) != null) {
+                throw new NoTable("two columns are named \"" + name + "\"");
+            }
+        }
+        return new Table(columns);
+    }
+
+    private static Unit unit(String symbol, String column) throws NoTable {
+        try {
+            return Unit.parse(symbol.strip());
+        } catch (UnitException e) {
+            throw new NoTable("column \"" + column + "\": " + e.getMessage());
+        }
+    }
+
+    private static Object values(List<String> fields, Unit unit) {
+        double[] numbers = new double[fields.size()];
+        for (int i = 0; i < numbers.length; i++) {
+            String field = fields.get(i);
+            try {
+                numbers[i] = field.isEmpty() ? Double.NaN : unit.toSi(number(field));
+            } catch (NumberFormatException e) {
+                return fields;
+            }
+        }
+        return numbers;
+    }
+
+    /** Java's own reading of a number also takes {@code 1d} and {@code 0x1p3}, which no instrument writes. */
+    private static double number(String field) {
+        if (!field.matches("[+-]?(\\d+\\.?\\d*|\\.\\d+)([eE][+-]?\\d+)?")) {
+            throw new NumberFormatException(field);
+        }
+        return Double.parseDouble(field);
+    }
+}
