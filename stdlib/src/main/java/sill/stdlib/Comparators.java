@@ -2,8 +2,9 @@ package sill.stdlib;
 
 /**
  * Trip points of a comparator with hysteresis. The comparator is ideal but for its two output levels: no current flows
- * into its inputs, and its output changes where they are equal. An offset is added to the reference; a pull-up adds to
- * {@code rFb} in the high state.
+ * into its inputs, and its output changes where they are equal. An offset is added to the reference. A pull-up adds to
+ * {@code rFb} while the output is high: the trip point that is left in the high state is computed with it, the other
+ * without.
  */
 public final class Comparators {
     private Comparators() {}

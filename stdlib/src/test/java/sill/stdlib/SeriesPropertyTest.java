@@ -2,8 +2,11 @@ package sill.stdlib;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
+import java.util.concurrent.ConcurrentHashMap;
+import java.util.stream.DoubleStream;
+import java.util.stream.IntStream;
 import net.jqwik.api.Arbitraries;
 import net.jqwik.api.Arbitrary;
 import net.jqwik.api.ForAll;
@@ -12,6 +15,8 @@ import net.jqwik.api.Provide;
 
 /** The series against a search through all numbers of the published table. */
 class SeriesPropertyTest {
+    private static final Map<Series, List<Double>> ALL = new ConcurrentHashMap<>();
+
     @Property(seed = "60063")
     void stepsAgreeWithASearch(@ForAll Series series, @ForAll("values") double x) {
         List<Double> all = around(series);
@@ -60,13 +65,14 @@ class SeriesPropertyTest {
     }
 
     private static List<Double> around(Series series) {
-        List<Double> all = new ArrayList<>();
+        return ALL.computeIfAbsent(series, SeriesPropertyTest::allDecades);
+    }
+
+    private static List<Double> allDecades(Series series) {
         double[] published = SeriesTest.published(series);
-        for (int decade = -12; decade <= 12; decade++) {
-            for (double number : published) {
-                all.add(Double.parseDouble(number + "e" + decade));
-            }
-        }
-        return all;
+        return IntStream.rangeClosed(-12, 12)
+                .boxed()
+                .flatMap(decade -> DoubleStream.of(published).mapToObj(number -> Double.valueOf(number + "e" + decade)))
+                .toList();
     }
 }
