@@ -28,8 +28,7 @@ import sill.worksheet.Worksheet;
 /** Puts a record together from the worksheet and what its run gave. */
 public final class Assembly {
     /** Why tolerance cells, and checks that rest on them, have no verdict. */
-    public static final String NO_TOLERANCE_RUNS =
-            "not judged: this version of Sill does not run tolerance studies yet";
+    public static final String NO_TOLERANCE_RUNS = "this version of Sill does not run tolerance studies yet";
 
     private final Worksheet worksheet;
     private final RunResult run;
@@ -101,7 +100,7 @@ public final class Assembly {
         String reason = ran.reason();
         if (cell instanceof Cell.Tolerance && !wrong) {
             state = CellState.NOT_RUN;
-            reason = NO_TOLERANCE_RUNS;
+            reason = "not judged: " + NO_TOLERANCE_RUNS;
         }
         return new CellEntry(
                 cell.number(),

@@ -1,5 +1,7 @@
 package sill.values;
 
+import java.util.Collections;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -39,7 +41,8 @@ public record Result(
         List<String> uses,
         List<String> dependsOn) {
     public Result {
-        componentUnits = Map.copyOf(componentUnits);
+        // Map.copyOf would forget the order of the components.
+        componentUnits = Collections.unmodifiableMap(new LinkedHashMap<>(componentUnits));
         uses = List.copyOf(uses);
         dependsOn = List.copyOf(dependsOn);
     }
