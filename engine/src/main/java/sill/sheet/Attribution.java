@@ -12,20 +12,25 @@ import java.util.Map;
  * @param text the compilation unit
  * @param errors what the compiler complains of, offsets in {@code text}
  * @param usages uses of the sheet's own names
- * @param helperUnits unit symbols that helpers state, by field
+ * @param types types of the bare expressions, by field; {@link ClassText#NO_VALUE} for a call that gives none
+ * @param units unit symbols that helpers state, by field
  */
 record Attribution(
-        MappedText text, List<Compiler.Complaint> errors, List<Usage> usages, Map<String, String> helperUnits) {
-    static Attribution of(MappedText text, Compiler compiler) {
+        MappedText text,
+        List<Compiler.Complaint> errors,
+        List<Usage> usages,
+        Map<String, String> types,
+        Map<String, String> units) {
+    static Attribution of(ClassText classText, Compiler compiler) {
+        MappedText text = classText.unit();
         Compiler.Task task = compiler.task(List.of(text.toString()));
         try {
             CompilationUnitTree unit = task.task().parse().iterator().next();
             task.task().analyze();
             Trees trees = Trees.instance(task.task());
             List<Usage> usages = new UsageScanner(trees, unit, text).usages();
-            HelperUnits units = new HelperUnits(trees);
-            units.scan(unit, null);
-            return new Attribution(text, task.errors(), usages, units.units());
+            FieldFacts facts = FieldFacts.of(trees, unit, classText.slots());
+            return new Attribution(text, task.errors(), usages, facts.types(), facts.units());
         } catch (IOException e) {
             throw new java.io.UncheckedIOException(e);
         }

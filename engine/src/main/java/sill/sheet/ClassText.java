@@ -1,5 +1,6 @@
 package sill.sheet;
 
+import java.util.HashMap;
 import java.util.HashSet;
 import java.util.IdentityHashMap;
 import java.util.List;
@@ -25,6 +26,7 @@ final class ClassText {
     private final Set<Integer> leftOutCells;
     private final Set<Place> leftOutChecks;
     private final Map<Snippet, Program.Field> bareExpressions = new IdentityHashMap<>();
+    private final Map<Integer, String> slots = new HashMap<>();
     private final MappedText text = new MappedText();
 
     /**
@@ -71,6 +73,11 @@ final class ClassText {
         return text.add("}\n");
     }
 
+    /** Start offsets of the statements that give fields their values, to the fields' names. */
+    Map<Integer, String> slots() {
+        return slots;
+    }
+
     static String cellMethod(int number) {
         return "$cell" + number;
     }
@@ -94,7 +101,8 @@ final class ClassText {
         for (Program.CellCode cell : program.cells()) {
             for (Program.Field field : cell.fields()) {
                 String type = type(field);
-                if (!type.equals(NO_VALUE) && names.add(field.field())) {
+                boolean local = field.isBare() && type.isEmpty();
+                if (!local && !type.equals(NO_VALUE) && names.add(field.field())) {
                     text.add("public static ")
                             .add(
                                     type.isEmpty() ? "Object" : type,
@@ -140,6 +148,7 @@ final class ClassText {
     private void assignment(Snippet snippet, Snippet.Variable variable) {
         Piece piece = snippet.piece();
         String type = variable.typeIsOpen() ? types.getOrDefault(variable.name(), "") : variable.type();
+        slots.put(text.length(), variable.name());
         // With its type unknown it stays a local, so that the compiler says why in the author's own terms.
         text.add((type.isEmpty() ? "var " : "") + variable.name() + " = ", piece, variable.at());
         if (variable.arrayInitialiser() && !type.isEmpty()) {
@@ -152,6 +161,7 @@ final class ClassText {
         Piece piece = snippet.piece();
         Program.Field field = bareExpressions.get(snippet);
         String type = type(field);
+        slots.put(text.length(), field.field());
         if (type.isEmpty() && snippet.kind() == Snippet.Kind.EXPRESSION) {
             text.add("var " + field.field() + " = ", piece, snippet.expression().start());
         } else if (!type.isEmpty() && !type.equals(NO_VALUE)) {

@@ -8,7 +8,7 @@ import java.util.Map;
 import java.util.Set;
 
 /**
- * Writes the class whose attribution gives the types that {@code var} and bare expressions leave open. It differs from the
+ * Writes the class whose attribution gives the types that {@code var} leaves open. It differs from the
  * sheet's class in two ways: all cells are one method, where a result of open type is a local; and methods have no bodies,
  * since only their headings matter here. What the compiler complains of in it does not count.
  */
@@ -53,7 +53,7 @@ final class ProbeText {
         text.add("static void all() throws Throwable {\n");
         for (Program.CellCode cell : program.cells()) {
             for (Program.Field field : cell.fields()) {
-                if (field.isOpen() && !types.containsKey(field.field())) {
+                if (field.isOpen() && !field.isBare() && !types.containsKey(field.field())) {
                     open(field);
                 }
             }
@@ -82,18 +82,11 @@ final class ProbeText {
     private void open(Program.Field field) {
         Snippet snippet = field.snippet();
         slots.put(text.length(), field.field());
-        if (snippet.kind() == Snippet.Kind.CALL) {
-            text.copy(snippet.piece(), snippet.expression()).add(";\n");
-            return;
-        }
-        Span value = snippet.expression();
-        if (snippet.kind() == Snippet.Kind.VARIABLES) {
-            value = snippet.variables().stream()
-                    .filter(v -> v.name().equals(field.name()))
-                    .findFirst()
-                    .orElseThrow()
-                    .initialiser();
-        }
+        Span value = snippet.variables().stream()
+                .filter(variable -> variable.name().equals(field.name()))
+                .findFirst()
+                .orElseThrow()
+                .initialiser();
         text.add("var " + field.field() + " = ").copy(snippet.piece(), value).add(";\n");
     }
 }

@@ -72,6 +72,11 @@ record Program(List<SheetSource.GivenField> givens, List<CellCode> cells, List<C
         boolean isOpen() {
             return type.equals("var");
         }
+
+        /** Whether it holds a bare expression's value: no other code can name it. */
+        boolean isBare() {
+            return name.isEmpty();
+        }
     }
 
     /** A parsed check line; empty when its expression can't be parsed. */
@@ -92,12 +97,12 @@ record Program(List<SheetSource.GivenField> givens, List<CellCode> cells, List<C
                 .toList();
     }
 
-    /** Open fields of all cells by name. */
-    Map<String, Field> openFields() {
+    /** The variables declared with {@code var}, by name. */
+    Map<String, Field> openVariables() {
         Map<String, Field> open = new LinkedHashMap<>();
         for (CellCode cell : cells) {
             for (Field field : cell.fields()) {
-                if (field.isOpen()) {
+                if (field.isOpen() && !field.isBare()) {
                     open.put(field.field(), field);
                 }
             }

@@ -38,7 +38,8 @@ public final class Translation {
         findFaults();
         types = new TypeFinder(compiler).find(program);
         findUnavailable();
-        attribution = Attribution.of(new ClassText(program, types, brokenCells, brokenChecks).unit(), compiler);
+        attribution = Attribution.of(new ClassText(program, types, brokenCells, brokenChecks), compiler);
+        attribution.types().forEach(types::putIfAbsent);
         dependencies = new Dependencies(program, names, attribution.usages());
         attribution
                 .errors()
@@ -276,7 +277,7 @@ public final class Translation {
                 TypeNames.withoutPackages(type),
                 caption.unit()
                         .map(unit -> unit.coherent().symbol())
-                        .orElse(attribution.helperUnits().getOrDefault(field.field(), "")),
+                        .orElse(attribution.units().getOrDefault(field.field(), "")),
                 caption.unit().map(unit -> unit.symbol()).orElse(""),
                 caption.text(),
                 uses,
