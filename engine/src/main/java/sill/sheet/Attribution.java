@@ -5,6 +5,7 @@ import com.sun.source.util.Trees;
 import java.io.IOException;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 
 /**
  * The sheet's class, attributed: what the compiler complains of, and what its one tree tells the readers.
@@ -12,6 +13,7 @@ import java.util.Map;
  * @param text the compilation unit
  * @param errors what the compiler complains of, offsets in {@code text}
  * @param usages uses of the sheet's own names
+ * @param imports the imports on demand that the text rests on
  * @param types types of the bare expressions, by field; {@link ClassText#NO_VALUE} for a call that gives none
  * @param units unit symbols that helpers state, by field
  */
@@ -19,6 +21,7 @@ record Attribution(
         MappedText text,
         List<Compiler.Complaint> errors,
         List<Usage> usages,
+        Set<String> imports,
         Map<String, String> types,
         Map<String, String> units) {
     static Attribution of(ClassText classText, Compiler compiler) {
@@ -28,9 +31,10 @@ record Attribution(
             CompilationUnitTree unit = task.task().parse().iterator().next();
             task.task().analyze();
             Trees trees = Trees.instance(task.task());
-            List<Usage> usages = new UsageScanner(trees, unit, text).usages();
+            UsageScanner scanner = new UsageScanner(trees, unit, text);
+            List<Usage> usages = scanner.usages();
             FieldFacts facts = FieldFacts.of(trees, unit, classText.slots());
-            return new Attribution(text, task.errors(), usages, facts.types(), facts.units());
+            return new Attribution(text, task.errors(), usages, scanner.imports(), facts.types(), facts.units());
         } catch (IOException e) {
             throw new java.io.UncheckedIOException(e);
         }

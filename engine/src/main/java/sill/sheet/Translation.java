@@ -87,7 +87,10 @@ public final class Translation {
         steps.sort(Comparator.comparing(TranslatedSheet.Step::place));
         ClassText text = new ClassText(program, types, cells, checks);
         List<String> imports = new ArrayList<>();
-        Program.IMPORTS.forEach(name -> imports.add("import " + name + ";"));
+        // Each import that the evaluator is given costs it as much as some lines of Java.
+        Program.IMPORTS.stream()
+                .filter(attribution.imports()::contains)
+                .forEach(name -> imports.add("import " + name + ";"));
         program.imports().stream()
                 .filter(snippet -> !brokenImports.contains(snippet))
                 .forEach(

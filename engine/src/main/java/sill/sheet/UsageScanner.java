@@ -19,11 +19,16 @@ import com.sun.source.util.SourcePositions;
 import com.sun.source.util.TreePathScanner;
 import com.sun.source.util.Trees;
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.IdentityHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import javax.lang.model.element.Element;
 import javax.lang.model.element.ElementKind;
+import javax.lang.model.element.Modifier;
+import javax.lang.model.element.PackageElement;
+import javax.lang.model.element.TypeElement;
 
 /** Collects where the attributed class uses the sheet's own names. The scan's argument: whether the code may run later. */
 final class UsageScanner extends TreePathScanner<Void, Boolean> {
@@ -33,6 +38,7 @@ final class UsageScanner extends TreePathScanner<Void, Boolean> {
     private final MappedText text;
     private final Map<Tree, Usage.How> targets = new IdentityHashMap<>();
     private final List<Usage> usages = new ArrayList<>();
+    private final Set<String> imports = new HashSet<>();
 
     UsageScanner(Trees trees, CompilationUnitTree unit, MappedText text) {
         this.trees = trees;
@@ -44,6 +50,11 @@ final class UsageScanner extends TreePathScanner<Void, Boolean> {
     List<Usage> usages() {
         scan(unit, false);
         return List.copyOf(usages);
+    }
+
+    /** The imports on demand that names of the sheet rest on, as an import names them; known after {@link #usages}. */
+    Set<String> imports() {
+        return imports;
     }
 
     @Override
@@ -58,6 +69,10 @@ final class UsageScanner extends TreePathScanner<Void, Boolean> {
             Usage.How how = targets.getOrDefault(identifier, Usage.How.READ);
             usages.add(new Usage(
                     element.getSimpleName().toString(), kind(element), how, origin.piece(), origin.offset(), deferred));
+        } else if (owner instanceof PackageElement from) {
+            imports.add(from.getQualifiedName() + ".*");
+        } else if (owner instanceof TypeElement from && element.getModifiers().contains(Modifier.STATIC)) {
+            imports.add("static " + from.getQualifiedName() + ".*");
         }
         return null;
     }
