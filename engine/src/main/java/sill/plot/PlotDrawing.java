@@ -36,7 +36,7 @@ public final class PlotDrawing {
         this.idPrefix = idPrefix;
         AxisRange x = range(plot.x(), Plot.Side.X);
         AxisRange y = range(plot.y(), Plot.Side.Y);
-        xTicks = Ticks.along(x, plot.x().unit(), 8);
+        xTicks = Ticks.within(x, plot.x().unit(), WIDTH - 2 * MARK_MARGIN);
         yTicks = Ticks.along(y, plot.y().unit(), 6);
         marks = plot.marks().stream()
                 .filter(mark -> AxisRange.shows(axis(mark).scale(), mark.at()))
