@@ -45,7 +45,7 @@ final class Checks {
         page.open("th", "scope", "row", "class", "at");
         Addresses.write(page, check.at(), place == Place.IN_CELL);
         page.close();
-        page.open("td", "data-label", "Requirement").leaf("code", check.text());
+        page.open("td", "data-label", "Requirement").leaf("code", check.text()).text(" ");
         page.leaf("span", basis(check), "class", "basis").close();
         Tables.cell(page, "Value", "number", check.shownValue());
         Tables.cell(page, "Limit", "number", check.shownLimit());
