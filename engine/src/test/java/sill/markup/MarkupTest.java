@@ -46,6 +46,19 @@ class MarkupTest {
                 .withMessage("attributes must be names and values in turn, got 1 texts");
     }
 
+    @Test
+    void attributesMayFollow() {
+        Markup markup = new Markup()
+                .open("p", "class", "a")
+                .with("title", "<")
+                .text("b")
+                .close();
+        assertThat(markup).hasToString("<p class=\"a\" title=\"&lt;\">b</p>");
+        assertThatIllegalStateException()
+                .isThrownBy(() -> markup.with("id", "c"))
+                .withMessage("an attribute must follow its start tag, got id after content");
+    }
+
     /** jsoup, which reads as browsers do, finds one element with the text and the attribute that went in. */
     @Property
     void noTextBecomesMarkup(@ForAll String text) {
