@@ -11,6 +11,9 @@ public final class Markup {
     private final StringBuilder out = new StringBuilder(4096);
     private final Deque<String> openElements = new ArrayDeque<>();
 
+    /** What ends the start tag written last; empty once it has ended. */
+    private String tagEnd = "";
+
     /**
      * Opens an element.
      *
@@ -18,14 +21,26 @@ public final class Markup {
      * @param attributes names and values in turn; a value is escaped
      */
     public Markup open(String element, String... attributes) {
-        startTag(element, attributes);
-        out.append('>');
+        startTag(element, attributes, ">");
         openElements.push(element);
+        return this;
+    }
+
+    /** Gives the element opened just now one more attribute. */
+    public Markup with(String attribute, String value) {
+        if (tagEnd.isEmpty()) {
+            throw new IllegalStateException(
+                    "an attribute must follow its start tag, got " + attribute + " after content");
+        }
+        out.append(' ').append(attribute).append("=\"");
+        escape(VisibleText.of(value));
+        out.append('"');
         return this;
     }
 
     /** Closes the element that was opened last. */
     public Markup close() {
+        endTag();
         out.append("</").append(openElements.pop()).append('>');
         return this;
     }
@@ -37,32 +52,33 @@ public final class Markup {
 
     /** An HTML element that has no end tag, as {@code meta}. */
     public Markup single(String element, String... attributes) {
-        startTag(element, attributes);
-        out.append('>');
+        startTag(element, attributes, ">");
         return this;
     }
 
     /** An SVG element without content. */
     public Markup shape(String element, String... attributes) {
-        startTag(element, attributes);
-        out.append("/>");
+        startTag(element, attributes, "/>");
         return this;
     }
 
     /** Text, escaped, with hidden characters shown as their codes. */
     public Markup text(String text) {
+        endTag();
         escape(VisibleText.of(text));
         return this;
     }
 
     /** A line end, for readers of the file. */
     public Markup line() {
+        endTag();
         out.append('\n');
         return this;
     }
 
     /** Markup as it is; never text from a worksheet. */
     public Markup trusted(String markup) {
+        endTag();
         out.append(markup);
         return this;
     }
@@ -77,20 +93,26 @@ public final class Markup {
         if (!openElements.isEmpty()) {
             throw new IllegalStateException("elements must be closed, still open: " + openElements);
         }
+        endTag();
         return out.toString();
     }
 
-    private void startTag(String element, String[] attributes) {
+    private void startTag(String element, String[] attributes, String end) {
         if (attributes.length % 2 != 0) {
             throw new IllegalArgumentException(
                     "attributes must be names and values in turn, got " + attributes.length + " texts");
         }
+        endTag();
         out.append('<').append(element);
+        tagEnd = end;
         for (int i = 0; i < attributes.length; i += 2) {
-            out.append(' ').append(attributes[i]).append("=\"");
-            escape(VisibleText.of(attributes[i + 1]));
-            out.append('"');
+            with(attributes[i], attributes[i + 1]);
         }
+    }
+
+    private void endTag() {
+        out.append(tagEnd);
+        tagEnd = "";
     }
 
     private void escape(String text) {

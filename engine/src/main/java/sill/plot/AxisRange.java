@@ -1,5 +1,6 @@
 package sill.plot;
 
+import java.util.Arrays;
 import java.util.stream.DoubleStream;
 import sill.stdlib.Plot;
 
@@ -16,6 +17,18 @@ record AxisRange(double low, double high, Plot.Scale scale) {
 
     /** Smaller spans than this share of the values are rounding noise. */
     private static final double SMALLEST_SHARE = 1e-12;
+
+    /** The range of a plot's axis: all curves and marks, with space around points and above and below lines. */
+    static AxisRange of(Plot plot, Plot.Side side) {
+        boolean across = side == Plot.Side.X;
+        DoubleStream points =
+                plot.curves().stream().flatMapToDouble(curve -> Arrays.stream(across ? curve.x() : curve.y()));
+        DoubleStream lines =
+                plot.marks().stream().filter(mark -> mark.side() == side).mapToDouble(Plot.Mark::at);
+        boolean onEdge = across && plot.curves().stream().noneMatch(curve -> curve.style() == Plot.Style.POINTS);
+        Plot.Axis axis = across ? plot.x() : plot.y();
+        return around(DoubleStream.concat(points, lines), axis.scale(), onEdge ? 0 : 0.05);
+    }
 
     /** Whether a scale can show a value. */
     static boolean shows(Plot.Scale scale, double value) {

@@ -30,16 +30,24 @@ record AxisUnit(String symbol, int exponent) {
         boolean pure = unit.isEmpty() || unit.equals("1");
         int thousands = largest > 0 ? 3 * Math.floorDiv(decimalExponent(largest), 3) : 0;
         Matcher kilogram = KILOGRAM.matcher(unit);
-        if (kilogram.matches() && inPrefixes(thousands + 3)) {
+        if (kilogram.matches() && inPrefixes(thousands + 3, 3)) {
             return new AxisUnit(prefix(thousands + 3) + "g" + kilogram.group(1), thousands);
         }
-        if (!pure && !kilogram.matches() && TAKES_PREFIX.matcher(unit).matches() && inPrefixes(thousands)) {
+        boolean takesPrefix =
+                !pure && !kilogram.matches() && TAKES_PREFIX.matcher(unit).matches();
+        if (takesPrefix && inPrefixes(thousands, largestPrefix(unit))) {
             return new AxisUnit(prefix(thousands) + unit, thousands);
         }
-        if (largest >= 0.1 && largest < 1e5 || thousands == 0) {
-            return unprefixed(unit);
-        }
-        return new AxisUnit(power(thousands) + (pure ? "" : " " + unit), thousands);
+        boolean plain = largest >= 0.1 && largest < 1e5;
+        return plain || thousands == 0
+                ? unprefixed(unit)
+                : new AxisUnit(power(thousands) + (pure ? "" : " " + unit), thousands);
+    }
+
+    /** Nobody reads kiloseconds or megametres; the same limits as in the record's values. */
+    private static int largestPrefix(String unit) {
+        String first = unit.split("[/·]", 2)[0];
+        return first.equals("s") || first.equals("K") ? 0 : first.equals("m") ? 3 : LARGEST;
     }
 
     /** The coherent unit as it is. */
@@ -89,8 +97,8 @@ record AxisUnit(String symbol, int exponent) {
         return exact.precision() - exact.scale() - 1;
     }
 
-    private static boolean inPrefixes(int exponent) {
-        return exponent >= SMALLEST && exponent <= LARGEST;
+    private static boolean inPrefixes(int exponent, int largest) {
+        return exponent >= SMALLEST && exponent <= largest;
     }
 
     private static String prefix(int exponent) {

@@ -34,15 +34,6 @@ final class CurvePath {
         }
     }
 
-    private CurvePath(String path) {
-        this.path.append(path);
-    }
-
-    /** A path that is drawn like a curve, for the key. */
-    static CurvePath of(String path) {
-        return new CurvePath(path);
-    }
-
     /** The path of the line or of all markers. */
     String path() {
         return path.toString();

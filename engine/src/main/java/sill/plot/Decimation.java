@@ -3,6 +3,7 @@ package sill.plot;
 import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.Map;
+import java.util.stream.IntStream;
 
 /**
  * Thins out the points of a long curve so that the drawing looks the same: of the points that fall into one narrow column
@@ -21,6 +22,9 @@ final class Decimation {
      * @return the indices of the points that stay, rising
      */
     static int[] line(double[] x, double[] y, double column, int most) {
+        if (x.length <= most) {
+            return IntStream.range(0, x.length).toArray();
+        }
         int[] kept = new int[x.length];
         int count = 0;
         int from = 0;

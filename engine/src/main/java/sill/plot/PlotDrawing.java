@@ -1,10 +1,8 @@
 package sill.plot;
 
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.List;
-import java.util.stream.DoubleStream;
-import sill.markup.Markup;
+import java.util.stream.Stream;
 import sill.stdlib.Plot;
 
 /**
@@ -19,40 +17,34 @@ public final class PlotDrawing {
     private static final double MARK_MARGIN = 190;
     private static final double KEY_SWATCH = 34;
 
+    /** From the middle of a line of text to its baseline. */
+    private static final double BASELINE = 4.5;
+
     /** Points of all curves together; keeps a drawing below 200 kB. */
     private static final int MOST_POINTS = 4000;
 
     private final Plot plot;
-    private final String idPrefix;
     private final Ticks xTicks;
     private final Ticks yTicks;
     private final List<Plot.Mark> marks;
     private final List<MarkLabels.Flag> flags;
     private final Frame frame;
-    private final Markup svg = new Markup();
 
-    private PlotDrawing(Plot plot, String idPrefix) {
+    private PlotDrawing(Plot plot) {
         this.plot = plot;
-        this.idPrefix = idPrefix;
-        AxisRange x = range(plot.x(), Plot.Side.X);
-        AxisRange y = range(plot.y(), Plot.Side.Y);
-        xTicks = Ticks.along(x, plot.x().unit(), 8);
+        AxisRange x = AxisRange.of(plot, Plot.Side.X);
+        AxisRange y = AxisRange.of(plot, Plot.Side.Y);
+        xTicks = Ticks.within(x, plot.x().unit(), WIDTH - 2 * MARK_MARGIN);
         yTicks = Ticks.along(y, plot.y().unit(), 6);
         marks = plot.marks().stream()
-                .filter(mark -> AxisRange.shows(axis(mark).scale(), mark.at()))
+                .filter(mark -> AxisRange.shows((mark.side() == Plot.Side.X ? x : y).scale(), mark.at()))
                 .toList();
-        double left = EDGE
-                + 10
-                + widest(yTicks.labelled().stream().map(Ticks.Tick::text).toList());
-        List<String> sideTexts = marks.stream()
-                .filter(mark -> mark.side() == Plot.Side.Y)
-                .map(this::markText)
-                .toList();
-        double right = sideTexts.isEmpty() ? 24 : Math.min(MARK_MARGIN, widest(sideTexts) + 14) + EDGE;
+        double left = EDGE + 10 + widest(yTicks.labelled().stream().map(Ticks.Tick::text));
+        double widestMark = widest(marks(Plot.Side.Y).map(this::markText));
+        double right = widestMark == 0 ? 24 : Math.min(MARK_MARGIN, widestMark + 14) + EDGE;
         Frame flat = new Frame(left, 0, WIDTH - left - right, HEIGHT, x, y);
         flags = MarkLabels.above(
-                marks.stream()
-                        .filter(mark -> mark.side() == Plot.Side.X)
+                marks(Plot.Side.X)
                         .map(mark -> new MarkLabels.Wanted(flat.px(mark.at()), markText(mark)))
                         .toList(),
                 EDGE,
@@ -72,164 +64,101 @@ public final class PlotDrawing {
             throw new IllegalArgumentException(
                     "idPrefix must be a letter, then letters, digits and hyphens, got \"" + idPrefix + "\"");
         }
-        return new PlotDrawing(plot, idPrefix).draw();
+        return new PlotDrawing(plot).draw(idPrefix);
     }
 
-    private String draw() {
+    private String draw(String idPrefix) {
         List<CurvePath> curves = new ArrayList<>();
-        int most = Math.max(40, MOST_POINTS / Math.max(1, plot.curves().size()));
-        for (int i = 0; i < plot.curves().size(); i++) {
-            curves.add(
-                    new CurvePath(plot.curves().get(i), frame, most, Look.of(i).marker()));
+        int most = Math.max(40, MOST_POINTS / plot.curves().size());
+        for (Plot.Curve curve : plot.curves()) {
+            curves.add(new CurvePath(curve, frame, most, Look.of(curves.size()).marker()));
         }
         int hidden = curves.stream().mapToInt(CurvePath::hidden).sum();
         List<Key.Entry> key = Key.arrange(plot.curves(), KEY_SWATCH, EDGE, WIDTH - EDGE);
         double keyTop = frame.bottom() + 2 * LABEL_ROW + 4;
         int keyRows = key.stream().mapToInt(entry -> entry.row() + 1).max().orElse(0);
-        double height = keyTop + (keyRows + (hidden > 0 ? 1 : 0)) * LABEL_ROW + EDGE;
+        double noteTop = keyTop + keyRows * LABEL_ROW;
+        double height = noteTop + (hidden > 0 ? LABEL_ROW : 0) + EDGE;
 
-        svg.open(
-                "svg",
-                "xmlns",
-                "http://www.w3.org/2000/svg",
-                "class",
-                "plot",
-                "role",
-                "img",
-                "aria-labelledby",
-                idPrefix + "-title " + idPrefix + "-desc",
-                "viewBox",
-                "0 0 " + Px.text(WIDTH) + " " + Px.text(height),
-                "width",
-                Px.text(WIDTH),
-                "height",
-                Px.text(height),
-                "font-family",
-                "system-ui, sans-serif",
-                "font-size",
-                Integer.toString(TextWidth.FONT_SIZE));
-        svg.leaf("title", plot.title(), "id", idPrefix + "-title");
-        svg.leaf("desc", plot.description(), "id", idPrefix + "-desc").line();
-        shape("rect", "paper", "width", Px.text(WIDTH), "height", Px.text(height), "fill", "#ffffff");
-        drawGrid();
-        drawAxes();
-        drawMarks();
+        Canvas canvas = new Canvas(WIDTH, height, idPrefix, plot.title(), plot.description());
+        drawGrid(canvas);
+        drawAxes(canvas);
+        marks.forEach(mark -> canvas.line(
+                Pen.of(mark.role()), mark.side() == Plot.Side.X ? vertical(mark.at()) : horizontal(mark.at())));
         for (int i = 0; i < curves.size(); i++) {
-            drawCurve(plot.curves().get(i).style(), curves.get(i), Look.of(i));
+            Look look = Look.of(i);
+            canvas.line(
+                    Pen.of(look, plot.curves().get(i).style()), curves.get(i).path());
+            canvas.area(
+                    "arrow arrow-" + look.number(), look.colour(), curves.get(i).arrows());
         }
-        drawMarkLabels();
-        key.forEach(entry -> drawKey(entry, keyTop));
+        drawMarkLabels(canvas);
+        key.forEach(entry -> drawKey(canvas, entry, keyTop));
         if (hidden > 0) {
             String note = hidden == 1 ? "1 point is" : hidden + " points are";
-            label(EDGE, keyTop + keyRows * LABEL_ROW + 14, "start", note + " outside what the axes can show");
+            canvas.label(EDGE, noteTop + 14, Canvas.Anchor.START, note + " outside what the axes can show");
         }
-        return svg.close().toString();
+        return canvas.finish();
     }
 
-    private void drawGrid() {
+    private void drawGrid(Canvas canvas) {
         StringBuilder fine = new StringBuilder();
         xTicks.between().forEach(value -> fine.append(vertical(value)));
         yTicks.between().forEach(value -> fine.append(horizontal(value)));
-        path("grid-fine", fine, "stroke", "#eceeed");
+        canvas.line(Pen.FINE_GRID, fine);
         StringBuilder main = new StringBuilder();
         xTicks.labelled().forEach(tick -> main.append(vertical(tick.value())));
         yTicks.labelled().forEach(tick -> main.append(horizontal(tick.value())));
-        path("grid", main, "stroke", "#cfd5d2");
+        canvas.line(Pen.GRID, main);
     }
 
-    private void drawAxes() {
-        shape(
-                "rect",
-                "frame",
-                "x",
-                Px.text(frame.left()),
-                "y",
-                Px.text(frame.top()),
-                "width",
-                Px.text(frame.width()),
-                "height",
-                Px.text(frame.height()),
-                "fill",
-                "none",
-                "stroke",
-                "#4c5753");
+    private void drawAxes(Canvas canvas) {
+        String right = "H" + Px.text(frame.right());
+        String down = "V" + Px.text(frame.bottom());
+        canvas.line(
+                Pen.FRAME, Px.at('M', frame.left(), frame.top()) + right + down + "H" + Px.text(frame.left()) + "z");
         for (Ticks.Tick tick : xTicks.labelled()) {
-            label(frame.px(tick.value()), frame.bottom() + 17, "middle", tick.text());
+            canvas.label(frame.px(tick.value()), frame.bottom() + 17, Canvas.Anchor.MIDDLE, tick.text());
         }
         for (Ticks.Tick tick : yTicks.labelled()) {
-            label(frame.left() - 7, frame.py(tick.value()) + 4.5, "end", tick.text());
+            canvas.label(frame.left() - 7, frame.py(tick.value()) + BASELINE, Canvas.Anchor.END, tick.text());
         }
         String x = TextWidth.fit(xTicks.unit().quotient(plot.x().label()), frame.width());
-        label(frame.left() + frame.width() / 2, frame.bottom() + 17 + LABEL_ROW, "middle", x);
+        canvas.label(frame.left() + frame.width() / 2, frame.bottom() + 17 + LABEL_ROW, Canvas.Anchor.MIDDLE, x);
         String y = TextWidth.fit(yTicks.unit().quotient(plot.y().label()), WIDTH - 2 * EDGE);
-        label(EDGE, EDGE + 11, "start", y);
+        canvas.label(EDGE, EDGE + 11, Canvas.Anchor.START, y);
     }
 
-    private void drawMarks() {
-        for (Plot.Mark mark : marks) {
-            boolean upright = mark.side() == Plot.Side.X;
-            String line = upright ? vertical(mark.at()) : horizontal(mark.at());
-            path(
-                    markClass(mark),
-                    line,
-                    "stroke",
-                    markColour(mark),
-                    "stroke-width",
-                    "1.5",
-                    "stroke-dasharray",
-                    dash(mark));
-        }
-    }
-
-    private void drawMarkLabels() {
+    private void drawMarkLabels(Canvas canvas) {
         StringBuilder leaders = new StringBuilder();
         for (MarkLabels.Flag flag : flags) {
             double y = frame.top() - flag.row() * MarkLabels.ROW - 5;
             leaders.append(Px.at('M', flag.at(), frame.top())).append("V").append(Px.text(y - 9));
-            label(flag.leftwards() ? flag.to() : flag.from(), y, flag.leftwards() ? "end" : "start", flag.text());
+            if (flag.leftwards()) {
+                canvas.label(flag.to(), y, Canvas.Anchor.END, flag.text());
+            } else {
+                canvas.label(flag.from(), y, Canvas.Anchor.START, flag.text());
+            }
         }
-        List<Plot.Mark> beside =
-                marks.stream().filter(mark -> mark.side() == Plot.Side.Y).toList();
+        List<Plot.Mark> beside = marks(Plot.Side.Y).toList();
         double[] lines =
                 beside.stream().mapToDouble(mark -> frame.py(mark.at())).toArray();
         double[] texts = MarkLabels.beside(lines, frame.top(), frame.bottom());
         for (int i = 0; i < lines.length; i++) {
             leaders.append(Px.at('M', frame.right(), lines[i])).append(Px.at('L', frame.right() + 10, texts[i]));
             String text = TextWidth.fit(markText(beside.get(i)), WIDTH - frame.right() - 14);
-            label(frame.right() + 13, texts[i] + 4.5, "start", text);
+            canvas.label(frame.right() + 13, texts[i] + BASELINE, Canvas.Anchor.START, text);
         }
-        path("leader", leaders, "stroke", "#4c5753");
+        canvas.line(Pen.LEADER, leaders);
     }
 
-    private void drawCurve(Plot.Style style, CurvePath curve, Look look) {
-        boolean points = style == Plot.Style.POINTS;
-        if (!curve.path().isEmpty()) {
-            path(
-                    "curve curve-" + look.number(),
-                    curve.path(),
-                    "stroke",
-                    look.colour(),
-                    "stroke-width",
-                    points ? "1.5" : "2",
-                    "stroke-linecap",
-                    "round",
-                    "stroke-linejoin",
-                    "round",
-                    "stroke-dasharray",
-                    points || look.dash().isEmpty() ? "none" : look.dash());
-        }
-        if (!curve.arrows().isEmpty()) {
-            shape("path", "arrow arrow-" + look.number(), "d", curve.arrows(), "fill", look.colour());
-        }
-    }
-
-    private void drawKey(Key.Entry entry, double top) {
+    private static void drawKey(Canvas canvas, Key.Entry entry, double top) {
         double y = top + entry.row() * LABEL_ROW + 10;
-        boolean points = entry.style() == Plot.Style.POINTS;
-        String swatch =
-                points ? Px.at('M', entry.left() + 12, y) + entry.look().marker() : Px.at('M', entry.left(), y) + "h26";
-        drawCurve(entry.style(), CurvePath.of(swatch), entry.look());
-        label(entry.left() + KEY_SWATCH, y + 4.5, "start", entry.text());
+        String swatch = entry.style() == Plot.Style.POINTS
+                ? Px.at('M', entry.left() + 12, y) + entry.look().marker()
+                : Px.at('M', entry.left(), y) + "h26";
+        canvas.line(Pen.of(entry.look(), entry.style()), swatch);
+        canvas.label(entry.left() + KEY_SWATCH, y + BASELINE, Canvas.Anchor.START, entry.text());
     }
 
     private String vertical(double value) {
@@ -240,50 +169,8 @@ public final class PlotDrawing {
         return Px.at('M', frame.left(), frame.py(value)) + "H" + Px.text(frame.right());
     }
 
-    private void label(double x, double y, String anchor, String text) {
-        svg.leaf(
-                        "text",
-                        text,
-                        "x",
-                        Px.text(x),
-                        "y",
-                        Px.text(y),
-                        "text-anchor",
-                        anchor,
-                        "class",
-                        "label",
-                        "fill",
-                        "#26302c")
-                .line();
-    }
-
-    private void path(String cssClass, CharSequence data, String... attributes) {
-        if (data.length() == 0) {
-            return;
-        }
-        String[] all = Arrays.copyOf(new String[] {"d", data.toString(), "fill", "none"}, 4 + attributes.length);
-        System.arraycopy(attributes, 0, all, 4, attributes.length);
-        shape("path", cssClass, all);
-    }
-
-    private void shape(String element, String cssClass, String... attributes) {
-        String[] all = Arrays.copyOf(new String[] {"class", cssClass}, 2 + attributes.length);
-        System.arraycopy(attributes, 0, all, 2, attributes.length);
-        svg.shape(element, all).line();
-    }
-
-    private AxisRange range(Plot.Axis axis, Plot.Side side) {
-        DoubleStream points = plot.curves().stream()
-                .flatMapToDouble(curve -> Arrays.stream(side == Plot.Side.X ? curve.x() : curve.y()));
-        DoubleStream lines =
-                plot.marks().stream().filter(mark -> mark.side() == side).mapToDouble(Plot.Mark::at);
-        boolean onEdge =
-                side == Plot.Side.X && plot.curves().stream().noneMatch(curve -> curve.style() == Plot.Style.POINTS);
-        return AxisRange.around(DoubleStream.concat(points, lines), axis.scale(), onEdge ? 0 : 0.05);
-    }
-
-    private Plot.Axis axis(Plot.Mark mark) {
-        return mark.side() == Plot.Side.X ? plot.x() : plot.y();
+    private Stream<Plot.Mark> marks(Plot.Side side) {
+        return marks.stream().filter(mark -> mark.side() == side);
     }
 
     private String markText(Plot.Mark mark) {
@@ -292,31 +179,7 @@ public final class PlotDrawing {
         return mark.label().isEmpty() ? value : mark.label() + " " + value;
     }
 
-    private static String markClass(Plot.Mark mark) {
-        return switch (mark.role()) {
-            case LIMIT -> "mark mark-limit";
-            case TRIP_POINT -> "mark mark-trip";
-            case REFERENCE -> "mark mark-reference";
-        };
-    }
-
-    private static String markColour(Plot.Mark mark) {
-        return switch (mark.role()) {
-            case LIMIT -> "#a1262f";
-            case TRIP_POINT -> "#26302c";
-            case REFERENCE -> "#66706c";
-        };
-    }
-
-    private static String dash(Plot.Mark mark) {
-        return switch (mark.role()) {
-            case LIMIT -> "12 3";
-            case TRIP_POINT -> "5 3";
-            case REFERENCE -> "1.5 3";
-        };
-    }
-
-    private static double widest(List<String> texts) {
-        return texts.stream().mapToDouble(TextWidth::of).max().orElse(0);
+    private static double widest(Stream<String> texts) {
+        return texts.mapToDouble(TextWidth::of).max().orElse(0);
     }
 }

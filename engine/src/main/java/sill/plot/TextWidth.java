@@ -1,5 +1,7 @@
 package sill.plot;
 
+import sill.markup.VisibleText;
+
 /**
  * How wide a text will be, about. A drawing must not depend on the fonts of the machine that makes it, so widths are those
  * of a common sans-serif face, rounded up.
@@ -14,8 +16,9 @@ final class TextWidth {
         return text.codePoints().mapToDouble(TextWidth::share).sum() * FONT_SIZE;
     }
 
-    /** The text, or as much of its start as fits, with an ellipsis. */
-    static String fit(String text, double width) {
+    /** The text as it will be seen, or as much of its start as fits, with an ellipsis. */
+    static String fit(String raw, double width) {
+        String text = VisibleText.of(raw).replace('\n', ' ');
         if (of(text) <= width) {
             return text;
         }
@@ -42,6 +45,6 @@ final class TextWidth {
         if (code == 'm' || code == 'w' || code == 'M' || code == 'W' || code == '…') {
             return 0.9;
         }
-        return code >= 'A' && code <= 'Z' || code == 'Ω' ? 0.7 : 0.58;
+        return code >= 'A' && code <= 'Z' || code == 'Ω' ? 0.7 : 0.64;
     }
 }

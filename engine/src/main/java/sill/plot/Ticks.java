@@ -20,6 +20,8 @@ record Ticks(AxisUnit unit, List<Tick> labelled, List<Double> between) {
     /** Below this a logarithmic axis is divided like a linear one: it holds too few of 1, 2 and 5. */
     private static final double FEW_DECADES = 0.8;
 
+    private static final double END = 1e-9;
+
     /** A mark with its number. */
     record Tick(double value, String text) {}
 
@@ -31,11 +33,26 @@ record Ticks(AxisUnit unit, List<Tick> labelled, List<Double> between) {
         return linear(range, AxisUnit.forLargest(unit, range.largest()), wanted);
     }
 
+    /** The marks of a horizontal axis: as many as have room for their numbers. */
+    static Ticks within(AxisRange range, String unit, double width) {
+        for (int wanted = 7; ; wanted--) {
+            Ticks ticks = along(range, unit, wanted);
+            double space = TextWidth.of("00");
+            double needed = ticks.labelled().stream()
+                    .mapToDouble(tick -> TextWidth.of(tick.text()) + space)
+                    .sum();
+            if (needed <= width || wanted == 1) {
+                return ticks;
+            }
+        }
+    }
+
     private static Ticks linear(AxisRange range, AxisUnit unit, int wanted) {
         double rough = (range.high() - range.low()) / wanted;
         int exponent = AxisUnit.decimalExponent(rough);
         double lead = new BigDecimal(rough).scaleByPowerOfTen(-exponent).doubleValue();
-        int first = lead <= 1 ? 1 : lead <= 2 ? 2 : lead <= 5 ? 5 : 10;
+        // The nearest of 1, 2, 5 and 10 by ratio: the limits are the geometric means.
+        int first = lead < 1.414 ? 1 : lead < 3.162 ? 2 : lead < 7.071 ? 5 : 10;
         BigDecimal step = BigDecimal.valueOf(first).scaleByPowerOfTen(exponent);
         int parts = first == 2 ? 4 : 5;
         int decimals = Math.max(0, unit.exponent() - exponent - (first == 10 ? 1 : 0));
@@ -43,10 +60,16 @@ record Ticks(AxisUnit unit, List<Tick> labelled, List<Double> between) {
 
         List<Tick> labelled = new ArrayList<>();
         List<Double> between = new ArrayList<>();
-        BigDecimal low = new BigDecimal(range.low());
-        BigDecimal high = new BigDecimal(range.high());
-        BigDecimal count = low.divide(fine, 0, RoundingMode.CEILING);
-        for (BigDecimal value = count.multiply(fine); value.compareTo(high) <= 0; value = value.add(fine)) {
+        BigDecimal count = new BigDecimal(range.low()).divide(fine, 0, RoundingMode.FLOOR);
+        for (BigDecimal value = count.multiply(fine); ; value = value.add(fine)) {
+            // An end that is a round number but for its last bit still gets its mark.
+            double place = range.fraction(value.doubleValue());
+            if (place < -END) {
+                continue;
+            }
+            if (place > 1 + END) {
+                break;
+            }
             if (value.remainder(step).signum() == 0) {
                 labelled.add(new Tick(value.doubleValue(), unit.number(value, decimals)));
             } else {
@@ -65,7 +88,7 @@ record Ticks(AxisUnit unit, List<Tick> labelled, List<Double> between) {
         List<Tick> labelled = new ArrayList<>();
         List<Double> between = new ArrayList<>();
         int last = AxisUnit.decimalExponent(range.high());
-        for (int exponent = AxisUnit.decimalExponent(range.low()); exponent <= last; exponent++) {
+        for (int exponent = AxisUnit.decimalExponent(range.low()); exponent <= last + 1; exponent++) {
             for (int digit = 1; digit <= 9; digit++) {
                 BigDecimal exact = BigDecimal.valueOf(digit).scaleByPowerOfTen(exponent);
                 double value = exact.doubleValue();

@@ -13,6 +13,9 @@ import sill.values.Datum;
 
 /** A calculation cell: its results as lines <i>name = formula = value</i>, and its plots. */
 final class Calculations {
+    /** A table up to this many rows is shown without asking. */
+    private static final int SHORT_TABLE = 12;
+
     private Calculations() {}
 
     static void write(Markup page, int cell, CellContent content) {
@@ -63,7 +66,10 @@ final class Calculations {
     private static void result(Markup page, ValueEntry value, String shown) {
         boolean components = value.value() instanceof Datum.Fields
                 && !value.shownComponents().isEmpty();
-        page.open("details", "class", "result");
+        boolean shortTable = Values.isTable(value.value()) && Values.rows(value.value()) <= SHORT_TABLE;
+        page.open(
+                "details",
+                shortTable ? new String[] {"class", "result", "open", ""} : new String[] {"class", "result"});
         page.open("summary");
         if (components) {
             page.open("span", "class", "components");

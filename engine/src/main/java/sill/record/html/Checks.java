@@ -45,11 +45,11 @@ final class Checks {
         page.open("th", "scope", "row", "class", "at");
         Addresses.write(page, check.at(), place == Place.IN_CELL);
         page.close();
-        page.open("td", "data-label", "Requirement").leaf("code", check.text());
+        page.open("td", "data-label", "Requirement").leaf("code", check.text()).text(" ");
         page.leaf("span", basis(check), "class", "basis").close();
         Tables.cell(page, "Value", "number", check.shownValue());
         Tables.cell(page, "Limit", "number", check.shownLimit());
-        Tables.cell(page, "Margin", "number", margin(check));
+        margin(page, check);
         page.open("td", "data-label", "Verdict");
         page.open("span", "class", "verdict");
         page.leaf("span", sign(check.verdict()), "class", "sign", "aria-hidden", "true");
@@ -71,11 +71,13 @@ final class Checks {
         };
     }
 
-    private static String margin(CheckEntry check) {
-        if (check.marginShare().isEmpty() || check.shownMargin().isEmpty()) {
-            return check.shownMargin();
+    private static void margin(Markup page, CheckEntry check) {
+        page.open("td", "class", "number" + Tables.length(check.shownMargin()), "data-label", "Margin");
+        page.leaf("span", check.shownMargin());
+        if (check.marginShare().isPresent() && !check.shownMargin().isEmpty()) {
+            page.text(" ").leaf("span", Numbers.percent(check.marginShare().get()), "class", "share");
         }
-        return check.shownMargin() + " (" + Numbers.percent(check.marginShare().get()) + ")";
+        page.close();
     }
 
     private static String sign(Verdict verdict) {

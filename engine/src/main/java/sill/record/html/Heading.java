@@ -69,13 +69,13 @@ final class Heading {
         StringBuilder text = new StringBuilder();
         if (checks == 0) {
             text.append("The worksheet states no checks");
+        } else if (checks == 1) {
+            text.append("The one check ").append(failing > 0 ? "fails" : open > 0 ? "is not judged" : "holds");
         } else if (failing == 0 && open == 0) {
-            text.append(checks == 1 ? "The one check holds" : "All " + checks + " checks hold");
+            text.append("All ").append(checks).append(" checks hold");
         } else {
-            text.append(count(record, Verdict.HOLDS))
-                    .append(" of ")
-                    .append(counted(checks, "check"))
-                    .append(" hold");
+            long holding = count(record, Verdict.HOLDS);
+            text.append(holding).append(" of ").append(checks).append(holding == 1 ? " checks holds" : " checks hold");
             text.append(failing > 0 ? ", " + failing + (failing == 1 ? " fails" : " fail") : "");
             text.append(open > 0 ? ", " + open + (open == 1 ? " is" : " are") + " not judged" : "");
         }

@@ -3,6 +3,7 @@ package sill.record.html;
 import java.net.URI;
 import java.net.URISyntaxException;
 import java.util.Locale;
+import java.util.Optional;
 import java.util.Set;
 import org.commonmark.node.AbstractVisitor;
 import org.commonmark.node.Heading;
@@ -28,16 +29,58 @@ final class Notes {
     /** The cell's own heading is at level 3. */
     private static final int CELL_LEVEL = 3;
 
+    /** Deeper trees, which nobody writes by hand, are shown as typed: rendering them would exhaust the stack. */
+    private static final int DEEPEST = 100;
+
     private Notes() {}
 
     static void write(Markup page, String commonMark) {
-        Node note = PARSER.parse(VisibleText.of(commonMark));
-        note.accept(new Fitting());
-        page.open("div", "class", "prose")
-                .line()
-                .trusted(RENDERER.render(note))
-                .close()
-                .line();
+        Optional<String> html = html(VisibleText.of(commonMark));
+        if (html.isPresent()) {
+            page.open("div", "class", "prose")
+                    .line()
+                    .trusted(html.get())
+                    .close()
+                    .line();
+        } else {
+            page.leaf("pre", commonMark, "class", "prose").line();
+        }
+    }
+
+    /** The note as HTML; nothing when it is nested too deep. */
+    private static Optional<String> html(String commonMark) {
+        try {
+            Node note = PARSER.parse(commonMark);
+            if (depth(note) > DEEPEST) {
+                return Optional.empty();
+            }
+            note.accept(new Fitting());
+            return Optional.of(RENDERER.render(note));
+        } catch (StackOverflowError e) {
+            // The parser recurses and has no limit of its own; whatever overflows it lies far beyond ours.
+            return Optional.empty();
+        }
+    }
+
+    /** How deep the tree is; the walk itself needs no stack. */
+    private static int depth(Node root) {
+        int depth = 0;
+        int deepest = 0;
+        Node at = root;
+        while (at != null) {
+            if (at.getFirstChild() != null) {
+                at = at.getFirstChild();
+                depth++;
+                deepest = Math.max(deepest, depth);
+                continue;
+            }
+            while (at != root && at != null && at.getNext() == null) {
+                at = at.getParent();
+                depth--;
+            }
+            at = at == root || at == null ? null : at.getNext();
+        }
+        return deepest;
     }
 
     /** Makes a note's tree fit into the page. */

@@ -16,17 +16,19 @@ final class Numbers {
         if (!Double.isFinite(value)) {
             return full(value);
         }
-        BigDecimal rounded = new BigDecimal(value).round(FOUR_DIGITS);
-        if (rounded.signum() == 0) {
+        return plain(new BigDecimal(value).round(FOUR_DIGITS), 6);
+    }
+
+    private static String plain(BigDecimal number, int largestExponent) {
+        if (number.signum() == 0) {
             return "0";
         }
-        int exponent = rounded.precision() - rounded.scale() - 1;
-        if (exponent >= -4 && exponent <= 6) {
-            return minus(rounded.stripTrailingZeros().toPlainString());
+        BigDecimal digits = number.stripTrailingZeros();
+        int exponent = digits.precision() - digits.scale() - 1;
+        if (exponent >= -4 && exponent <= largestExponent) {
+            return minus(digits.toPlainString());
         }
-        String mantissa =
-                rounded.scaleByPowerOfTen(-exponent).stripTrailingZeros().toPlainString();
-        return minus(mantissa + " × 10") + superscript(exponent);
+        return minus(digits.scaleByPowerOfTen(-exponent).toPlainString()) + "\u00A0×\u00A010" + superscript(exponent);
     }
 
     /** As many digits as it takes to read the same {@code double} back, the same on every Java. */
@@ -38,7 +40,7 @@ final class Numbers {
             return value > 0 ? "∞" : "−∞";
         }
         // Java before 19 prints some doubles with a digit too many; Jackson's writer is its own.
-        return minus(NumberOutput.toString(value, true));
+        return plain(new BigDecimal(NumberOutput.toString(value, true)), 15);
     }
 
     /** A share as a percentage with a sign, to one decimal. */

@@ -38,7 +38,7 @@ final class Style {
         String line = (number + (revision.isEmpty() ? "" : "  rev. " + revision)).strip();
         String title = titleBlock.getOrDefault("title", "");
         String text = line.isEmpty() ? title : line + " · " + title;
-        return "@page { @bottom-left { content: " + quoted(text) + "; } }\n";
+        return "@page { @bottom-left { font: inherit; content: " + quoted(text) + "; } }\n";
     }
 
     /** A CSS string; everything but plain letters, digits and blanks is written by its code. */

@@ -6,6 +6,9 @@ import sill.markup.Markup;
 final class Tables {
     private Tables() {}
 
+    /** A text up to this length stays on one line, so that a number is not parted from its unit. */
+    private static final int SHORT = 26;
+
     /** The head row. */
     static void head(Markup page, String... columns) {
         page.open("thead").open("tr");
@@ -17,7 +20,12 @@ final class Tables {
 
     /** A cell that knows its column's name, which a narrow screen shows beside it; one without text is marked empty. */
     static void cell(Markup page, String column, String cssClass, String text) {
-        page.leaf("td", text, "class", text.isEmpty() ? cssClass + " empty" : cssClass, "data-label", column);
+        page.leaf("td", text, "class", cssClass + length(text), "data-label", column);
+    }
+
+    /** The class by which the style sheet keeps a short text on one line and drops an empty cell; with a space before it. */
+    static String length(String text) {
+        return text.isEmpty() ? " empty" : text.length() <= SHORT ? " short" : "";
     }
 
     /** Opens a box that scrolls sideways when its content is wider than the page; also by keyboard. */

@@ -28,11 +28,14 @@ final class Values {
         if (value instanceof Datum.Real real) {
             return Numbers.brief(real.value());
         }
-        if (value instanceof Datum.Items items) {
+        if (value instanceof Datum.Items items && !isTable(value)) {
             String first =
                     items.items().stream().limit(SHORT_LIST).map(Values::brief).collect(Collectors.joining(", "));
             int more = items.size() - Math.min(SHORT_LIST, items.items().size());
             return more > 0 ? "[" + first + ", … " + more + " more]" : "[" + first + "]";
+        }
+        if (isTable(value)) {
+            return Heading.counted(rows(value), "row");
         }
         if (value instanceof Datum.Fields fields) {
             return fields.fields().entrySet().stream()
@@ -93,7 +96,7 @@ final class Values {
 
     private static void items(Markup page, Datum.Items items, String unit, Map<String, String> componentUnits) {
         List<Datum> kept = items.items();
-        if (kept.stream().allMatch(item -> item instanceof Datum.Fields)) {
+        if (isTable(items)) {
             Set<String> names = new LinkedHashSet<>();
             kept.forEach(item -> names.addAll(((Datum.Fields) item).fields().keySet()));
             tableHead(page, names, componentUnits);
@@ -143,6 +146,25 @@ final class Values {
             page.leaf("th", unit.isEmpty() || unit.equals("1") ? name : name + " / " + unit, "scope", "col");
         }
         page.close().close().open("tbody").line();
+    }
+
+    /** Whether a value is best read as a table: a list of records, or columns of equal standing. */
+    static boolean isTable(Datum value) {
+        return value instanceof Datum.Fields fields && isColumns(fields)
+                || value instanceof Datum.Items items
+                        && !items.items().isEmpty()
+                        && items.items().stream().allMatch(item -> item instanceof Datum.Fields);
+    }
+
+    /** How many rows a table has. */
+    static int rows(Datum table) {
+        return table instanceof Datum.Items items
+                ? items.size()
+                : ((Datum.Fields) table)
+                        .fields().values().stream()
+                                .mapToInt(column -> ((Datum.Items) column).size())
+                                .max()
+                                .orElse(0);
     }
 
     private static boolean isColumns(Datum.Fields fields) {

@@ -597,7 +597,7 @@ final class SampleRecord {
                 new Plot.Axis(HOSTILE, HOSTILE, Plot.Scale.LOGARITHMIC),
                 new Plot.Axis(HOSTILE, HOSTILE, Plot.Scale.LINEAR),
                 List.of(new Plot.Curve(
-                        HOSTILE, Plot.Style.LINE, false, new double[] {0, 1, 100}, new double[] {1, 2, 3})),
+                        HOSTILE, Plot.Style.LINE, false, new double[] {1, 10, 100}, new double[] {1, 2, 3})),
                 List.of(new Plot.Mark(Plot.Side.Y, 2, HOSTILE, Plot.Role.LIMIT)));
         plots.add(new PlotEntry(calc + ".2", HOSTILE, plot));
         int check = cell("check", HOSTILE, CellState.DONE, "", HOSTILE);

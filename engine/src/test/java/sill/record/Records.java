@@ -1,0 +1,126 @@
+package sill.record;
+
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import sill.stdlib.Plot;
+import sill.values.CellState;
+import sill.values.Datum;
+import sill.worksheet.Problem;
+
+/** Small records for tests; the circuits in them are invented. */
+public final class Records {
+    private Records() {}
+
+    /** A record of one calculation cell with these values. */
+    public static DesignRecord ofValues(DesignRecord.ValueEntry... values) {
+        return record("double a = 1;", List.of(), List.of(values), List.of(), List.of());
+    }
+
+    /** A record of one check cell with these checks. */
+    public static DesignRecord ofChecks(DesignRecord.CheckEntry... checks) {
+        return record("", List.of(), List.of(), List.of(checks), List.of());
+    }
+
+    /** A record of one calculation cell with these problems. */
+    public static DesignRecord ofProblems(String source, Problem... problems) {
+        return record(source, List.of(), List.of(), List.of(), List.of(problems));
+    }
+
+    /** A record with one of everything. */
+    public static DesignRecord ofEverything() {
+        return record(
+                "double v = 2;",
+                List.of(given()),
+                List.of(value("v", new Datum.Real(2), "2.000 V")),
+                List.of(check(DesignRecord.Verdict.HOLDS)),
+                List.of(Problem.warning(5, 1, 1, "unused", "")));
+    }
+
+    private static DesignRecord record(
+            String source,
+            List<DesignRecord.GivenEntry> givens,
+            List<DesignRecord.ValueEntry> values,
+            List<DesignRecord.CheckEntry> checks,
+            List<Problem> problems) {
+        return new DesignRecord(
+                DesignRecord.Outcome.HOLDS,
+                Map.of("title", "Door heater"),
+                new DesignRecord.Made("0.1.0", "17.0.15", "2026-01-02T03:04:05Z"),
+                Map.of(),
+                new DesignRecord.Source(
+                        "door.sill", "00ff", "sill 1\ntitle: Door heater\n\n:: calc A\n" + source + "\n"),
+                List.of(new DesignRecord.DataFile("a.csv", "ff00", new byte[] {0, 1, -1})),
+                List.of(new DesignRecord.CellEntry(1, "calc", "A", 4, CellState.DONE, "", "", source)),
+                givens,
+                values,
+                checks,
+                List.of(new DesignRecord.PlotEntry("1.9", "Ramp", plot())),
+                problems);
+    }
+
+    static DesignRecord.GivenEntry given() {
+        return new DesignRecord.GivenEntry(
+                "vIn",
+                new Datum.Real(24),
+                "V",
+                "24 V",
+                Optional.of(22.8),
+                Optional.of(25.2),
+                "22.8 V .. 25.2 V",
+                "uniform",
+                "supply",
+                "1.1",
+                5);
+    }
+
+    /** A value in cell 1 at address 1.1. */
+    public static DesignRecord.ValueEntry value(String name, Datum value, String shown) {
+        return new DesignRecord.ValueEntry(
+                name,
+                "vIn / 12",
+                "double",
+                value,
+                "V",
+                Map.of(),
+                shown,
+                "",
+                Map.of(),
+                "half",
+                "1.1",
+                5,
+                List.of("vIn"),
+                List.of("vIn"));
+    }
+
+    /** A check at address 1.1. */
+    public static DesignRecord.CheckEntry check(DesignRecord.Verdict verdict) {
+        return new DesignRecord.CheckEntry(
+                "v at most 3 V",
+                "nominal",
+                Optional.of(new Datum.Real(2)),
+                "V",
+                Optional.empty(),
+                Optional.of(3.0),
+                Optional.of(1.0),
+                Optional.of(1.0 / 3),
+                "2.000 V",
+                "≤ 3 V",
+                "+1.000 V",
+                verdict,
+                verdict == DesignRecord.Verdict.NOT_JUDGED ? "no tolerance runs" : "",
+                "REQ-01",
+                "1.1",
+                5);
+    }
+
+    static Plot plot() {
+        return new Plot(
+                "Ramp",
+                "A ramp.",
+                new Plot.Axis("time", "s", Plot.Scale.LINEAR),
+                new Plot.Axis("voltage", "V", Plot.Scale.LINEAR),
+                List.of(new Plot.Curve("ramp", Plot.Style.LINE, false, new double[] {0, 1}, new double[] {0, 2})),
+                List.of());
+    }
+}

@@ -1,0 +1,233 @@
+package sill.record.html;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.stream.IntStream;
+import org.jsoup.Jsoup;
+import org.jsoup.nodes.Document;
+import org.jsoup.nodes.Element;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
+import sill.record.DesignRecord;
+import sill.record.DesignRecord.Verdict;
+import sill.record.RecordJson;
+import sill.record.Records;
+import sill.values.CellState;
+import sill.values.Datum;
+import sill.worksheet.Problem;
+
+/** What stands on the page; how it looks and reads is tested in a browser, in the module tests. */
+class RecordPageTest {
+    private static Document page(DesignRecord record) {
+        return Jsoup.parse(RecordPage.write(record));
+    }
+
+    @Test
+    void theJsonInsideIsTheRecord() {
+        DesignRecord record = Records.ofValues(Records.value("v", new Datum.Text("</script> & <!-- \u2028"), ""));
+        Element script = page(record).getElementById(RecordPage.JSON_ELEMENT);
+        assertThat(script.attr("type")).isEqualTo("application/json");
+        String inside = script.data();
+        assertThat(inside).doesNotContain("<", ">", "&", "\u2028");
+        assertThat(inside.replace("\\u003c", "<")
+                        .replace("\\u003e", ">")
+                        .replace("\\u0026", "&")
+                        .replace("\\u2028", "\u2028"))
+                .isEqualTo(RecordJson.write(record));
+    }
+
+    @Test
+    void nothingIsFetchedAndNoScriptRuns() {
+        Document page = page(Records.ofEverything());
+        String policy =
+                page.selectFirst("meta[http-equiv=Content-Security-Policy]").attr("content");
+        String style = page.selectFirst("style").data();
+        assertThat(policy)
+                .isEqualTo("default-src 'none'; style-src '" + Style.digest(style)
+                        + "'; img-src data:; base-uri 'none'; form-action 'none'");
+        assertThat(page.select("script")).hasSize(1);
+        assertThat(page.select("[style], link, img, iframe")).isEmpty();
+        assertThat(style).doesNotContain("url(", "@import");
+    }
+
+    /** Computed with: printf 'a{}' | openssl dgst -sha256 -binary | base64. */
+    @Test
+    void theStylesDigest() {
+        assertThat(Style.digest("a{}")).isEqualTo("sha256-X1RutGBrXCt9KkSaXMK7tHftWiRscFHOhxsS8tv8hBk=");
+    }
+
+    @Test
+    void aTitleCannotLeaveTheStyleSheet() {
+        assertThat(Style.quoted("a</style>\"\\")).isEqualTo("\"a\\3c \\2f style\\3e \\22 \\5c \"");
+    }
+
+    @Test
+    void checksComeFirst() {
+        Document page = page(Records.ofChecks(Records.check(Verdict.FAILS)));
+        assertThat(page.select("h2").eachText()).startsWith("Checks", "Working");
+        Element row = page.selectFirst("section.checks tbody tr");
+        assertThat(row.select("th, td").eachText())
+                .containsExactly(
+                        "1.1",
+                        "v at most 3 V at the nominal values",
+                        "2.000 V",
+                        "≤ 3 V",
+                        "+1.000 V +33.3 %",
+                        "✗ fails",
+                        "REQ-01");
+    }
+
+    @Test
+    void aCheckThatWasNotJudgedSaysWhy() {
+        Document page = page(Records.ofChecks(Records.check(Verdict.NOT_JUDGED)));
+        assertThat(page.selectFirst("section.checks td[data-label=Verdict]").text())
+                .isEqualTo("? not judged no tolerance runs");
+    }
+
+    @Test
+    void aResultReadsAsAnEquation() {
+        Document page = page(Records.ofValues(Records.value("v", new Datum.Real(2.00000001), "2.000 V")));
+        assertThat(page.selectFirst(".equation").ownText()).isEqualTo("= =");
+        assertThat(page.selectFirst(".equation > var").text()).isEqualTo("v");
+        assertThat(page.selectFirst(".equation > code").text()).isEqualTo("vIn / 12");
+        assertThat(page.selectFirst(".equation summary").text()).isEqualTo("2.000 V");
+        assertThat(page.selectFirst(".full").text())
+                .isEqualTo("2.00000001 V Type double, rests on vIn, worksheet line 5.");
+        assertThat(page.getElementById("at-1.1").text()).isEqualTo("1.1");
+    }
+
+    @Test
+    void aLongListIsFoldedAndComplete() {
+        List<Datum> items = IntStream.range(0, 50)
+                .<Datum>mapToObj(i -> new Datum.Real(i / 8.0))
+                .toList();
+        Document page = page(Records.ofValues(Records.value("v", new Datum.Items(items, 900), "")));
+        assertThat(page.selectFirst("summary").text()).isEqualTo("[0, 0.125, 0.25, 0.375, 0.5, 0.625, … 894 more] V");
+        assertThat(page.select(".full li")).hasSize(50);
+        assertThat(page.select(".full li").last().text()).isEqualTo("6.125 V");
+        assertThat(page.select(".full").text()).contains("The record keeps the first 50 of 900.");
+    }
+
+    @Test
+    void columnsAreATable() {
+        Map<String, Datum> columns = new LinkedHashMap<>();
+        columns.put("r", new Datum.Items(List.of(new Datum.Real(8200), new Datum.Real(1e-9)), 2));
+        columns.put("name", new Datum.Items(List.of(new Datum.Text("E24"), new Datum.Text("<b>")), 2));
+        Document page = page(Records.ofValues(Records.value("v", new Datum.Fields(columns), "")));
+        assertThat(page.selectFirst("summary").text()).isEqualTo("2 rows");
+        assertThat(page.select(".full tr").eachText()).containsExactly("index r name", "0 8200 E24", "1 1 × 10⁻⁹ <b>");
+        assertThat(page.selectFirst("details.result").hasAttr("open")).isTrue();
+    }
+
+    @Test
+    void thePlotStandsInPlaceOfItsValue() {
+        Document page = page(Records.ofEverything());
+        assertThat(page.select("figure svg title").eachText()).containsExactly("Ramp");
+        assertThat(page.select("figure figcaption").eachText()).containsExactly("Ramp");
+        assertThat(page.getElementById("at-1.9").text()).isEqualTo("1.9");
+    }
+
+    @Test
+    void aProblemQuotesItsLineWithACaret() {
+        Document page = page(Records.ofProblems(
+                "\tdouble a = b\u202E;",
+                Problem.error(5, 13, 1, "cannot find b", "Did you mean vIn?"),
+                Problem.error(99, 1, 0, "elsewhere", "")));
+        assertThat(page.select(".problem-list p").eachText())
+                .containsExactly(
+                        "Error in line 5, column 13, cell 1: cannot find b.",
+                        "Did you mean vIn?",
+                        "Error in line 99, column 1: elsewhere.");
+        assertThat(page.selectFirst(".quote").wholeText()).isEqualTo("\tdouble a = b[U+202E];\n\t           ^");
+    }
+
+    @Test
+    void aLongLineIsQuotedInPart() {
+        Document page = page(Records.ofProblems("x".repeat(100_000), Problem.error(5, 50_000, 1, "long", "")));
+        assertThat(page.selectFirst(".quote").wholeText())
+                .isEqualTo("…" + "x".repeat(100) + "…\n" + " ".repeat(61) + "^");
+    }
+
+    @Test
+    void sourceIsFoldedWithTheWorksheetsLineNumbers() {
+        Document page = page(Records.ofValues());
+        Element source = page.selectFirst("details.source");
+        assertThat(source.hasAttr("open")).isFalse();
+        assertThat(source.selectFirst("summary").text()).isEqualTo("Java source");
+        assertThat(source.select(".row").eachAttr("data-line")).containsExactly("5");
+        assertThat(source.select(".row").eachText()).containsExactly("double a = 1;");
+    }
+
+    @Test
+    void theFootHasTitleBlockDigestsAndRerun() {
+        Document page = page(Records.ofEverything());
+        assertThat(page.select(".title-block dt").eachText()).containsExactly("Title");
+        assertThat(page.select(".digests tbody tr").eachText()).containsExactly("door.sill 00ff", "a.csv ff00");
+        assertThat(page.selectFirst(".rerun code").text()).isEqualTo("sill rerun door.html");
+        assertThat(page.selectFirst(".caution").text())
+                .isEqualTo(
+                        "Caution: the results are design aids. What switches mains voltage or protects people follows"
+                                + " local codes and the judgement of a licensed practitioner.");
+    }
+
+    @ParameterizedTest
+    @CsvSource({
+        "PROBLEM, Problem: it broke",
+        "NOT_RUN, Not run: it broke",
+        "STOPPED, Stopped: it broke",
+        "DONE, it broke"
+    })
+    void aCellThatDidNotEndSaysWhy(CellState state, String words) {
+        DesignRecord all = Records.ofEverything();
+        DesignRecord.CellEntry cell =
+                new DesignRecord.CellEntry(1, "tolerance", "A", 4, state, "it broke", "", "of: a");
+        DesignRecord record = new DesignRecord(
+                all.outcome(),
+                all.titleBlock(),
+                all.made(),
+                all.trial(),
+                all.worksheet(),
+                all.files(),
+                List.of(cell),
+                List.of(),
+                List.of(),
+                List.of(),
+                List.of(),
+                List.of());
+        Document page = page(record);
+        assertThat(page.selectFirst(".state").text()).isEqualTo(words);
+        assertThat(page.selectFirst("details.source").hasAttr("open")).isTrue();
+    }
+
+    @ParameterizedTest
+    @CsvSource({"de, de", "en-GB, en-GB", "pt_BR, pt-BR", "DE, de", "xx, en", "en-XX, en", "'', en", "\"><b>, en"})
+    void theLanguageIsOneThatExists(String typed, String tag) {
+        DesignRecord all = Records.ofEverything();
+        DesignRecord record = new DesignRecord(
+                all.outcome(),
+                Map.of("title", "T", "language", typed),
+                all.made(),
+                Map.of("vIn", "26 V"),
+                all.worksheet(),
+                all.files(),
+                all.cells(),
+                all.givens(),
+                all.values(),
+                all.checks(),
+                all.plots(),
+                all.problems());
+        Document page = page(record);
+        assertThat(page.selectFirst("html").attr("lang")).isEqualTo(tag);
+        assertThat(page.selectFirst(".trial").text())
+                .isEqualTo("Trial run, not for issue. In place of the worksheet's values: vIn = 26 V.");
+    }
+
+    @Test
+    void theSameRecordIsTheSamePage() {
+        assertThat(RecordPage.write(Records.ofEverything())).isEqualTo(RecordPage.write(Records.ofEverything()));
+    }
+}
