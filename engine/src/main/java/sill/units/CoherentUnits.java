@@ -101,6 +101,15 @@ final class CoherentUnits {
                 }
             }
         }
+        for (UnitExpression unit : units) {
+            UnitExpression root = unit.power(Rational.HALF);
+            if (root.dimension().equals(dimension)) {
+                return root;
+            }
+            if (one.over(root).dimension().equals(dimension)) {
+                return one.over(root);
+            }
+        }
         List<UnitExpression> pairs = new ArrayList<>();
         units.forEach(a -> units.forEach(b -> pairs.add(a.over(b))));
         units.forEach(a -> units.forEach(b -> pairs.add(a.times(b))));

@@ -46,17 +46,7 @@ public final class Notation {
             return shownIn(si, bare.toUnit());
         }
         BigDecimal number = bare.toUnit().exactFromSi(si).round(ROUNDED);
-        int magnitude = magnitude(number);
-        int highest = bare.top().get(0).unit().highestPrefix();
-        Prefix prefix = Prefix.NONE;
-        for (int exponent = -30; exponent <= highest; exponent += 3) {
-            if (exponent <= magnitude) {
-                prefix = Prefix.ofExponent(exponent).orElse(Prefix.NONE);
-            }
-        }
-        if (magnitude < -30) {
-            prefix = Prefix.NONE;
-        }
+        Prefix prefix = prefix(bare.top().get(0).unit(), magnitude(number));
         BigDecimal scaled = number.scaleByPowerOfTen(-prefix.exponent());
         return joined(rounded(scaled), bare.withPrefix(prefix).symbol());
     }
@@ -104,6 +94,15 @@ public final class Notation {
             // A unit somebody named otherwise is printed as it is.
             return Optional.empty();
         }
+    }
+
+    /** The prefix that leaves a number from 1 to below 1000; where none does, one that leaves a plain number, or none. */
+    private static Prefix prefix(NamedUnit unit, int magnitude) {
+        int wanted = Math.floorDiv(magnitude, 3) * 3;
+        int exponent = Math.min(wanted, unit.highestPrefix());
+        boolean plain = magnitude - exponent < DIGITS;
+        Prefix otherwise = unit.equals(NamedUnit.GRAM) && magnitude > 0 ? Prefix.KILO : Prefix.NONE;
+        return plain ? Prefix.ofExponent(exponent).orElse(otherwise) : otherwise;
     }
 
     private static BigDecimal shortest(double si, Unit unit) {

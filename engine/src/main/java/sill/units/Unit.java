@@ -30,6 +30,16 @@ public record Unit(String symbol, Dimension dimension, double factor, double off
         return UnitParser.parse(text).toUnit();
     }
 
+    /** Whether a text is a unit symbol. */
+    public static boolean isUnit(String text) {
+        try {
+            UnitParser.parse(text);
+            return true;
+        } catch (UnitException e) {
+            return false;
+        }
+    }
+
     /** The coherent SI unit of this dimension, such as {@code V} for {@code mV} and {@code K} for {@code °C}. */
     public Unit coherent() {
         return ofDimension(dimension);

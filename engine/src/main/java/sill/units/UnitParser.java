@@ -19,7 +19,7 @@ final class UnitParser {
     private static final int LONGEST = 100;
 
     /** No real exponent is larger. */
-    private static final int HIGHEST_EXPONENT = 12;
+    private static final int HIGHEST_EXPONENT = 99;
 
     private static final String A_UNIT = "a unit such as V, kΩ, µF or ppm/K";
     private static final String PRODUCT_SIGNS = "·*⋅∙•";

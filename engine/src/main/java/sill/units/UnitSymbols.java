@@ -30,9 +30,7 @@ final class UnitSymbols {
             Map.entry("amps", "A"),
             Map.entry("hertz", "Hz"),
             Map.entry("farad", "F"),
-            Map.entry("°K", "K"),
-            Map.entry("°F", "°C"),
-            Map.entry("degF", "°C"));
+            Map.entry("°K", "K"));
 
     private static final List<String> COMMON_PREFIXES = List.of("", "k", "m", "µ", "M", "n", "p", "G");
 
@@ -71,6 +69,9 @@ final class UnitSymbols {
     }
 
     private static String mend(String symbol) {
+        if (symbol.equals("°F") || symbol.equals("degF")) {
+            return "Convert the value to °C or K.";
+        }
         String instead = INSTEAD.get(symbol);
         if (instead != null) {
             return "Write " + Quoted.of(instead) + ".";

@@ -8,8 +8,8 @@ import java.util.Optional;
  * The known word that a misspelled one probably stands for.
  *
  * <p>Distance is counted in edits (Levenshtein's, with a swap of neighbours as one edit); a difference in case alone counts
- * as half an edit. A word is near when it takes at most a third of its letters, and at least one edit is allowed; one letter
- * is near only to itself in the other case.
+ * as half an edit. A word is near when it takes at most a third of its letters, and at least one edit is allowed; one or
+ * two letters are near only to themselves in another case, and any word is near to itself in another case.
  */
 public final class NearestWord {
     /** Nobody misspells a longer word; comparing one would only cost time. */
@@ -30,7 +30,8 @@ public final class NearestWord {
         int bestDistance = Integer.MAX_VALUE;
         for (String candidate : known) {
             int distance = halfEdits(word, candidate);
-            if (distance < bestDistance && distance <= allowed(word, candidate)) {
+            boolean near = distance <= allowed(word, candidate) || word.equalsIgnoreCase(candidate);
+            if (distance < bestDistance && near) {
                 best = candidate;
                 bestDistance = distance;
             }
@@ -46,7 +47,8 @@ public final class NearestWord {
     }
 
     private static int allowed(String word, String candidate) {
-        if (Math.min(word.length(), candidate.length()) == 1) {
+        int shorter = Math.min(word.length(), candidate.length());
+        if (shorter == 1 || shorter == 2 && word.length() == candidate.length()) {
             return 1;
         }
         return Math.max(2, 2 * (Math.max(word.length(), candidate.length()) / 3));

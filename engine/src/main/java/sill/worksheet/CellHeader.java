@@ -39,24 +39,34 @@ record CellHeader(Kind kind, String caption) {
         return new CellHeader(nearest, caption);
     }
 
-    /** Warns of a line of prose or Java that was probably meant to start a cell. */
-    static void warnIfIndented(SourceLine line, Kind cell, ProblemList problems) {
+    /**
+     * Reports a line that was probably meant to start a cell. Prose and Java may hold such a line for a reason; other cells may
+     * not.
+     *
+     * @return whether it was reported as an error
+     */
+    static boolean reportIndented(SourceLine line, Kind cell, ProblemList problems) {
         Cursor cursor = new Cursor(line.text());
         cursor.skipSpace();
         int indent = cursor.position();
-        // CommonMark: a line of code in a note.
+        // CommonMark, 4.4: a line of code in a note.
         boolean code = cell == Kind.NOTE && indent >= 4;
-        if (indent > 0 && !code && cursor.take("::") && Cursor.isSpace(cursor.peek())) {
-            cursor.skipSpace();
-            String word = cursor.word();
-            if (kind(word).isPresent()) {
-                problems.warning(
-                        line.number(),
-                        indent + 1,
-                        "Found ':: " + word + "' after a space, expected a cell to start in column 1",
-                        "Delete the space before '::' if a cell starts here.");
-            }
+        if (indent == 0 || code || !cursor.take("::") || !Cursor.isSpace(cursor.peek())) {
+            return false;
         }
+        cursor.skipSpace();
+        String word = cursor.word();
+        if (kind(word).isEmpty()) {
+            return false;
+        }
+        String message = "Found ':: " + word + "' after a space, expected a cell to start in column 1";
+        boolean warning = cell == Kind.NOTE || cell == Kind.CALC;
+        if (warning) {
+            problems.warning(line.number(), indent + 1, message, "Delete the space before it if a cell starts here.");
+        } else {
+            problems.error(line.number(), indent + 1, message, "Delete the space before it.");
+        }
+        return !warning;
     }
 
     private static Optional<Kind> kind(String word) {

@@ -34,18 +34,20 @@ final class CheckSplitter {
 
     private Split split() throws TextException {
         int atStart = NONE;
-        int operandEnd = NONE;
+        boolean afterOperand = false;
+        boolean blankSoFar = true;
         for (int at = 0; at < text.length(); at++) {
             char c = text.charAt(at);
             if (java.isOutside() && startsRequirement(at)) {
-                if (operandEnd != NONE) {
+                if (afterOperand) {
                     return new Split(at, remark(at));
                 }
-                atStart = atStart == NONE && new Cursor(text, 0, at).rest().isEmpty() ? at : atStart;
+                atStart = blankSoFar ? at : atStart;
             }
             java.step(c, at);
             if (!Cursor.isSpace(c)) {
-                operandEnd = java.isOutside() && endsOperand(c) ? at : NONE;
+                blankSoFar = false;
+                afterOperand = java.isOutside() && endsOperand(c);
             }
         }
         if (atStart != NONE) {
@@ -64,6 +66,9 @@ final class CheckSplitter {
     }
 
     private boolean startsRequirement(int at) {
+        if ("weha".indexOf(text.charAt(at)) < 0) {
+            return false;
+        }
         if (at > 0 && (Character.isJavaIdentifierPart(text.charAt(at - 1)) || text.charAt(at - 1) == '.')) {
             return false;
         }

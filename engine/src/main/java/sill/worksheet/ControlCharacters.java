@@ -20,7 +20,8 @@ final class ControlCharacters {
                 problems.error(
                         line.number(),
                         at + 1,
-                        "Found the control character " + Quoted.name(c) + ", expected text",
+                        "Found " + (Character.isSurrogate(c) ? "half a surrogate pair " : "the control character ")
+                                + Quoted.name(c) + ", expected text",
                         "Delete it; an editor may show it as a blank.");
                 return true;
             }

@@ -14,11 +14,15 @@ import sill.worksheet.ToleranceStudy.Target;
 
 /** What tolerance cells say of givens, and checks of tolerance cells. */
 final class CrossReferences {
+    /** Among more names a misspelled one is not sought, lest a large sheet take long. */
+    private static final int MOST_LIKELY = 500;
+
     private final ProblemList problems;
     private final Map<String, Given> givens = new HashMap<>();
     private final Set<String> wrong = new HashSet<>();
     private final Set<String> worstCases = new HashSet<>();
     private final Set<String> sampled = new HashSet<>();
+    private List<String> likely = List.of();
     private boolean studiesAreWhole = true;
 
     private CrossReferences(ProblemList problems) {
@@ -28,6 +32,8 @@ final class CrossReferences {
     static void check(List<Cell> cells, ProblemList problems) {
         CrossReferences references = new CrossReferences(problems);
         cells.forEach(references::collect);
+        references.likely =
+                references.givens.keySet().stream().sorted().limit(MOST_LIKELY).toList();
         for (Cell cell : cells) {
             problems.enterCell(cell.number());
             if (cell instanceof Cell.Tolerance tolerance) {
@@ -68,7 +74,7 @@ final class CrossReferences {
                         target.line(),
                         target.column(),
                         "Found " + Quoted.of(target.text()) + ", expected a given with limits to vary between",
-                        "Give it a tolerance on line " + given.line() + ".");
+                        given.value() instanceof Quantity ? "Give it a tolerance on line " + given.line() + "." : "");
             }
         }
         for (Target target : study.hold()) {
@@ -92,8 +98,7 @@ final class CrossReferences {
                     target.line(),
                     target.column(),
                     "Found " + Quoted.of(target.text()) + ", expected the name of a given",
-                    NearestWord.hint(
-                            target.text(), givens.keySet().stream().sorted().toList(), ""));
+                    NearestWord.hint(target.text(), likely, ""));
         }
         return given;
     }

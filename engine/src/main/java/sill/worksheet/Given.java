@@ -83,12 +83,12 @@ public record Given(String name, int line, int column, Value value, String remar
         record Relative(double fraction) implements Tolerance {
             @Override
             public double low(double nominal) {
-                return nominal - fraction * Math.abs(nominal);
+                return Decimals.sum(nominal, Decimals.product(-fraction, Math.abs(nominal)));
             }
 
             @Override
             public double high(double nominal) {
-                return nominal + fraction * Math.abs(nominal);
+                return Decimals.sum(nominal, Decimals.product(fraction, Math.abs(nominal)));
             }
         }
 
@@ -96,12 +96,12 @@ public record Given(String name, int line, int column, Value value, String remar
         record Absolute(double distance) implements Tolerance {
             @Override
             public double low(double nominal) {
-                return nominal - distance;
+                return Decimals.sum(nominal, -distance);
             }
 
             @Override
             public double high(double nominal) {
-                return nominal + distance;
+                return Decimals.sum(nominal, distance);
             }
         }
 

@@ -1,10 +1,13 @@
 package sill.worksheet;
 
+import java.util.Set;
 import javax.lang.model.SourceVersion;
 import sill.words.Quoted;
 
 /** Reads the name before {@code =}. */
 final class GivenName {
+    private static final Set<String> TYPES = Set.of("var", "String", "Table");
+
     private GivenName() {}
 
     /** Reads a name and the equals sign behind it. */
@@ -16,8 +19,7 @@ final class GivenName {
         }
         if (cursor.atEnd()) {
             cursor.moveTo(start);
-            String hint = cursor.startsWith("::") ? "A cell starts in column 1." : "";
-            throw TextException.expected("'name = value'", cursor, hint);
+            throw TextException.expected("'name = value'", cursor, "");
         }
         String name = cursor.between(start, cursor.position());
         if (!isName(name)) {
@@ -40,10 +42,19 @@ final class GivenName {
         if (SourceVersion.isKeyword(name, SourceVersion.RELEASE_17)) {
             return "The word belongs to Java; choose another, such as '" + name + "1'.";
         }
+        if (startsWithType(name)) {
+            return "A given has no type in front of its name.";
+        }
         String joined = joined(name);
         return isName(joined)
                 ? "A name is letters and digits in one word, such as " + Quoted.of(joined) + "."
                 : "A name is letters and digits in one word and starts with a letter.";
+    }
+
+    private static boolean startsWithType(String name) {
+        String word = new Cursor(name).word();
+        boolean type = SourceVersion.isKeyword(word, SourceVersion.RELEASE_17) || TYPES.contains(word);
+        return type && word.length() < name.length();
     }
 
     /** The words of a text in one, each after the first with a capital. */

@@ -1,10 +1,8 @@
 package sill.worksheet;
 
-import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
 import sill.units.Unit;
-import sill.words.Quoted;
 import sill.worksheet.Given.Distribution;
 import sill.worksheet.Given.Tolerance;
 import sill.worksheet.NumberReader.Numeral;
@@ -22,13 +20,16 @@ final class GivenValue {
             value = new Given.DataFile(FilePath.read(cursor));
         } else if (cursor.peek() == '[') {
             value = quantities(cursor);
+        } else if (!cursor.atEnd() && "'‘’“”„«»".indexOf(cursor.peek()) >= 0) {
+            throw TextException.expected("a text in double quotes", cursor, "Write '\"metal film\"'.");
         } else {
             return quantity(cursor);
         }
         cursor.skipSpace();
         if (!cursor.atEnd() && cursor.peek() != '|') {
-            throw TextException.expected(
-                    "'| remark' or the end of the line", cursor, "Only a single number has limits and a distribution.");
+            boolean limits = "±[~+".indexOf(cursor.peek()) >= 0;
+            String hint = limits ? "Only a single number has limits and a distribution." : "";
+            throw TextException.expected("'| remark' or the end of the line", cursor, hint);
         }
         return value;
     }
@@ -55,29 +56,28 @@ final class GivenValue {
             cursor.skipSpace();
         } while (cursor.take(","));
         if (!cursor.take("]")) {
-            throw unclosed(cursor, open, numbers.get(0));
+            throw unclosed(cursor, open);
         }
+        cursor.skipSpace();
+        int start = cursor.position();
         Unit unit = WrittenQuantity.readUnit(cursor);
         List<Double> values = new ArrayList<>(numbers.size());
         for (Numeral number : numbers) {
+            if (number.code().isPresent() && !unit.equals(Unit.ONE)) {
+                MarkingCodes.unit(number, unit.symbol(), start, false);
+            }
             values.add(WrittenQuantity.inSi(number.value(), unit, number));
         }
         return new Given.Quantities(values, unit);
     }
 
-    private static TextException unclosed(Cursor cursor, int open, Numeral first) {
+    private static TextException unclosed(Cursor cursor, int open) {
         if (cursor.atEnd()) {
             return new TextException(open, "Found '[' without its ']', expected '[1, 2, 3] unit'", "");
         }
-        String hint = cursor.startsWith("..")
-                ? "A nominal value comes before its limits, such as '" + middle(first) + " V [0 V .. 5 V]'."
+        String hint = cursor.rest().contains("..")
+                ? "A nominal value comes before its limits, such as '1.5 V [1.2 V .. 1.8 V]'."
                 : "The unit of a list comes once, behind ']'.";
         return TextException.expected("',' or ']'", cursor, hint);
-    }
-
-    private static String middle(Numeral first) {
-        String text = first.value().compareTo(BigDecimal.ZERO) < 0 ? "0" : first.text();
-        String quoted = Quoted.of(text);
-        return quoted.substring(1, quoted.length() - 1);
     }
 }

@@ -6,28 +6,26 @@ import java.util.Optional;
  * The letters that stand for the decimal point in a marking code of IEC 60062:2016 ({@code 4K7}, {@code R47}, {@code 4n7}).
  */
 enum MarkingLetter {
-    MILLIOHM("L", -3, true, true),
-    OHM("R", 0, true, false),
-    KILOHM("Kk", 3, true, true),
-    MEGOHM("M", 6, true, false),
-    GIGOHM("G", 9, true, false),
-    TEROHM("T", 12, true, true),
-    PICOFARAD("p", -12, false, false),
-    NANOFARAD("n", -9, false, false),
-    MICROFARAD("µμu", -6, false, false),
-    MILLIFARAD("m", -3, false, true),
-    FARAD("F", 0, false, true);
+    MILLIOHM("L", -3, true),
+    OHM("R", 0, true),
+    KILOHM("Kk", 3, true),
+    MEGOHM("M", 6, true),
+    GIGOHM("G", 9, true),
+    TEROHM("T", 12, true),
+    PICOFARAD("p", -12, false),
+    NANOFARAD("n", -9, false),
+    MICROFARAD("µμu", -6, false),
+    MILLIFARAD("m", -3, false),
+    FARAD("F", 0, false);
 
     private final String letters;
     private final int exponent;
     private final boolean resistance;
-    private final boolean unitToo;
 
-    MarkingLetter(String letters, int exponent, boolean resistance, boolean unitToo) {
+    MarkingLetter(String letters, int exponent, boolean resistance) {
         this.letters = letters;
         this.exponent = exponent;
         this.resistance = resistance;
-        this.unitToo = unitToo;
     }
 
     static Optional<MarkingLetter> of(char c) {
@@ -65,7 +63,7 @@ enum MarkingLetter {
     }
 
     /** Whether the letter behind a number could as well be a unit (litre, kelvin, tesla, metre, farad). */
-    boolean isUnitToo() {
-        return unitToo;
+    static boolean isUnitToo(char letter) {
+        return "LKTmF".indexOf(letter) >= 0;
     }
 }

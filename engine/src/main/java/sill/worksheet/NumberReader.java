@@ -63,7 +63,9 @@ final class NumberReader {
             digits = whole + fraction(first);
             if (digits.isEmpty()) {
                 cursor.moveTo(start);
-                throw TextException.expected(A_NUMBER, cursor, "");
+                boolean word = Character.isJavaIdentifierStart(cursor.peek());
+                String hint = word ? "Only plain values stand here; compute in a calc cell." : "";
+                throw TextException.expected(A_NUMBER, cursor, hint);
             }
             shift = exponent();
         }
@@ -149,16 +151,16 @@ final class NumberReader {
         if (isDigit(cursor.peek(1))) {
             return whole.isEmpty() && letter.get() != MarkingLetter.OHM ? Optional.empty() : letter;
         }
-        return !whole.isEmpty() && endsNumber(letter.get()) ? letter : Optional.empty();
+        return !whole.isEmpty() && endsNumber() ? letter : Optional.empty();
     }
 
     /** Whether a letter behind the digits, as in {@code 470R}, belongs to the number and is not a unit. */
-    private boolean endsNumber(MarkingLetter letter) {
+    private boolean endsNumber() {
         char next = cursor.peek(1);
         if (next != '\0' && !Cursor.isSpace(next) && "±+[]~|,.".indexOf(next) < 0) {
             return false;
         }
-        if (!letter.isUnitToo()) {
+        if (!MarkingLetter.isUnitToo(cursor.peek())) {
             return true;
         }
         int ahead = 1;
@@ -177,12 +179,21 @@ final class NumberReader {
         if (Cursor.isSpace(next)) {
             int before = cursor.position();
             cursor.skipSpace();
-            boolean digit = isDigit(cursor.peek());
+            boolean digit = isDigit(cursor.peek()) && !startsReciprocal();
             cursor.moveTo(before);
             if (digit) {
                 throw groups(start, inList ? "Put a comma between two numbers." : "Write the digits without spaces.");
             }
         }
+    }
+
+    /** Whether a unit such as {@code 1/K} stands here. */
+    private boolean startsReciprocal() {
+        int ahead = 1;
+        while (Cursor.isSpace(cursor.peek(ahead))) {
+            ahead++;
+        }
+        return !inList && cursor.peek() == '1' && cursor.peek(ahead) == '/';
     }
 
     private TextException groups(int start, String hint) {

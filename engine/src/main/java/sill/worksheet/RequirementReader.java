@@ -1,7 +1,5 @@
 package sill.worksheet;
 
-import java.util.List;
-import sill.words.NearestWord;
 import sill.words.Quoted;
 import sill.worksheet.Check.Basis;
 import sill.worksheet.Check.Limit;
@@ -27,7 +25,8 @@ final class RequirementReader {
         Requirement requirement = new RequirementReader(upToBasis).requirement();
         upToBasis.skipSpace();
         if (!upToBasis.atEnd()) {
-            throw TextException.expected(BASIS, upToBasis, "");
+            String hint = upToBasis.startsWith("//") ? "A remark follows '|' here." : "";
+            throw TextException.expected(BASIS, upToBasis, hint);
         }
         return new Judged(requirement, new RequirementReader(cursor.part(basis, cursor.end())).basis());
     }
@@ -55,6 +54,9 @@ final class RequirementReader {
         }
         if (cursor.takeWord("within")) {
             cursor.skipSpace();
+            if (cursor.peek() == '[') {
+                throw TextException.expected("two limits without brackets", cursor, "Write 'within low .. high'.");
+            }
             Window window = Window.read(cursor, cursor.position());
             return new Requirement.Within(limit(window.low(), window.high()), limit(window.high(), window.low()));
         }
@@ -79,7 +81,7 @@ final class RequirementReader {
         }
         Tolerance tolerance = ToleranceReader.distance(cursor, value);
         double distance = tolerance instanceof Tolerance.Relative relative
-                ? relative.fraction() * Math.abs(value.si())
+                ? Decimals.product(relative.fraction(), Math.abs(value.si()))
                 : tolerance.high(0);
         return new Requirement.EqualTo(limit(value), distance);
     }
@@ -94,8 +96,11 @@ final class RequirementReader {
         cursor.takeWord("at");
         cursor.skipSpace();
         if (!cursor.take("worst-case")) {
-            throw TextException.expected(
-                    "'worst-case' after 'at'", cursor, NearestWord.hint(cursor.word(), List.of("worst-case"), ""));
+            boolean second = cursor.startsWith("least") || cursor.startsWith("most");
+            String hint = second
+                    ? "One line, one requirement; two limits are 'within low .. high'."
+                    : "Write 'at worst-case'.";
+            throw TextException.expected("'worst-case' after 'at'", cursor, hint);
         }
         cursor.skipSpace();
         if (!cursor.atEnd()) {

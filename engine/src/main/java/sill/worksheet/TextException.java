@@ -17,7 +17,8 @@ final class TextException extends Exception {
      * @param hint as {@link Problem#hint}
      */
     TextException(int position, String message, String hint) {
-        super(message);
+        // Never seen as a stack trace, and a long worksheet may hold many.
+        super(message, null, false, false);
         this.position = position;
         this.hint = hint;
     }

@@ -4,6 +4,7 @@ import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import sill.words.NearestWord;
 
 /** Reads the lines between {@code sill 1} and the first cell. */
 final class TitleBlockParser {
@@ -15,9 +16,11 @@ final class TitleBlockParser {
         this.problems = problems;
     }
 
-    static TitleBlock parse(List<SourceLine> lines, ProblemList problems) {
+    /** Reads the lines; {@code whole} unless some of them could not be read and are missing. */
+    static TitleBlock parse(List<SourceLine> lines, boolean whole, ProblemList problems) {
         TitleBlockParser parser = new TitleBlockParser(problems);
-        int lastWithoutKey = -1;
+        // What stands on line 1 instead of "sill 1" has been reported.
+        int lastWithoutKey = 0;
         for (SourceLine line : lines) {
             if (line.isBlank() || line.isComment()) {
                 continue;
@@ -36,7 +39,7 @@ final class TitleBlockParser {
                 problems.error(line, slip);
             }
         }
-        if (!parser.lineOfKey.containsKey("title")) {
+        if (whole && !parser.lineOfKey.containsKey("title")) {
             problems.error(
                     1,
                     1,
@@ -59,7 +62,15 @@ final class TitleBlockParser {
         Cursor cursor = new Cursor(line.text());
         cursor.skipSpace();
         int start = cursor.position();
-        String key = KeyedLine.key(cursor, TitleBlock.KEYS);
+        String key;
+        try {
+            key = KeyedLine.key(cursor, TitleBlock.KEYS);
+        } catch (TextException slip) {
+            // A title whose key is misspelled is not missing as well.
+            String word = cursor.between(start, cursor.position());
+            NearestWord.to(word, TitleBlock.KEYS).ifPresent(near -> lineOfKey.putIfAbsent(near, line.number()));
+            throw slip;
+        }
         Integer first = lineOfKey.putIfAbsent(key, line.number());
         if (first != null) {
             throw new TextException(

@@ -101,6 +101,9 @@ final class ToleranceParser {
     private void methods(Cursor cursor, SourceLine line) throws TextException {
         Set<Class<?>> seen = new HashSet<>();
         for (Target target : TopLevelList.read(cursor, line, "a method")) {
+            if (problems.isFull()) {
+                return;
+            }
             try {
                 Method method = MethodReader.read(target);
                 if (seen.add(method.getClass())) {

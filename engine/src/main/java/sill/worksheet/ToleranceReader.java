@@ -33,6 +33,14 @@ final class ToleranceReader {
                     "Write it without its sign; limits on one side are '[low .. high]'.");
         }
         Unit unit = distance.unit();
+        if (isFraction(about.unit()) && !distance.isBareZero()) {
+            throw new TextException(
+                    distance.start(),
+                    "Found " + Quoted.of(distance.text()) + " on a value in "
+                            + about.unit().symbol() + ", expected limits that read one way only",
+                    "Write both limits: '[48 " + about.unit().symbol() + " .. 52 "
+                            + about.unit().symbol() + "]'.");
+        }
         if (isFraction(unit)) {
             return relative(distance, about);
         }
@@ -50,7 +58,7 @@ final class ToleranceReader {
                             : "");
         }
         // A distance has no zero point: 2 °C between two temperatures are 2 K.
-        return new Tolerance.Absolute(distance.si() - unit.offset());
+        return new Tolerance.Absolute(Decimals.sum(distance.si(), -unit.offset()));
     }
 
     private static Tolerance relative(WrittenQuantity fraction, WrittenQuantity about) throws TextException {
@@ -61,13 +69,6 @@ final class ToleranceReader {
                     "Found " + Quoted.of(fraction.text()) + " of a temperature in " + unit.symbol()
                             + ", expected a difference",
                     "Write '± 2 " + unit.symbol() + "' or '± 2 K'.");
-        }
-        if (isFraction(unit)) {
-            throw new TextException(
-                    fraction.start(),
-                    "Found " + Quoted.of(fraction.text()) + " of a value in " + unit.symbol()
-                            + ", expected limits that read one way only",
-                    "Write them out: '[low " + unit.symbol() + " .. high " + unit.symbol() + "]'.");
         }
         return new Tolerance.Relative(fraction.si());
     }
@@ -92,7 +93,9 @@ final class ToleranceReader {
                         limit.start(),
                         "Found the limit " + Quoted.of(limit.text()) + ", expected a unit that fits "
                                 + nominal.unit().symbol(),
-                        nominal.bare() ? "Give the nominal value its unit too." : "");
+                        limit.bare()
+                                ? "Each limit carries its unit."
+                                : nominal.bare() ? "Give the nominal value its unit too." : "");
             }
             if (limit.isBareZero() && nominal.unit().offset() != 0) {
                 throw Window.zeroWithoutScale(limit, nominal.unit());

@@ -35,7 +35,8 @@ final class WorksheetParser {
         int first = nextHeader(0);
         reportControls(0, first);
         int start = VersionLine.check(lines.get(0), problems) ? 1 : 0;
-        TitleBlock titleBlock = TitleBlockParser.parse(readable(Math.min(start, first), first), problems);
+        TitleBlock titleBlock =
+                TitleBlockParser.parse(readable(Math.min(start, first), first), unreadable.isEmpty(), problems);
         while (first < lines.size()) {
             int next = nextHeader(first + 1);
             problems.enterCell(cells.size() + 1);
@@ -75,16 +76,12 @@ final class WorksheetParser {
         CellHeader head = CellHeader.read(lines.get(header), problems);
         String caption = head.caption();
         String source = source(header + 1, next);
-        List<SourceLine> body = readable(header + 1, next);
+        List<SourceLine> body = readable(header + 1, next).stream()
+                .filter(each -> !CellHeader.reportIndented(each, head.kind(), problems))
+                .toList();
         return switch (head.kind()) {
-            case NOTE -> {
-                body.forEach(each -> CellHeader.warnIfIndented(each, head.kind(), problems));
-                yield new Cell.Note(number, caption, line, source);
-            }
-            case CALC -> {
-                body.forEach(each -> CellHeader.warnIfIndented(each, head.kind(), problems));
-                yield new Cell.Calculation(number, caption, line, source);
-            }
+            case NOTE -> new Cell.Note(number, caption, line, source);
+            case CALC -> new Cell.Calculation(number, caption, line, source);
             case GIVEN -> {
                 GivenParser.Lines read = givens.parse(body);
                 yield new Cell.Givens(number, caption, line, source, read.givens(), read.wrong());

@@ -1,7 +1,6 @@
 package sill.worksheet;
 
 import java.math.BigDecimal;
-import java.util.Optional;
 import sill.units.Unit;
 import sill.units.UnitException;
 import sill.words.Quoted;
@@ -68,35 +67,28 @@ record WrittenQuantity(double si, BigDecimal number, Unit unit, boolean bare, in
     }
 
     private static Unit unit(String symbol, int start, Numeral numeral) throws TextException {
-        Unit unit = unit(symbol, start);
-        Optional<MarkingLetter> code = numeral.code();
-        if (code.isEmpty()) {
-            if (symbol.equals("K") && start == numeral.start() + numeral.text().length()) {
-                String digits = numeral.text();
-                throw new TextException(
-                        numeral.start(),
-                        "Found " + Quoted.of(digits + symbol) + ", expected a clear unit: K may be kilo or kelvin",
-                        "Write '" + digits + " kΩ', '" + digits + "e3' or '" + digits + " K'.");
-            }
-            return unit;
+        boolean glued = start == numeral.start() + numeral.text().length();
+        if (numeral.code().isPresent()) {
+            return MarkingCodes.unit(numeral, symbol, start, glued);
         }
-        String expected = code.get().unit();
-        if (!unit.symbol().equals(expected)) {
-            String digits = numeral.value()
-                    .scaleByPowerOfTen(-code.get().exponent())
-                    .stripTrailingZeros()
-                    .toPlainString();
+        if (glued && symbol.equals("K")) {
+            String digits = numeral.text();
             throw new TextException(
                     numeral.start(),
-                    "Found the marking code " + Quoted.of(numeral.text()) + " before " + Quoted.of(unit.symbol())
-                            + ", expected " + expected + " or no unit",
-                    "Write the number out, such as '" + digits + " "
-                            + code.get().prefix() + expected + "'.");
+                    "Found " + Quoted.of(digits + symbol) + ", expected a clear unit: K may be kilo or kelvin",
+                    "Write '" + digits + " kΩ', '" + digits + "e3' or '" + digits + " K'.");
         }
-        return unit(code.get().prefix() + expected, start);
+        return unit(symbol, start);
     }
 
-    private static Unit unit(String symbol, int start) throws TextException {
+    static Unit unit(String symbol, int start) throws TextException {
+        int comment = symbol.indexOf("//");
+        if (comment >= 0) {
+            throw new TextException(
+                    start + comment,
+                    "Found " + Quoted.of(symbol.substring(comment)) + ", expected the end of the line",
+                    "A remark follows '|' here.");
+        }
         try {
             return Unit.parse(symbol);
         } catch (UnitException e) {
@@ -104,12 +96,21 @@ record WrittenQuantity(double si, BigDecimal number, Unit unit, boolean bare, in
         }
     }
 
+    /** What seems to be meant when something else stands where the unit does. */
     private static String mend(String symbol, String hint) {
-        if (symbol.contains("//")) {
-            return "A remark follows '|' here.";
+        if (symbol.charAt(0) == '/' && symbol.length() > 1 && Character.isLetter(symbol.charAt(1))) {
+            return "Write '1/K' or 'K^-1'.";
         }
-        for (int at = 0; at + 1 < symbol.length(); at++) {
-            if ("+-−".indexOf(symbol.charAt(at)) >= 0 && "0123456789 /-".indexOf(symbol.charAt(at + 1)) >= 0) {
+        if ("*/+-−".indexOf(symbol.charAt(0)) >= 0) {
+            return "Only a plain value stands here; compute in a calc cell.";
+        }
+        if (symbol.contains(" to ")) {
+            return "Write two limits as 'low .. high'.";
+        }
+        boolean signed = false;
+        for (int at = 1; at < symbol.length(); at++) {
+            signed |= "+-−".indexOf(symbol.charAt(at)) >= 0 && "^(".indexOf(symbol.charAt(at - 1)) < 0;
+            if (Character.isDigit(symbol.charAt(at)) && (signed || Cursor.isSpace(symbol.charAt(at - 1)))) {
                 return "Write '± 5 %' for equal limits and '[4.8 V .. 5.1 V]' for others.";
             }
         }
@@ -117,6 +118,6 @@ record WrittenQuantity(double si, BigDecimal number, Unit unit, boolean bare, in
     }
 
     private static boolean endsUnit(Cursor cursor) {
-        return "±[]~|".indexOf(cursor.peek()) >= 0 || cursor.startsWith("+/-") || cursor.startsWith("..");
+        return "±[]~|…".indexOf(cursor.peek()) >= 0 || cursor.startsWith("+/-") || cursor.startsWith("..");
     }
 }
