@@ -34,7 +34,8 @@ final class SpecNotation {
             }
         }
         sheet.problems().forEach(notation::problem);
-        return SpecExample.withSigns(String.join("\n", notation.lines));
+        // A space at a line's end would be lost in an editor.
+        return SpecExample.withSigns(String.join("\n", notation.lines)).replaceAll("(?m) $", "␠");
     }
 
     private void content(Cell cell) {

@@ -138,7 +138,8 @@ class WorksheetTextPropertiesTest {
             throws UnitException {
         Unit unit = Unit.parse(symbol);
         double si = unit.offset() == 0 ? value : 273.15 + value % 1e6;
-        double step = 5.1e-4 * Math.abs(unit.offset() == 0 ? si : si - 273.15);
+        // Half a unit of the fourth digit, and the rounding of the sum with 273.15 K.
+        double step = 5.1e-4 * Math.abs(unit.offset() == 0 ? si : si - 273.15) + 2 * Math.ulp(si);
 
         assertThat(Math.abs(read(Notation.shown(si, unit)) - si)).isLessThanOrEqualTo(step);
         assertThat(Math.abs(read(Notation.shownIn(si, unit)) - si)).isLessThanOrEqualTo(step);
