@@ -66,8 +66,8 @@ class BuildingTest {
         assertThat(outcome.err()).isEqualTo(FIRST_USE);
         assertThat(outcome.out()).endsWith("sill.cli.Main\n--help\n");
         assertThat(mavenCalls())
-                .containsExactly(
-                        temp.resolve("jdk") + ": -q -B -pl engine -am package -DskipTests -Dspotless.check.skip=true");
+                .containsExactly(temp.resolve("jdk")
+                        + ": -q -B -Dstyle.color=never -pl engine -am package -DskipTests -Dspotless.check.skip=true");
     }
 
     @Test
@@ -208,7 +208,7 @@ class BuildingTest {
         Path lock = house.target().resolve("building");
         assertThat(house.tool("sleep", "").start()).isEqualTo(new Outcome(3, "", """
                 sill: waiting for another start of Sill that is building it
-                sill: another start of Sill has been building it for 15 minutes (it holds %1$s)
+                sill: another start of Sill has been building it for 10 minutes (it holds %1$s)
                   expected: a build to end by then
                   mend: end that start, or delete %1$s if there is none, and start again
                 """.formatted(lock)));
