@@ -1,0 +1,113 @@
+package sill.tests.architecture;
+
+import static com.tngtech.archunit.lang.syntax.ArchRuleDefinition.classes;
+import static com.tngtech.archunit.lang.syntax.ArchRuleDefinition.noClasses;
+import static com.tngtech.archunit.library.dependencies.SlicesRuleDefinition.slices;
+import static org.assertj.core.api.Assertions.assertThat;
+
+import com.tngtech.archunit.core.domain.JavaClasses;
+import com.tngtech.archunit.core.importer.ClassFileImporter;
+import com.tngtech.archunit.core.importer.ImportOption;
+import org.junit.jupiter.api.Test;
+
+/** Who may know whom. */
+class PackageRulesTest {
+    private static final JavaClasses HOUSE = new ClassFileImporter()
+            .withImportOption(new ImportOption.DoNotIncludeTests())
+            .importPackages("sill");
+
+    /** A rule holds for nothing at all when nothing was looked at. Raise the number as the house grows. */
+    @Test
+    void theWholeHouseIsLookedAt() {
+        assertThat(HOUSE.stream().filter(type -> !type.getPackageName().startsWith("sill.stdlib")))
+                .hasSizeGreaterThan(280);
+        assertThat(HOUSE.stream().filter(type -> type.getPackageName().startsWith("sill.stdlib")))
+                .hasSizeGreaterThan(20);
+    }
+
+    @Test
+    void packagesFormNoCircle() {
+        slices().matching("sill.(**)").should().beFreeOfCycles().check(HOUSE);
+    }
+
+    @Test
+    void stdlibKnowsNothingOfTheEngine() {
+        classes()
+                .that()
+                .resideInAPackage("sill.stdlib..")
+                .should()
+                .onlyDependOnClassesThat()
+                .resideInAnyPackage("sill.stdlib..", "java..")
+                .check(HOUSE);
+    }
+
+    @Test
+    void theSnippetEvaluatorStaysInTheWorker() {
+        noClasses()
+                .that()
+                .resideOutsideOfPackage("sill.worker")
+                .should()
+                .dependOnClassesThat()
+                .resideInAPackage("jdk.jshell..")
+                .check(HOUSE);
+    }
+
+    @Test
+    void theCompilersTreeStaysInTheSheet() {
+        noClasses()
+                .that()
+                .resideOutsideOfPackage("sill.sheet")
+                .should()
+                .dependOnClassesThat()
+                .resideInAnyPackage("com.sun.source..", "com.sun.tools..", "javax.lang.model.element..",
+                        "javax.lang.model.type..",
+                        "javax.lang.model.util..")
+                .check(HOUSE);
+    }
+
+    /** The worker hands a compiler to the sheet's translation and reads what the snippet evaluator says of errors. */
+    @Test
+    void theCompilerIsStartedByTheSheetAndTheWorkerAlone() {
+        noClasses()
+                .that()
+                .resideOutsideOfPackages("sill.sheet", "sill.worker")
+                .should()
+                .dependOnClassesThat()
+                .resideInAPackage("javax.tools..")
+                .check(HOUSE);
+    }
+
+    @Test
+    void onlyCommandsWriteToTheTerminal() {
+        noClasses()
+                .that()
+                .resideOutsideOfPackages("sill.cli", "sill.worker")
+                .should()
+                .accessField(System.class, "out")
+                .orShould()
+                .accessField(System.class, "err")
+                .orShould()
+                .accessField(java.io.FileDescriptor.class, "out")
+                .orShould()
+                .accessField(java.io.FileDescriptor.class, "err")
+                .check(HOUSE);
+    }
+
+    @Test
+    void modelsAndRecordKnowNeitherCompilerNorWorker() {
+        noClasses()
+                .that()
+                .resideInAnyPackage(
+                        "sill.markup..",
+                        "sill.plot..",
+                        "sill.record..",
+                        "sill.units..",
+                        "sill.values..",
+                        "sill.words..",
+                        "sill.worksheet..")
+                .should()
+                .dependOnClassesThat()
+                .resideInAnyPackage("sill.sheet..", "sill.worker..", "sill.cli..")
+                .check(HOUSE);
+    }
+}
