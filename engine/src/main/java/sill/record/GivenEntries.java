@@ -50,7 +50,7 @@ final class GivenEntries {
             return plain(given, new Datum.Text(text.text()), "", text.text(), at);
         }
         String path = ((Given.DataFile) given.value()).path();
-        return plain(given, new Datum.Opaque(path), "", "data file " + path, at);
+        return plain(given, new Datum.Opaque(path), "", path, at);
     }
 
     private static GivenEntry plain(Given given, Datum value, String unit, String shown, String at) {

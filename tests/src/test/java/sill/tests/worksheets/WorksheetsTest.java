@@ -1,0 +1,131 @@
+package sill.tests.worksheets;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.Arrays;
+import java.util.List;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.BeforeAll;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvFileSource;
+import org.junit.jupiter.params.provider.EnumSource;
+
+/** Every design of the project runs, holds, and comes to figures got elsewhere. */
+class WorksheetsTest {
+    private static Runs runs;
+
+    @BeforeAll
+    static void prepare(@TempDir Path folder) {
+        runs = new Runs(folder);
+    }
+
+    @Test
+    void noWorksheetIsForgotten() throws IOException {
+        try (Stream<Path> files = Files.walk(Design.FOLDER)) {
+            List<Path> sheets =
+                    files.filter(file -> file.toString().endsWith(".sill")).toList();
+            assertThat(sheets)
+                    .containsExactlyInAnyOrderElementsOf(
+                            Arrays.stream(Design.values()).map(Design::sheet).toList());
+        }
+    }
+
+    @ParameterizedTest
+    @EnumSource
+    void itRunsWithoutAProblemOrWarning(Design design) {
+        Runs.Run run = runs.of(design);
+
+        assertThat(run.code()).as(run.out() + run.err()).isZero();
+        assertThat(run.err()).isEmpty();
+        assertThat(run.record().at("/outcome").asText()).isEqualTo("holds");
+        assertThat(run.record().at("/problems").isArray()).isTrue();
+        assertThat(run.record().at("/problems")).isEmpty();
+        assertThat(run.record().at("/cells"))
+                .isNotEmpty()
+                .allMatch(cell -> cell.at("/state").asText().equals("done"));
+    }
+
+    @ParameterizedTest
+    @EnumSource
+    void eachCheckHoldsWithTheMarginItsLimitsLeave(Design design) {
+        JsonNode checks = runs.of(design).record().at("/checks");
+
+        assertThat(checks).hasSize(design.checks());
+        for (JsonNode check : checks) {
+            assertThat(check.at("/verdict").asText()).as(check.toString()).isEqualTo("holds");
+            assertThat(check.at("/remark").asText()).as(check.toString()).isNotBlank();
+            if (check.at("/value").isBoolean()) {
+                assertThat(check.at("/value").asBoolean()).isTrue();
+            } else {
+                assertThat(check.at("/margin").asDouble())
+                        .as(check.toString())
+                        .isEqualTo(margin(check))
+                        .isPositive();
+            }
+        }
+    }
+
+    /** From the value to the nearer limit, as the record's format defines it. */
+    private static double margin(JsonNode check) {
+        double value = check.at("/value").asDouble();
+        double below = check.hasNonNull("low") ? value - check.at("/low").asDouble() : Double.POSITIVE_INFINITY;
+        double above = check.hasNonNull("high") ? check.at("/high").asDouble() - value : Double.POSITIVE_INFINITY;
+        return Math.min(below, above);
+    }
+
+    @ParameterizedTest
+    @EnumSource
+    void itsPlotsAndDataAreInTheRecord(Design design) {
+        Runs.Run run = runs.of(design);
+
+        assertThat(run.record().at("/plots"))
+                .hasSize(design.plots())
+                .allMatch(plot -> plot.at("/svg").asText().startsWith("<svg")
+                        && !plot.at("/caption").asText().isBlank());
+        assertThat(run.record().at("/files")).hasSize(design.dataFiles());
+        assertThat(run.page().split("<svg", -1)).hasSizeGreaterThan(design.plots());
+    }
+
+    @ParameterizedTest
+    @EnumSource(mode = EnumSource.Mode.EXCLUDE, names = "WORKED_EXAMPLE")
+    void whatIsInventedSaysSo(Design design) {
+        JsonNode record = runs.of(design).record();
+
+        assertThat(record.at("/worksheet/text").asText()).contains("**invented**");
+        for (JsonNode file : record.at("/files")) {
+            assertThat(file.at("/path").asText()).endsWith("-invented.csv");
+        }
+    }
+
+    @ParameterizedTest
+    @EnumSource(mode = EnumSource.Mode.EXCLUDE, names = "WORKED_EXAMPLE")
+    void whatSwitchesDangerSaysSo(Design design) {
+        assertThat(runs.of(design).page()).contains("Cautions", "local", "licensed");
+    }
+
+    /** A figure holds to half a unit of its last digit. */
+    @ParameterizedTest(name = "{0}: {1} = {2}")
+    @CsvFileSource(resources = "/worksheets/figures.txt", delimiter = '|', useHeadersInDisplayName = true)
+    void aFigureIsWhatItIsElsewhere(String sheet, String name, String figure, String from) {
+        assertThat(from).as("every figure says where it is from").isNotBlank();
+        assertThat(value(Design.named(sheet), name)).is(Figure.of(figure));
+    }
+
+    private static double value(Design design, String name) {
+        String[] path = name.split("\\.", 2);
+        for (JsonNode value : runs.of(design).record().at("/values")) {
+            if (value.at("/name").asText().equals(path[0])) {
+                JsonNode number = value.at(path.length == 1 ? "/value" : "/value/" + path[1]);
+                assertThat(number.isNumber()).as(name + " in " + value).isTrue();
+                return number.asDouble();
+            }
+        }
+        throw new AssertionError("no value \"" + name + "\" in the record of " + design);
+    }
+}
