@@ -8,13 +8,13 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
+import sill.tests.Clone;
 
 /** Where what lies, and how long a file may get. */
 class FolderRulesTest {
     private static final int MOST_LINES = 400;
 
-    /** The tests run in the folder of their module. */
-    private static final Path ROOT = Path.of("").toAbsolutePath().getParent();
+    private static final Path ROOT = Clone.root();
 
     private static List<Path> mainSources() throws IOException {
         try (Stream<Path> engine = Files.walk(ROOT.resolve("engine/src/main/java"));

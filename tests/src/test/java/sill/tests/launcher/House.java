@@ -3,7 +3,6 @@ package sill.tests.launcher;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.nio.file.Files;
-import java.nio.file.LinkOption;
 import java.nio.file.Path;
 import java.nio.file.attribute.PosixFilePermissions;
 import java.util.Arrays;
@@ -11,6 +10,7 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.stream.Stream;
+import sill.tests.Clone;
 
 /**
  * A clone in small: the start script, sources to be newer than the jar, and a folder of tools that is all of PATH. Started
@@ -35,7 +35,7 @@ final class House {
             write(root.resolve(module).resolve("pom.xml"), "<project/>\n");
         }
         write(root.resolve("pom.xml"), "<project/>\n");
-        Files.copy(repository().resolve("engine/sill"), script());
+        Files.copy(Clone.root().resolve("engine/sill"), script());
         executable(script());
         for (String tool : TOOLS) {
             Files.createSymbolicLink(tools.resolve(tool), onPath(tool));
@@ -136,15 +136,6 @@ final class House {
     static void program(Path file, String script) throws IOException {
         write(file, "#!/bin/sh\n" + script);
         executable(file);
-    }
-
-    /** The folder of the clone that these tests belong to. */
-    static Path repository() {
-        Path folder = Path.of("").toAbsolutePath();
-        while (!Files.exists(folder.resolve("engine/sill"), LinkOption.NOFOLLOW_LINKS)) {
-            folder = folder.getParent();
-        }
-        return folder;
     }
 
     private static void executable(Path file) throws IOException {
