@@ -14,7 +14,8 @@ import sill.tests.Clone;
 /**
  * Times {@code sill run} beside the JDK's source launcher and snippet prompt on the same Java, each in a fresh process. The
  * contenders alternate, so that what else the machine does falls on all of them; the figures are medians, and the ratios
- * are ratios of medians. Each runs once before, untimed, and Sill's class-data-sharing archives are made before, as they
+ * are ratios of medians. Unless a single run is asked for, each runs
+ * once before, untimed, and Sill's class-data-sharing archives are made before, as they
  * are after a user's first run.
  */
 public final class ColdRunBenchmark {
@@ -77,7 +78,7 @@ public final class ColdRunBenchmark {
                 large.worksheet());
         makeArchives();
         Map<String, List<Double>> times = new TreeMap<>();
-        for (int run = 0; run <= runs; run++) {
+        for (int run = runs == 1 ? 1 : 0; run <= runs; run++) {
             String launcherSaid = "";
             for (Contender contender : List.of(sheet, launcher, prompt, plots, longer)) {
                 Contender.Run result = contender.run();

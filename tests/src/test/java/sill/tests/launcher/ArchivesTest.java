@@ -85,24 +85,17 @@ class ArchivesTest {
         assertThat(makeArchives()).isEqualTo(new Outcome(0, "", ""));
     }
 
-    @Test
-    void archivesOfBothProcessesAreMadeInSilence() throws IOException {
-        house.withArchives();
-        assertThat(makeArchives()).isEqualTo(new Outcome(0, "", ""));
-        assertThat(archives).isDirectoryContaining("glob:**/parent.jsa");
-        assertThat(archives.resolve("worker.jsa")).hasContent("a sheet");
-        assertThat(archives.resolve("training.sill")).doesNotExist();
-        assertThat(archives.resolveSibling(archives.getFileName() + ".making")).doesNotExist();
-    }
-
     /**
      * The JVM's own log of class loading tells where the program's class came from. (From a path with a space Java 17
      * takes only the JDK's classes from the archive; all else is the same.)
      */
     @Test
-    void theNextStartLoadsFromTheArchive() throws IOException {
+    void archivesOfBothProcessesAreMadeInSilenceAndUsed() throws IOException {
         house.withArchives();
-        makeArchives();
+        assertThat(makeArchives()).isEqualTo(new Outcome(0, "", ""));
+        assertThat(archives.resolve("worker.jsa")).hasContent("a sheet");
+        assertThat(archives.resolve("training.sill")).doesNotExist();
+        assertThat(archives.resolveSibling(archives.getFileName() + ".making")).doesNotExist();
         Path log = temp.resolve("classes.log");
         house.with("_JAVA_OPTIONS", "-Xlog:class+load:file=" + log);
         assertThat(house.start("run").out()).isEqualTo("archives in " + archives + "\n");
@@ -120,31 +113,20 @@ class ArchivesTest {
     }
 
     @Test
-    void aDamagedArchiveIsPassedOverInSilence() throws IOException {
+    void aDamagedArchiveIsPassedOverInSilenceUntilTheNextBuild() throws IOException {
         house.withArchives();
-        makeArchives();
-        Files.delete(archives.resolve("parent.jsa"));
+        House.write(
+                archives.resolve("made"),
+                System.getProperty("java.home") + " " + house.script().getParent() + "\n");
         House.write(archives.resolve("parent.jsa"), "not an archive");
+        House.write(archives.resolve("worker.jsa"), "of this jar");
         assertThat(house.start("run")).isEqualTo(new Outcome(0, "archives in " + archives + "\n", ""));
-    }
-
-    @Test
-    void anArchiveOfAnEarlierJarIsMadeAnew() throws IOException {
-        house.withArchives();
         makeArchives();
+        assertThat(archives.resolve("worker.jsa")).hasContent("of this jar");
+
         Files.setLastModifiedTime(house.jar(), FileTime.from(Instant.now().plusSeconds(10)));
-        House.write(archives.resolve("worker.jsa"), "of the earlier jar");
         makeArchives();
         assertThat(archives.resolve("worker.jsa")).hasContent("a sheet");
-    }
-
-    @Test
-    void archivesThatStandForThisJarAreNotMadeAgain() throws IOException {
-        house.withArchives();
-        makeArchives();
-        House.write(archives.resolve("worker.jsa"), "made before");
-        makeArchives();
-        assertThat(archives.resolve("worker.jsa")).hasContent("made before");
     }
 
     /** A training run that goes wrong is not repeated at every start. */
