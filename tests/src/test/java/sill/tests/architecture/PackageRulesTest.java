@@ -59,7 +59,10 @@ class PackageRulesTest {
                 .resideOutsideOfPackage("sill.sheet")
                 .should()
                 .dependOnClassesThat()
-                .resideInAnyPackage("com.sun.source..", "com.sun.tools..", "javax.lang.model.element..",
+                .resideInAnyPackage(
+                        "com.sun.source..",
+                        "com.sun.tools..",
+                        "javax.lang.model.element..",
                         "javax.lang.model.type..",
                         "javax.lang.model.util..")
                 .check(HOUSE);
