@@ -90,10 +90,18 @@ record ShownValue(String text, String full, Map<String, String> components) {
             boolean all = full || items.size() <= ITEMS_IN_LINE;
             String listed = first.stream()
                     .limit(all ? Long.MAX_VALUE : ITEMS_IN_LINE)
-                    .map(each::text)
+                    .map(each::element)
                     .collect(Collectors.joining(", "));
             boolean whole = all && items.size() == first.size();
             return whole ? listed + symbol : listed + ", …" + symbol + " (" + items.size() + " values)";
+        }
+
+        /** A value inside a list; one of several parts is held together. */
+        private String element(Datum value) {
+            if (value instanceof Datum.Items) {
+                return "[" + text(value) + "]";
+            }
+            return value instanceof Datum.Fields ? "(" + text(value) + ")" : text(value);
         }
 
         private String cut(String text) {

@@ -39,11 +39,27 @@ class ShownValueTest {
         assertThat(shown("V", "", 0.5, 5).text()).isEqualTo("500.0\u00a0mV, 5.000\u00a0V");
     }
 
-    private static ShownValue shown(String unit, String shownIn, double... values) {
+    @Test
+    void rowsOfATableAreHeldTogether() {
+        Datum grid = new Datum.Items(List.of(items(1, 2), items(3, 4)), 2);
+        Datum points = new Datum.Items(List.of(new Datum.Fields(Map.of("r", new Datum.Real(1)))), 1);
+
+        assertThat(shown("", "", grid).text()).isEqualTo("[1.000, 2.000], [3.000, 4.000]");
+        assertThat(shown("", "", points).text()).isEqualTo("(r 1.000)");
+    }
+
+    private static Datum items(double... values) {
         List<Datum> items = Arrays.stream(values)
                 .mapToObj(value -> (Datum) new Datum.Real(value))
                 .toList();
-        Datum value = new Datum.Items(items, items.size());
+        return new Datum.Items(items, items.size());
+    }
+
+    private static ShownValue shown(String unit, String shownIn, double... values) {
+        return shown(unit, shownIn, items(values));
+    }
+
+    private static ShownValue shown(String unit, String shownIn, Datum value) {
         return ShownValue.of(new Result(
                 "x",
                 1,
