@@ -7,6 +7,7 @@ import sill.record.DesignRecord;
 import sill.record.DesignRecord.CheckEntry;
 import sill.record.DesignRecord.Outcome;
 import sill.record.DesignRecord.Verdict;
+import sill.units.Notation;
 import sill.values.CellState;
 import sill.worksheet.Problem;
 
@@ -37,7 +38,8 @@ final class RunReport {
         long done = states.stream().filter(CellState.DONE::equals).count();
         String title = record.titleBlock().getOrDefault("title", "");
         terminal.line(record.worksheet().file() + (title.isEmpty() ? "" : " \"" + title + "\"") + ": " + done + " of "
-                + states.size() + " calculation cells ran, " + record.values().size() + " values");
+                + states.size() + " calculation cells ran, " + record.values().size()
+                + (record.values().size() == 1 ? " value" : " values"));
     }
 
     private void checks() {
@@ -59,7 +61,7 @@ final class RunReport {
             return check.shownValue();
         }
         String share = check.marginShare()
-                .map(part -> " (" + Math.round(part * 100) + " %)")
+                .map(part -> " (" + String.valueOf(Math.round(part * 100)).replace('-', Notation.MINUS) + " %)")
                 .orElse("");
         return check.shownValue() + ", limit " + check.shownLimit() + ", margin " + check.shownMargin() + share;
     }

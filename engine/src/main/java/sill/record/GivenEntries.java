@@ -86,8 +86,8 @@ final class GivenEntries {
 
     private static String list(Given.Quantities quantities) {
         Unit unit = quantities.unit();
-        // Numbers alone: the unit stands once, behind the list.
-        Unit bare = new Unit("1", unit.dimension(), unit.factor(), unit.offset());
+        // The unit stands once, behind the list.
+        Unit bare = Units.withoutSymbol(unit);
         String numbers = quantities.values().stream()
                 .map(value -> Notation.plain(value, bare))
                 .collect(Collectors.joining(", "));

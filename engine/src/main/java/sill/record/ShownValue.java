@@ -84,12 +84,24 @@ record ShownValue(String text, String full, Map<String, String> components) {
 
         private String items(Datum.Items items) {
             List<Datum> first = items.items();
+            boolean once = exact != null && first.stream().allMatch(Datum.Real.class::isInstance);
+            Writer each = once ? new Writer(unit, Units.withoutSymbol(exact), full) : this;
+            String symbol = once && !exact.symbol().equals("1") ? Notation.SPACE + exact.symbol() : "";
             boolean all = full || items.size() <= ITEMS_IN_LINE;
             String listed = first.stream()
                     .limit(all ? Long.MAX_VALUE : ITEMS_IN_LINE)
-                    .map(this::text)
+                    .map(each::element)
                     .collect(Collectors.joining(", "));
-            return all && items.size() == first.size() ? listed : listed + ", … (" + items.size() + " values)";
+            boolean whole = all && items.size() == first.size();
+            return whole ? listed + symbol : listed + ", …" + symbol + " (" + items.size() + " values)";
+        }
+
+        /** A value inside a list; one of several parts is held together. */
+        private String element(Datum value) {
+            if (value instanceof Datum.Items) {
+                return "[" + text(value) + "]";
+            }
+            return value instanceof Datum.Fields ? "(" + text(value) + ")" : text(value);
         }
 
         private String cut(String text) {

@@ -15,4 +15,9 @@ final class Units {
             return Unit.ONE;
         }
     }
+
+    /** The same unit with nothing to print: for numbers whose unit stands once for all of them. */
+    static Unit withoutSymbol(Unit unit) {
+        return new Unit("1", unit.dimension(), unit.factor(), unit.offset());
+    }
 }

@@ -34,7 +34,7 @@ class RunCommandTest {
 
         assertThat(ran.err()).isEmpty();
         assertThat(ran.out()).isEqualTo("""
-                        gate.sill "Gate": 1 of 1 calculation cells ran, 1 values
+                        gate.sill "Gate": 1 of 1 calculation cells ran, 1 value
                           3.1  holds       half within 2 V .. 4 V  2.500 V, limit 2 V .. 4 V, margin +500.0 mV (50 %)
                           3.2  holds       half > 1 holds          true
                         holds: 2 of 2 checks hold
@@ -57,7 +57,7 @@ class RunCommandTest {
 
         assertThat(ran.out())
                 .contains("4.1".replace('4', '2')
-                        + "  fails       x at most 2  3.000, limit ≤\u00a02, margin −1.000 (-50 %)")
+                        + "  fails       x at most 2  3.000, limit ≤\u00a02, margin −1.000 (−50 %)")
                 .contains("fails: 0 of 1 checks hold");
         assertThat(ran.code()).isEqualTo(1);
     }
