@@ -33,7 +33,7 @@ public final class Markup {
                     "an attribute must follow its start tag, got " + attribute + " after content");
         }
         out.append(' ').append(attribute).append("=\"");
-        escape(VisibleText.of(value));
+        escape(value);
         out.append('"');
         return this;
     }
@@ -65,7 +65,7 @@ public final class Markup {
     /** Text, escaped, with hidden characters shown as their codes. */
     public Markup text(String text) {
         endTag();
-        escape(VisibleText.of(text));
+        escape(text);
         return this;
     }
 
@@ -115,17 +115,45 @@ public final class Markup {
         tagEnd = "";
     }
 
+    /** One pass that copies whole runs of harmless characters, since most of a page is written by a cold program. */
     private void escape(String text) {
+        int copied = 0;
         for (int i = 0; i < text.length(); i++) {
             char c = text.charAt(i);
-            switch (c) {
-                case '&' -> out.append("&amp;");
-                case '<' -> out.append("&lt;");
-                case '>' -> out.append("&gt;");
-                case '"' -> out.append("&quot;");
-                case '\'' -> out.append("&#39;");
-                default -> out.append(c);
+            String entity = entity(c);
+            if (!entity.isEmpty()) {
+                out.append(text, copied, i).append(entity);
+                copied = i + 1;
+            } else if (!VisibleText.isPlain(c)) {
+                // From here on each character may be one that hides.
+                out.append(text, copied, i);
+                escapeVisible(VisibleText.of(text.substring(i)));
+                return;
             }
         }
+        out.append(text, copied, text.length());
+    }
+
+    private void escapeVisible(String visible) {
+        int copied = 0;
+        for (int i = 0; i < visible.length(); i++) {
+            String entity = entity(visible.charAt(i));
+            if (!entity.isEmpty()) {
+                out.append(visible, copied, i).append(entity);
+                copied = i + 1;
+            }
+        }
+        out.append(visible, copied, visible.length());
+    }
+
+    private static String entity(char c) {
+        return switch (c) {
+            case '&' -> "&amp;";
+            case '<' -> "&lt;";
+            case '>' -> "&gt;";
+            case '"' -> "&quot;";
+            case '\'' -> "&#39;";
+            default -> "";
+        };
     }
 }

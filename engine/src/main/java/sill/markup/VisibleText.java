@@ -36,7 +36,8 @@ public final class VisibleText {
         return visible.toString();
     }
 
-    private static boolean isPlain(char c) {
+    /** Whether a character is certainly not a hidden one. */
+    static boolean isPlain(char c) {
         return c >= ' ' && c < 0x7F || c == '\n' || c == '\t';
     }
 

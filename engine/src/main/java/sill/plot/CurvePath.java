@@ -89,13 +89,13 @@ final class CurvePath {
         double[] x = runs.stream().flatMapToDouble(run -> Arrays.stream(run[0])).toArray();
         double[] y = runs.stream().flatMapToDouble(run -> Arrays.stream(run[1])).toArray();
         for (int i : Decimation.points(x, y, most)) {
-            path.append(Px.at('M', x[i], y[i])).append(marker);
+            Px.write(path, 'M', x[i], y[i]).append(marker);
         }
     }
 
     private void addLine(double[] x, double[] y, int[] kept, boolean arrow) {
         double sinceArrow = ARROW_EVERY / 2;
-        path.append(Px.at('M', x[kept[0]], y[kept[0]]));
+        Px.write(path, 'M', x[kept[0]], y[kept[0]]);
         if (kept.length == 1) {
             // With round ends a line of no length is a dot.
             path.append("h0");
@@ -105,7 +105,7 @@ final class CurvePath {
             double fromY = y[kept[i - 1]];
             double toX = x[kept[i]];
             double toY = y[kept[i]];
-            path.append(Px.at('L', toX, toY));
+            Px.write(path, 'L', toX, toY);
             if (!arrow) {
                 continue;
             }

@@ -74,7 +74,7 @@ public final class PlotDrawing {
             curves.add(new CurvePath(curve, frame, most, Look.of(curves.size()).marker()));
         }
         int hidden = curves.stream().mapToInt(CurvePath::hidden).sum();
-        List<Key.Entry> key = Key.arrange(plot.curves(), KEY_SWATCH, EDGE, WIDTH - EDGE);
+        List<Key.Entry> key = Key.arrange(keyed(), KEY_SWATCH, EDGE, WIDTH - EDGE);
         double keyTop = frame.bottom() + 2 * LABEL_ROW + 4;
         int keyRows = key.stream().mapToInt(entry -> entry.row() + 1).max().orElse(0);
         double noteTop = keyTop + keyRows * LABEL_ROW;
@@ -167,6 +167,13 @@ public final class PlotDrawing {
 
     private String horizontal(double value) {
         return Px.at('M', frame.left(), frame.py(value)) + "H" + Px.text(frame.right());
+    }
+
+    /** The curves that the key names; a single one that is named like its axis needs none. */
+    private List<Plot.Curve> keyed() {
+        boolean said = plot.curves().size() == 1
+                && plot.curves().get(0).label().equals(plot.y().label());
+        return said ? List.of() : plot.curves();
     }
 
     private Stream<Plot.Mark> marks(Plot.Side side) {

@@ -5,14 +5,27 @@ final class Px {
     private Px() {}
 
     static String text(double length) {
-        long tenths = Math.round(length * 10);
-        String sign = tenths < 0 ? "-" : "";
-        long size = Math.abs(tenths);
-        return size % 10 == 0 ? sign + size / 10 : sign + size / 10 + "." + size % 10;
+        return write(new StringBuilder(8), length).toString();
     }
 
     /** A path command at a point, as {@code M12 40.5}. */
     static String at(char command, double x, double y) {
-        return command + text(x) + " " + text(y);
+        return write(new StringBuilder(16), command, x, y).toString();
+    }
+
+    /** Appends a path command at a point. */
+    static StringBuilder write(StringBuilder path, char command, double x, double y) {
+        write(path.append(command), x).append(' ');
+        return write(path, y);
+    }
+
+    private static StringBuilder write(StringBuilder text, double length) {
+        long tenths = Math.round(length * 10);
+        if (tenths < 0) {
+            text.append('-');
+        }
+        long size = Math.abs(tenths);
+        text.append(size / 10);
+        return size % 10 == 0 ? text : text.append('.').append(size % 10);
     }
 }

@@ -150,7 +150,7 @@ public final class RecordJson {
     private static void plot(JsonGenerator json, DesignRecord.PlotEntry plot) throws IOException {
         text(json, "at", plot.at());
         text(json, "caption", plot.caption());
-        text(json, "svg", PlotDrawing.svg(plot.plot(), plotId(plot.at())));
+        json.writeStringField("svg", PlotDrawing.svg(plot.plot(), plotId(plot.at())));
     }
 
     private static void problem(JsonGenerator json, Problem problem) throws IOException {

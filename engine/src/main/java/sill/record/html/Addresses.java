@@ -28,4 +28,9 @@ final class Addresses {
         int end = at.indexOf('.');
         return Integer.parseInt(end < 0 ? at : at.substring(0, end));
     }
+
+    /** The place in its cell in an address. */
+    static int index(String at) {
+        return Integer.parseInt(at.substring(at.indexOf('.') + 1));
+    }
 }

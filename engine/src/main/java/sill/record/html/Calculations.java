@@ -2,8 +2,8 @@ package sill.record.html;
 
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
-import java.util.stream.Collectors;
+import java.util.SortedMap;
+import java.util.TreeMap;
 import sill.markup.Markup;
 import sill.plot.PlotDrawing;
 import sill.record.DesignRecord.PlotEntry;
@@ -19,19 +19,11 @@ final class Calculations {
     private Calculations() {}
 
     static void write(Markup page, int cell, CellContent content) {
-        Map<String, PlotEntry> plots =
-                content.plots(cell).stream().collect(Collectors.toMap(PlotEntry::at, plot -> plot, (a, b) -> a));
-        for (ValueEntry value : content.values(cell)) {
-            Optional<PlotEntry> plot = Optional.ofNullable(plots.remove(value.at()));
-            if (plot.isPresent()) {
-                figure(page, plot.get());
-            } else {
-                line(page, value);
-            }
-        }
-        content.plots(cell).stream()
-                .filter(plot -> plots.containsKey(plot.at()))
-                .forEach(plot -> figure(page, plot));
+        SortedMap<Integer, Runnable> inOrder = new TreeMap<>();
+        content.values(cell).forEach(value -> inOrder.put(Addresses.index(value.at()), () -> line(page, value)));
+        // A plot that also has a value of its own stands in its place.
+        content.plots(cell).forEach(plot -> inOrder.put(Addresses.index(plot.at()), () -> figure(page, plot)));
+        inOrder.values().forEach(Runnable::run);
     }
 
     private static void line(Markup page, ValueEntry value) {
@@ -43,7 +35,8 @@ final class Calculations {
             page.leaf("var", value.name());
             started = true;
         }
-        String shown = value.shown().isEmpty() ? Values.brief(value.value(), value.unit()) : value.shown();
+        boolean inOwnWords = value.shown().isEmpty() || Values.isTable(value.value());
+        String shown = inOwnWords ? Values.brief(value.value(), value.unit()) : value.shown();
         if (!value.formula().isEmpty() && !value.formula().equals(shown)) {
             equals(page, started);
             page.leaf("code", value.formula());
@@ -64,9 +57,9 @@ final class Calculations {
 
     /** The value in brief, and on demand in full with its type and what it rests on; needs no script. */
     private static void result(Markup page, ValueEntry value, String shown) {
-        boolean components = value.value() instanceof Datum.Fields
-                && !value.shownComponents().isEmpty();
-        boolean shortTable = Values.isTable(value.value()) && Values.rows(value.value()) <= SHORT_TABLE;
+        boolean table = Values.isTable(value.value());
+        boolean components = !table && !value.shownComponents().isEmpty();
+        boolean shortTable = table && Values.rows(value.value()) <= SHORT_TABLE;
         page.open(
                 "details",
                 shortTable ? new String[] {"class", "result", "open", ""} : new String[] {"class", "result"});

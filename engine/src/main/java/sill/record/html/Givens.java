@@ -40,10 +40,7 @@ final class Givens {
 
     private static void value(Markup page, GivenEntry given) {
         String brief = given.shown().isEmpty() ? Values.brief(given.value(), given.unit()) : given.shown();
-        boolean isFile = given.value() instanceof Datum.Opaque;
-        if (isFile) {
-            page.text("file ").leaf("code", brief);
-        } else if (given.value() instanceof Datum.Items items && items.items().size() > Values.SHORT_LIST) {
+        if (given.value() instanceof Datum.Items items && items.items().size() > Values.SHORT_LIST) {
             page.open("details").leaf("summary", brief);
             Values.full(page, given.value(), given.unit());
             page.close();

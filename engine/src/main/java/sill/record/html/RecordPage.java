@@ -83,10 +83,23 @@ public final class RecordPage {
 
     /** JSON in which no text can end the script element or be read as markup; the characters only occur in JSON strings. */
     static String inert(String json) {
-        return json.replace("&", "\\u0026")
-                .replace("<", "\\u003c")
-                .replace(">", "\\u003e")
-                .replace("\u2028", "\\u2028")
-                .replace("\u2029", "\\u2029");
+        StringBuilder inert = new StringBuilder(json.length() + json.length() / 8);
+        int copied = 0;
+        for (int i = 0; i < json.length(); i++) {
+            String escape =
+                    switch (json.charAt(i)) {
+                        case '&' -> "\\u0026";
+                        case '<' -> "\\u003c";
+                        case '>' -> "\\u003e";
+                        case '\u2028' -> "\\u2028";
+                        case '\u2029' -> "\\u2029";
+                        default -> "";
+                    };
+            if (!escape.isEmpty()) {
+                inert.append(json, copied, i).append(escape);
+                copied = i + 1;
+            }
+        }
+        return inert.append(json, copied, json.length()).toString();
     }
 }

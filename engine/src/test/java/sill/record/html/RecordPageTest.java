@@ -132,6 +132,12 @@ class RecordPageTest {
     }
 
     @Test
+    void resultsAndPlotsStandInOrder() {
+        assertThat(page(Records.ofEverything()).select(".cell .line > .address").eachText())
+                .containsExactly("1.1", "1.9");
+    }
+
+    @Test
     void aProblemQuotesItsLineWithACaret() {
         Document page = page(Records.ofProblems(
                 "\tdouble a = b\u202E;",
