@@ -37,7 +37,9 @@ record Attribution(
             List<Usage> usages = scanner.usages();
             FieldFacts facts = FieldFacts.of(trees, unit, classText.slots());
             List<Compiler.Complaint> errors = task.errors();
-            KnownNames known = errors.isEmpty() ? KnownNames.NONE : KnownNames.in(task.task().getElements());
+            KnownNames known = errors.isEmpty()
+                    ? KnownNames.NONE
+                    : KnownNames.in(task.task().getElements());
             return new Attribution(text, errors, usages, scanner.imports(), facts.types(), facts.units(), known);
         } catch (IOException e) {
             throw new java.io.UncheckedIOException(e);

@@ -21,9 +21,13 @@ import javax.tools.ToolProvider;
 /** The JDK's compiler with the options and the class path of worksheet code. */
 public final class Compiler {
     /** Same language on every JDK; the bare {@code -source} costs nothing where {@code --release} does. */
-    public static final List<String> OPTIONS =
-            List.of(
-            "-proc:none", "-source", "17", "-target", "17", "-Xlint:-options",
+    public static final List<String> OPTIONS = List.of(
+            "-proc:none",
+            "-source",
+            "17",
+            "-target",
+            "17",
+            "-Xlint:-options",
             // All errors: the compiler would stop counting at 100, and call what follows right.
             "-Xmaxerrs",
             "0",

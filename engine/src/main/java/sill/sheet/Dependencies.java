@@ -76,9 +76,9 @@ final class Dependencies {
     private void group(List<Usage> all, SnippetFinder snippets) {
         for (Usage usage : all) {
             if (declarations.containsKey(usage.name())) {
-                snippets.at(usage.piece(), usage.offset()).ifPresent(snippet -> usages.computeIfAbsent(
-                                snippet, each -> new ArrayList<>())
-                        .add(usage));
+                snippets.at(usage.piece(), usage.offset())
+                        .ifPresent(snippet -> usages.computeIfAbsent(snippet, each -> new ArrayList<>())
+                                .add(usage));
             }
         }
     }

@@ -13,9 +13,10 @@ final class LostNames {
     private static final Pattern TYPE = Pattern.compile("\\b(?:class|interface|enum|record)\\s+([A-Za-z_]\\w*)");
 
     /** At a line's start, where what is indented belongs to something else: words, a type, a name, what may follow it. */
-    private static final Pattern VARIABLE_OR_METHOD = Pattern.compile("(?m)^(?!(?:import|return|throw|else|new|package)\\b)"
-            + "(?:(?:final|static|public|private|protected)\\s+)*"
-            + "[A-Za-z_][\\w.]*(?:<[^=;(){}]*>)?(?:\\[\\])*\\s+([A-Za-z_]\\w*)\\s*(?:\\[\\]\\s*)*(?:[=;,({]|$)");
+    private static final Pattern VARIABLE_OR_METHOD = Pattern.compile(
+            "(?m)^(?!(?:import|return|throw|else|new|package)\\b)"
+                    + "(?:(?:final|static|public|private|protected)\\s+)*"
+                    + "[A-Za-z_][\\w.]*(?:<[^=;(){}]*>)?(?:\\[\\])*\\s+([A-Za-z_]\\w*)\\s*(?:\\[\\]\\s*)*(?:[=;,({]|$)");
 
     private LostNames() {}
 

@@ -89,7 +89,11 @@ final class Names {
         }
         for (Program.Field field : cell.fields()) {
             if (field.name().isEmpty()) {
-                declare(field.field(), Kind.RESULT, field.snippet(), field.typeSpan().start());
+                declare(
+                        field.field(),
+                        Kind.RESULT,
+                        field.snippet(),
+                        field.typeSpan().start());
             }
         }
     }

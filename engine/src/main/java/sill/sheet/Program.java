@@ -44,13 +44,16 @@ record Program(List<SheetSource.GivenField> givens, List<CellCode> cells, List<C
                 switch (snippet.kind()) {
                     case VARIABLES ->
                         snippet.variables()
-                                .forEach(v -> fields.add(new Field(v.name(), v.name(), v.type(), v.typeSpan(), snippet)));
+                                .forEach(v ->
+                                        fields.add(new Field(v.name(), v.name(), v.type(), v.typeSpan(), snippet)));
                     case CALL, EXPRESSION ->
                         fields.add(new Field(
                                 "$value" + number() + "_" + (fields.size() + 1),
                                 "",
                                 Snippet.OPEN,
-                                new Span(snippet.expression().start(), snippet.expression().start()),
+                                new Span(
+                                        snippet.expression().start(),
+                                        snippet.expression().start()),
                                 snippet));
                     default -> {
                         // Imports, methods, types and statements give no value.

@@ -52,15 +52,16 @@ final class ProgramReader {
                 snippets.add(each.snippet().get());
             } else {
                 SnippetParser.Raw raw = each.raw();
-                faults.add(problem(piece, Brackets.fault(raw.codeOnly(), raw.span()).orElse(each.fault())));
+                faults.add(problem(
+                        piece, Brackets.fault(raw.codeOnly(), raw.span()).orElse(each.fault())));
                 lost.putAll(LostNames.in(raw.codeOnly(), raw.span()));
             }
         }
         int comment = CodeText.unclosedComment(piece.text());
         if (comment >= 0) {
-            faults.add(problem(
-                    piece, new SnippetParser.Fault(comment, Wording.OURS, "found '/*' without its '*/'")));
-            lost.putAll(LostNames.in(piece.text(), new Span(comment, piece.text().length())));
+            faults.add(problem(piece, new SnippetParser.Fault(comment, Wording.OURS, "found '/*' without its '*/'")));
+            lost.putAll(
+                    LostNames.in(piece.text(), new Span(comment, piece.text().length())));
         }
         return new Program.CellCode(piece, List.copyOf(snippets), List.copyOf(faults), lost);
     }
@@ -87,7 +88,10 @@ final class ProgramReader {
 
     private static Problem problem(Piece piece, SnippetParser.Fault fault) {
         return Wording.problem(
-                piece, fault.offset(), new Compiler.Complaint(fault.offset(), fault.code(), fault.message()), List.of());
+                piece,
+                fault.offset(),
+                new Compiler.Complaint(fault.offset(), fault.code(), fault.message()),
+                List.of());
     }
 
     /** The comment behind a snippet, on the line it ends on. */

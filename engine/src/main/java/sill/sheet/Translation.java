@@ -104,8 +104,9 @@ public final class Translation {
                 .forEach(name -> imports.add("import " + name + ";"));
         program.imports().stream()
                 .filter(snippet -> !brokenImports.contains(snippet))
-                .forEach(snippet -> imports.add(CodeText.oneLine(snippet.span().of(snippet.piece().text()))
-                        + (snippet.hasSemicolon() ? "" : ";")));
+                .forEach(snippet -> imports.add(
+                        CodeText.oneLine(snippet.span().of(snippet.piece().text()))
+                                + (snippet.hasSemicolon() ? "" : ";")));
         List<Problem> sorted = new ArrayList<>(problems);
         sorted.sort(Comparator.comparingInt(Problem::line).thenComparingInt(Problem::column));
         return new TranslatedSheet(

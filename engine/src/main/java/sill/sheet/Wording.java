@@ -17,8 +17,8 @@ final class Wording {
     private static final Pattern LOCATION = Pattern.compile("location: .*?(?:of type|class|interface|enum) (.+)");
     private static final Pattern WRONG_TYPE =
             Pattern.compile("incompatible types: (?:bad [^\\n]*\\n\\s*)?([^\\n]+?) cannot be converted to ([^\\n]+)");
-    private static final Pattern LOSSY =
-            Pattern.compile("incompatible types: (?:bad [^\\n]*\\n\\s*)?possible lossy conversion from (\\w+) to (\\w+)");
+    private static final Pattern LOSSY = Pattern.compile(
+            "incompatible types: (?:bad [^\\n]*\\n\\s*)?possible lossy conversion from (\\w+) to (\\w+)");
     private static final Pattern ARGUMENTS = Pattern.compile(
             "(?:method|constructor) (\\S+) in .*cannot be applied.*\\s+required: (.+)\\s+found:\\s+(.+)\\s+reason");
 
@@ -72,9 +72,10 @@ final class Wording {
         String kind = symbol.group(1).equals("class") ? "type" : symbol.group(1);
         String found = "found the " + kind + " " + Quoted.of(symbol.group(2) + readable(symbol.group(3)));
         boolean inType = location.find() && !location.group(1).contains(ClassText.NAME);
-        return found + (inType
-                ? ", which " + readable(location.group(1)) + " does not have"
-                : ", expected one that is declared above");
+        return found
+                + (inType
+                        ? ", which " + readable(location.group(1)) + " does not have"
+                        : ", expected one that is declared above");
     }
 
     private static String said(Compiler.Complaint complaint) {
@@ -107,8 +108,8 @@ final class Wording {
                 .results()
                 .map(form -> readable(form.group(1)).replace(",", ", "))
                 .collect(Collectors.joining(" or "));
-        return "found " + readable(first.substring(first.lastIndexOf(" for ") + 5)).replace(",", ", ") + ", expected "
-                + forms;
+        return "found "
+                + readable(first.substring(first.lastIndexOf(" for ") + 5)).replace(",", ", ") + ", expected " + forms;
     }
 
     private static String brackets(String types) {
@@ -125,14 +126,17 @@ final class Wording {
 
     private static String hint(Compiler.Complaint complaint) {
         return switch (complaint.code()) {
-            case "compiler.err.expected", "compiler.err.expected2", "compiler.err.expected3", "compiler.err.premature.eof" ->
-                "Complete the Java at this place.";
+            case "compiler.err.expected",
+                    "compiler.err.expected2",
+                    "compiler.err.expected3",
+                    "compiler.err.premature.eof" -> "Complete the Java at this place.";
             case "compiler.err.unreported.exception.need.to.catch.or.throw" ->
                 "Catch it, or declare the method with 'throws'.";
             case "compiler.err.local.variables.referenced.from.lambda" -> "Copy it to a variable of its own first.";
-            default -> LOSSY.matcher(complaint.message()).find()
-                    ? "Declare it as the wider type, or convert on purpose with a cast or Math.round."
-                    : "";
+            default ->
+                LOSSY.matcher(complaint.message()).find()
+                        ? "Declare it as the wider type, or convert on purpose with a cast or Math.round."
+                        : "";
         };
     }
 }

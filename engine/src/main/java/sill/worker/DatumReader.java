@@ -140,9 +140,7 @@ final class DatumReader {
             try {
                 Method accessor = component.getAccessor();
                 accessor.setAccessible(true);
-                read.put(
-                        component.getName(),
-                        datum(accessor.invoke(value), type, depth + 1));
+                read.put(component.getName(), datum(accessor.invoke(value), type, depth + 1));
             } catch (InvocationTargetException e) {
                 read.put(component.getName(), new Datum.Opaque(unreadable(type, e.getCause())));
             } catch (ReflectiveOperationException e) {

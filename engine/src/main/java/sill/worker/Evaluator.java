@@ -45,9 +45,8 @@ final class Evaluator implements AutoCloseable {
             if (event.status() != Snippet.Status.VALID) {
                 shell.diagnostics(event.snippet())
                         .filter(Diag::isError)
-                        .forEach(d ->
-                                rejections.add(new Compiler.Complaint(
-                                        (int) d.getPosition(), d.getCode(), d.getMessage(Locale.ENGLISH))));
+                        .forEach(d -> rejections.add(new Compiler.Complaint(
+                                (int) d.getPosition(), d.getCode(), d.getMessage(Locale.ENGLISH))));
                 shell.drop(event.snippet());
             }
         }

@@ -1,5 +1,8 @@
 package sill.worker;
 
+import java.util.Arrays;
+import java.util.Comparator;
+import java.util.stream.Stream;
 import sill.sheet.Place;
 import sill.sheet.TranslatedSheet;
 import sill.worksheet.Problem;
@@ -23,16 +26,21 @@ final class Failure {
 
     private static Place place(TranslatedSheet sheet, Throwable thrown, int lineOffset, Place otherwise) {
         StackTraceElement[] frames = thrown.getStackTrace();
-        if (frames != null) {
-            for (StackTraceElement frame : frames) {
-                boolean ours = frame.getClassName().endsWith("$" + sheet.className())
-                        || frame.getClassName().contains("$" + sheet.className() + "$");
-                if (ours && frame.getLineNumber() >= lineOffset) {
-                    return sheet.code().linePlace(frame.getLineNumber() - lineOffset + 1);
-                }
-            }
+        if (frames == null) {
+            return otherwise;
         }
-        return otherwise;
+        Stream<Place> places = Arrays.stream(frames)
+                .filter(frame -> isOurs(frame, sheet) && frame.getLineNumber() >= lineOffset)
+                .map(frame -> sheet.code().linePlace(frame.getLineNumber() - lineOffset + 1));
+        // Where a recursion overflows is an accident; the calls that it goes round in are not.
+        return thrown instanceof StackOverflowError
+                ? places.skip(1).min(Comparator.naturalOrder()).orElse(otherwise)
+                : places.findFirst().orElse(otherwise);
+    }
+
+    private static boolean isOurs(StackTraceElement frame, TranslatedSheet sheet) {
+        String name = "$" + sheet.className();
+        return frame.getClassName().endsWith(name) || frame.getClassName().contains(name + "$");
     }
 
     private static String words(Throwable thrown) {

@@ -79,7 +79,8 @@ final class Gathered {
     void stop(Stop stop) {
         String where = stop.cell() == 0
                 ? "The worksheet's Java"
-                : "Cell " + stop.cell() + (captions.get(stop.cell()).isEmpty() ? "" : " " + Quoted.of(captions.get(stop.cell())));
+                : "Cell " + stop.cell()
+                        + (captions.get(stop.cell()).isEmpty() ? "" : " " + Quoted.of(captions.get(stop.cell())));
         problems.add(Problem.error(
                 stop.place().line(),
                 stop.place().column(),

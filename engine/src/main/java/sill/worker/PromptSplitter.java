@@ -22,8 +22,8 @@ final class PromptSplitter implements Splitter {
             Pattern.compile("(if|else|for|while|do|try|switch|case|default|catch|finally|class|record|enum|interface"
                     + "|abstract|sealed|non-sealed|synchronized|@interface)\\b.*");
 
-    private static final Pattern GOES_ON = Pattern.compile(
-            "\\.(?!\\d)|[?:*/%=&|^,]|!=|->|[<>]=?\\s|>>|(?:else|catch|finally|instanceof)\\b");
+    private static final Pattern GOES_ON =
+            Pattern.compile("\\.(?!\\d)|[?:*/%=&|^,]|!=|->|[<>]=?\\s|>>|(?:else|catch|finally|instanceof)\\b");
 
     private static final Pattern SIGN = Pattern.compile("[+-](?![+-])");
 
@@ -75,7 +75,8 @@ final class PromptSplitter implements Splitter {
     private static boolean goesOn(String code, int start, int end, int next) {
         if (next >= code.length() || code.charAt(end - 1) == ';') {
             // Behind a semicolon only an "else" can belong to what stands before it.
-            return code.startsWith("else", next) && GOES_ON.matcher(code).region(next, code.length()).lookingAt();
+            return code.startsWith("else", next)
+                    && GOES_ON.matcher(code).region(next, code.length()).lookingAt();
         }
         return GOES_ON.matcher(code).region(next, code.length()).lookingAt()
                 || (code.charAt(end - 1) != '}'

@@ -45,7 +45,8 @@ public final class SheetRun implements AutoCloseable {
         Gathered gathered = new Gathered(worksheet);
         boolean again = true;
         while (again) {
-            Optional<Gathered.Stop> stop = work(JobWriter.job(worksheet, files, gathered.stopped()), gathered, progress);
+            Optional<Gathered.Stop> stop =
+                    work(JobWriter.job(worksheet, files, gathered.stopped()), gathered, progress);
             // A step that was stopped before is left out; were it named again, a further worker would not get further.
             again = stop.isPresent()
                     && stop.get().cell() > 0

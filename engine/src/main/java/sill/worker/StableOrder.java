@@ -38,9 +38,10 @@ final class StableOrder {
 
     private static boolean alike(List<Object> items) {
         return items.stream()
-                        .map(item -> item instanceof Enum<?> constant ? constant.getDeclaringClass() : classOf(item))
-                        .distinct()
-                        .count()
+                                .map(item ->
+                                        item instanceof Enum<?> constant ? constant.getDeclaringClass() : classOf(item))
+                                .distinct()
+                                .count()
                         == 1
                 && items.get(0) instanceof Comparable;
     }

@@ -160,7 +160,9 @@ final class WorkerProcess implements AutoCloseable {
         boolean own = exit < 128;
         return new End(
                 "its worker ended with status " + exit,
-                own ? "Leave out what ends the process, such as System.exit." : "Something outside ended the process. Run again.");
+                own
+                        ? "Leave out what ends the process, such as System.exit."
+                        : "Something outside ended the process. Run again.");
     }
 
     private static byte[] drain(InputStream errors) {
