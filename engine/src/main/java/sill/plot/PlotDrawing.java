@@ -34,18 +34,18 @@ public final class PlotDrawing {
         this.plot = plot;
         AxisRange x = AxisRange.of(plot, Plot.Side.X);
         AxisRange y = AxisRange.of(plot, Plot.Side.Y);
-        xTicks = Ticks.within(x, plot.x().unit(), WIDTH - 2 * MARK_MARGIN);
         yTicks = Ticks.along(y, plot.y().unit(), 6);
         marks = plot.marks().stream()
                 .filter(mark -> AxisRange.shows((mark.side() == Plot.Side.X ? x : y).scale(), mark.at()))
                 .toList();
         double left = EDGE + 10 + widest(yTicks.labelled().stream().map(Ticks.Tick::text));
-        double widestMark = widest(marks(Plot.Side.Y).map(this::markText));
+        double widestMark = widest(marks(Plot.Side.Y).map(mark -> markText(mark, yTicks)));
         double right = widestMark == 0 ? 24 : Math.min(MARK_MARGIN, widestMark + 14) + EDGE;
         Frame flat = new Frame(left, 0, WIDTH - left - right, HEIGHT, x, y);
+        xTicks = Ticks.within(x, plot.x().unit(), flat.width());
         flags = MarkLabels.above(
                 marks(Plot.Side.X)
-                        .map(mark -> new MarkLabels.Wanted(flat.px(mark.at()), markText(mark)))
+                        .map(mark -> new MarkLabels.Wanted(flat.px(mark.at()), markText(mark, xTicks)))
                         .toList(),
                 EDGE,
                 WIDTH - EDGE);
@@ -146,7 +146,7 @@ public final class PlotDrawing {
         double[] texts = MarkLabels.beside(lines, frame.top(), frame.bottom());
         for (int i = 0; i < lines.length; i++) {
             leaders.append(Px.at('M', frame.right(), lines[i])).append(Px.at('L', frame.right() + 10, texts[i]));
-            String text = TextWidth.fit(markText(beside.get(i)), WIDTH - frame.right() - 14);
+            String text = TextWidth.fit(markText(beside.get(i), yTicks), WIDTH - frame.right() - 14);
             canvas.label(frame.right() + 13, texts[i] + BASELINE, Canvas.Anchor.START, text);
         }
         canvas.line(Pen.LEADER, leaders);
@@ -180,9 +180,8 @@ public final class PlotDrawing {
         return marks.stream().filter(mark -> mark.side() == side);
     }
 
-    private String markText(Plot.Mark mark) {
-        AxisUnit unit = (mark.side() == Plot.Side.X ? xTicks : yTicks).unit();
-        String value = unit.quantity(mark.at());
+    private static String markText(Plot.Mark mark, Ticks axis) {
+        String value = axis.unit().quantity(mark.at());
         return mark.label().isEmpty() ? value : mark.label() + " " + value;
     }
 

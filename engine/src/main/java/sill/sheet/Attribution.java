@@ -16,6 +16,7 @@ import java.util.Set;
  * @param imports the imports on demand that the text rests on
  * @param types types of the bare expressions, by field; {@link ClassText#NO_VALUE} for a call that gives none
  * @param units unit symbols that helpers state, by field
+ * @param known names that every worksheet may use, where there is an error that may be about a misspelt one
  */
 record Attribution(
         MappedText text,
@@ -23,7 +24,8 @@ record Attribution(
         List<Usage> usages,
         Set<String> imports,
         Map<String, String> types,
-        Map<String, String> units) {
+        Map<String, String> units,
+        KnownNames known) {
     static Attribution of(ClassText classText, Compiler compiler) {
         MappedText text = classText.unit();
         Compiler.Task task = compiler.task(List.of(text.toString()));
@@ -34,7 +36,11 @@ record Attribution(
             UsageScanner scanner = new UsageScanner(trees, unit, text);
             List<Usage> usages = scanner.usages();
             FieldFacts facts = FieldFacts.of(trees, unit, classText.slots());
-            return new Attribution(text, task.errors(), usages, scanner.imports(), facts.types(), facts.units());
+            List<Compiler.Complaint> errors = task.errors();
+            KnownNames known = errors.isEmpty()
+                    ? KnownNames.NONE
+                    : KnownNames.in(task.task().getElements());
+            return new Attribution(text, errors, usages, scanner.imports(), facts.types(), facts.units(), known);
         } catch (IOException e) {
             throw new java.io.UncheckedIOException(e);
         }

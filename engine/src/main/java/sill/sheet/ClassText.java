@@ -25,23 +25,46 @@ final class ClassText {
     private final Map<String, String> types;
     private final Set<Integer> leftOutCells;
     private final Set<Place> leftOutChecks;
+    private final Set<Snippet> leftOutSnippets;
     private final Map<Snippet, Program.Field> bareExpressions = new IdentityHashMap<>();
     private final Map<Integer, String> slots = new HashMap<>();
     private final MappedText text = new MappedText();
 
-    /**
-     * @param types Java types of the open fields, by field name, as far as they are known
-     * @param leftOutCells numbers of the cells whose code is not to be written; their fields are
-     * @param leftOutChecks places of the checks not to be written
-     */
-    ClassText(Program program, Map<String, String> types, Set<Integer> leftOutCells, Set<Place> leftOutChecks) {
+    private ClassText(
+            Program program,
+            Map<String, String> types,
+            Set<Integer> leftOutCells,
+            Set<Place> leftOutChecks,
+            Set<Snippet> leftOutSnippets) {
         this.program = program;
         this.types = types;
         this.leftOutCells = leftOutCells;
         this.leftOutChecks = leftOutChecks;
+        this.leftOutSnippets = leftOutSnippets;
         for (Program.CellCode cell : program.cells()) {
             cell.fields().forEach(field -> bareExpressions.put(field.snippet(), field));
         }
+    }
+
+    /**
+     * The text in which the compiler is to find all that is wrong: every cell is in it, with what could be parsed of it.
+     *
+     * @param types Java types of the open fields, by field name, as far as they are known
+     * @param again snippets that declare what is declared already
+     */
+    static ClassText whole(Program program, Map<String, String> types, Set<Snippet> again) {
+        return new ClassText(program, types, Set.of(), Set.of(), again);
+    }
+
+    /**
+     * The text that is to run.
+     *
+     * @param leftOutCells numbers of the cells that can't run
+     * @param leftOutChecks places of the checks that can't
+     */
+    static ClassText running(
+            Program program, Map<String, String> types, Set<Integer> leftOutCells, Set<Place> leftOutChecks) {
+        return new ClassText(program, types, leftOutCells, leftOutChecks, Set.of());
     }
 
     /** The imports, one a line, then the class: a compilation unit. */
@@ -61,7 +84,7 @@ final class ClassText {
         members();
         for (Program.CellCode cell : written()) {
             text.add("public static void " + cellMethod(cell.number()) + "() throws Throwable {\n");
-            cell.snippets().forEach(this::statement);
+            written(cell).forEach(this::statement);
             text.add("}\n");
         }
         for (Program.CheckCode check : program.checks()) {
@@ -92,31 +115,43 @@ final class ClassText {
                 .toList();
     }
 
+    private List<Snippet> written(Program.CellCode cell) {
+        return cell.snippets().stream()
+                .filter(snippet -> !leftOutSnippets.contains(snippet))
+                .toList();
+    }
+
     private void fields() {
         Set<String> names = new HashSet<>();
         for (SheetSource.GivenField given : program.presentGivens()) {
             text.add("public static " + given.type().java() + " " + given.name() + ";\n");
             names.add(given.name());
         }
-        for (Program.CellCode cell : program.cells()) {
+        for (Program.CellCode cell : written()) {
             for (Program.Field field : cell.fields()) {
                 String type = type(field);
-                boolean local = field.isBare() && type.isEmpty();
-                if (!local && !type.equals(NO_VALUE) && names.add(field.field())) {
-                    text.add("public static ")
-                            .add(
-                                    type.isEmpty() ? "Object" : type,
-                                    field.snippet().piece(),
-                                    field.at())
-                            .add(" " + field.field() + ";\n");
+                // Without a type it is a local of its cell, and what else uses it waits.
+                if (!type.isEmpty() && !type.equals(NO_VALUE) && names.add(field.field())) {
+                    field(field, type);
                 }
             }
         }
     }
 
+    private void field(Program.Field field, String type) {
+        Piece piece = field.snippet().piece();
+        text.add("public static ");
+        if (!field.isOpen() && field.typeIsOnePiece()) {
+            text.copy(piece, field.typeSpan());
+        } else {
+            text.add(type, piece, field.typeSpan().start());
+        }
+        text.add(" " + field.field() + ";\n");
+    }
+
     private void members() {
         for (Program.CellCode cell : written()) {
-            for (Snippet snippet : cell.snippets()) {
+            for (Snippet snippet : written(cell)) {
                 if (snippet.isMember()) {
                     text.add(snippet.isStatic() ? "" : "static ")
                             .copy(snippet.piece(), snippet.span(), snippet.calls())
@@ -131,7 +166,7 @@ final class ClassText {
         switch (snippet.kind()) {
             case VARIABLES -> {
                 for (Snippet.Variable variable : snippet.variables()) {
-                    if (variable.initialiser().end() > variable.initialiser().start()) {
+                    if (variable.hasInitialiser()) {
                         assignment(snippet, variable);
                     }
                 }
@@ -152,7 +187,7 @@ final class ClassText {
         // With its type unknown it stays a local, so that the compiler says why in the author's own terms.
         text.add((type.isEmpty() ? "var " : "") + variable.name() + " = ", piece, variable.at());
         if (variable.arrayInitialiser() && !type.isEmpty()) {
-            text.add("new " + type, piece, variable.typeAt());
+            text.add("new " + type, piece, variable.typeSpan().start());
         }
         text.copy(piece, variable.initialiser(), snippet.calls()).add(";\n");
     }
@@ -160,14 +195,21 @@ final class ClassText {
     private void value(Snippet snippet) {
         Piece piece = snippet.piece();
         Program.Field field = bareExpressions.get(snippet);
+        Span expression = snippet.expression();
         String type = type(field);
         slots.put(text.length(), field.field());
+        List<MappedText.Break> breaks = snippet.calls();
         if (type.isEmpty() && snippet.kind() == Snippet.Kind.EXPRESSION) {
-            text.add("var " + field.field() + " = ", piece, snippet.expression().start());
+            text.add("var " + field.field() + " = ", piece, expression.start());
         } else if (!type.isEmpty() && !type.equals(NO_VALUE)) {
-            text.add(field.field() + " = ", piece, snippet.expression().start());
+            text.add(field.field() + " = ", piece, expression.start());
+        } else {
+            // The statement has to start where its slot says.
+            breaks = breaks.stream()
+                    .filter(next -> next.at() > expression.start())
+                    .toList();
         }
-        text.copy(piece, snippet.expression(), snippet.calls()).add(";\n");
+        text.copy(piece, expression, breaks).add(";\n");
     }
 
     private void check(Program.CheckCode check, Snippet snippet) {

@@ -5,6 +5,7 @@ public final class CodeText {
     private final String text;
     private final char[] code;
     private int at;
+    private int unclosedComment = -1;
 
     private CodeText(String text) {
         this.text = text;
@@ -30,12 +31,50 @@ public final class CodeText {
         return last;
     }
 
+    /** Offset of a whole word at or behind {@code from}, or -1. */
+    static int word(String codeOnly, String word, int from) {
+        for (int at = codeOnly.indexOf(word, from); at >= 0; at = codeOnly.indexOf(word, at + 1)) {
+            if (!isNamePart(codeOnly, at - 1) && !isNamePart(codeOnly, at + word.length())) {
+                return at;
+            }
+        }
+        return -1;
+    }
+
+    private static boolean isNamePart(String text, int at) {
+        return at >= 0 && at < text.length() && Character.isJavaIdentifierPart(text.charAt(at));
+    }
+
+    /** Offset of a comment that is not closed, or -1. */
+    static int unclosedComment(String text) {
+        CodeText masked = new CodeText(text);
+        masked.run();
+        return masked.unclosedComment;
+    }
+
+    /** The text on one line: comments left out, and runs of blank space as one space where they stand outside quotes. */
+    static String oneLine(String text) {
+        CodeText masked = new CodeText(text);
+        masked.run();
+        StringBuilder line = new StringBuilder();
+        for (int i = 0; i < text.length(); i++) {
+            char code = masked.code[i];
+            if (!Character.isWhitespace(code)) {
+                line.append(text.charAt(i) == '\n' ? ' ' : text.charAt(i));
+            } else if (line.length() > 0 && line.charAt(line.length() - 1) != ' ') {
+                line.append(' ');
+            }
+        }
+        return line.toString().strip();
+    }
+
     private void run() {
         while (at < code.length) {
             if (text.startsWith("//", at)) {
                 blank(lineEnd(at), ' ');
             } else if (text.startsWith("/*", at)) {
                 int close = text.indexOf("*/", at + 2);
+                unclosedComment = close < 0 ? at : -1;
                 blank(close < 0 ? code.length : close + 2, ' ');
             } else if (text.startsWith("\"\"\"", at)) {
                 at += 3;

@@ -21,8 +21,18 @@ import javax.tools.ToolProvider;
 /** The JDK's compiler with the options and the class path of worksheet code. */
 public final class Compiler {
     /** Same language on every JDK; the bare {@code -source} costs nothing where {@code --release} does. */
-    public static final List<String> OPTIONS =
-            List.of("-proc:none", "-source", "17", "-target", "17", "-Xlint:-options");
+    public static final List<String> OPTIONS = List.of(
+            "-proc:none",
+            "-source",
+            "17",
+            "-target",
+            "17",
+            "-Xlint:-options",
+            // All errors: the compiler would stop counting at 100, and call what follows right.
+            "-Xmaxerrs",
+            "0",
+            // A wrong type is no reason to keep quiet about a missing return.
+            "-XDshould-stop.ifError=FLOW");
 
     private final JavaCompiler compiler = ToolProvider.getSystemJavaCompiler();
     private final StandardJavaFileManager files;
@@ -69,8 +79,24 @@ public final class Compiler {
         }
     }
 
-    /** An error: index of the source, offset in it, the compiler's key and English words. */
-    record Complaint(int source, int offset, String code, String message) {
+    /**
+     * An error.
+     *
+     * @param source index of the source
+     * @param offset where in it
+     * @param code the compiler's key, or {@link Wording#OURS}
+     * @param message the compiler's words, in English
+     */
+    public record Complaint(int source, int offset, String code, String message) {
+        /** A complaint about the only source. */
+        public Complaint(int offset, String code, String message) {
+            this(0, offset, code, message);
+        }
+
+        static Complaint ours(String message) {
+            return new Complaint(0, Wording.OURS, message);
+        }
+
         static Complaint of(Diagnostic<? extends JavaFileObject> d) {
             int source = d.getSource() instanceof Source s ? s.index : -1;
             return new Complaint(source, (int) d.getPosition(), d.getCode(), d.getMessage(Locale.ENGLISH));

@@ -10,7 +10,6 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
-import java.util.TreeMap;
 import java.util.TreeSet;
 import java.util.function.Function;
 
@@ -25,11 +24,11 @@ final class Dependencies {
     private final Map<String, Set<String>> memberReads = new HashMap<>();
     private final Map<String, Set<String>> uses = new LinkedHashMap<>();
 
-    Dependencies(Program program, Names names, List<Usage> all) {
+    Dependencies(Program program, Names names, List<Usage> all, SnippetFinder snippets) {
         declarations = names.declarations();
         declarations.keySet().forEach(name -> order.put(name, order.size()));
-        group(program, all);
-        readMembers();
+        group(all, snippets);
+        readMembers(program);
         followWrites();
     }
 
@@ -59,6 +58,13 @@ final class Dependencies {
         return List.copyOf(needed);
     }
 
+    /** Names in the order of their declarations. */
+    Set<String> inOrder(Collection<String> names) {
+        Set<String> sorted = inOrder();
+        sorted.addAll(names);
+        return sorted;
+    }
+
     private Set<String> inOrder() {
         return new TreeSet<>((a, b) -> Integer.compare(order.get(a), order.get(b)));
     }
@@ -67,31 +73,25 @@ final class Dependencies {
         return usages.getOrDefault(snippet, List.of());
     }
 
-    private void group(Program program, List<Usage> all) {
-        Map<Piece, TreeMap<Integer, Snippet>> starts = new IdentityHashMap<>();
-        List<Snippet> snippets = new ArrayList<>();
-        program.cells().forEach(cell -> snippets.addAll(cell.snippets()));
-        program.checks().forEach(check -> check.snippet().ifPresent(snippets::add));
-        for (Snippet snippet : snippets) {
-            starts.computeIfAbsent(snippet.piece(), piece -> new TreeMap<>())
-                    .put(snippet.span().start(), snippet);
-        }
+    private void group(List<Usage> all, SnippetFinder snippets) {
         for (Usage usage : all) {
             if (declarations.containsKey(usage.name())) {
-                Map.Entry<Integer, Snippet> at = starts.get(usage.piece()).floorEntry(usage.offset());
-                usages.computeIfAbsent(at.getValue(), snippet -> new ArrayList<>())
-                        .add(usage);
+                snippets.at(usage.piece(), usage.offset())
+                        .ifPresent(snippet -> usages.computeIfAbsent(snippet, each -> new ArrayList<>())
+                                .add(usage));
             }
         }
     }
 
-    private void readMembers() {
+    /** Overloads share a name, and here what they read. */
+    private void readMembers(Program program) {
         Map<String, Set<String>> mentioned = new HashMap<>();
-        for (Names.Declaration member : declarations.values()) {
-            if (member.isMember()) {
-                Set<String> names = inOrder();
-                of(member.snippet()).forEach(usage -> names.add(usage.name()));
-                mentioned.put(member.name(), names);
+        for (Program.CellCode cell : program.cells()) {
+            for (Snippet snippet : cell.snippets()) {
+                if (snippet.isMember()) {
+                    Set<String> names = mentioned.computeIfAbsent(snippet.name().text(), name -> inOrder());
+                    of(snippet).forEach(usage -> names.add(usage.name()));
+                }
             }
         }
         for (String member : mentioned.keySet()) {

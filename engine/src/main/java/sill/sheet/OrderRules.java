@@ -3,6 +3,7 @@ package sill.sheet;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import sill.words.Quoted;
 import sill.worksheet.Problem;
 
 /** A name is used only after it is declared, and settled when its cell ends. */
@@ -23,14 +24,14 @@ final class OrderRules {
                 if (usage.how() == Usage.How.ASSIGNED) {
                     problems.add(problem(
                             usage,
-                            "assigns \"" + usage.name() + "\", which is settled: it is the " + declared.where(),
-                            "give the new value a name of its own"));
+                            "assigned, expected it to stay as it is; it is the " + declared.where(),
+                            "Give the new value a name of its own."));
                 }
             } else if (declared.cell() > cell || isTooEarly(usage, declared)) {
                 problems.add(problem(
                         usage,
-                        "uses \"" + usage.name() + "\" before it is declared: it is the " + declared.where(),
-                        "move the declaration above its first use"));
+                        "before its declaration; it is the " + declared.where(),
+                        "Move the declaration above its first use."));
             }
         }
         return problems;
@@ -59,7 +60,7 @@ final class OrderRules {
                 place.line(),
                 place.column(),
                 usage.piece().cell(),
-                usage.piece().where() + " " + message,
+                usage.piece().where() + ": found " + Quoted.of(usage.name()) + " " + message,
                 hint);
     }
 }

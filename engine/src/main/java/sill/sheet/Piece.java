@@ -1,5 +1,7 @@
 package sill.sheet;
 
+import sill.words.Quoted;
+
 /**
  * A piece of worksheet text that goes into the class: a calculation cell or a check's expression.
  *
@@ -7,21 +9,21 @@ package sill.sheet;
  * @param text the piece
  * @param line worksheet line of its first character
  * @param column worksheet column of its first character
- * @param where how messages call it, as in {@code cell 3 "Trip points"}
+ * @param where how messages call it, as in {@code Cell 3 'Trip points'}
  */
 record Piece(int cell, String text, int line, int column, String where) {
     static Piece of(SheetSource.CodeCell cell) {
-        return new Piece(
-                cell.number(),
-                cell.source(),
-                cell.line() + 1,
-                1,
-                "cell " + cell.number() + " \"" + cell.caption() + "\"");
+        String caption = cell.caption().isEmpty() ? "" : " " + Quoted.of(cell.caption());
+        return new Piece(cell.number(), cell.source(), cell.line() + 1, 1, "Cell " + cell.number() + caption);
     }
 
     static Piece of(SheetSource.CheckLine check) {
         return new Piece(
-                check.cell(), check.expression(), check.line(), check.column(), "the check on line " + check.line());
+                check.cell(),
+                check.expression(),
+                check.line(),
+                check.column(),
+                "Cell " + check.cell() + ", " + Quoted.of(check.expression()));
     }
 
     Place place(int offset) {

@@ -30,8 +30,9 @@ record Program(List<SheetSource.GivenField> givens, List<CellCode> cells, List<C
      *
      * @param snippets those that could be parsed
      * @param faults why the others could not
+     * @param lostNames names that the others probably declare, with their offsets
      */
-    record CellCode(Piece piece, List<Snippet> snippets, List<Problem> faults) {
+    record CellCode(Piece piece, List<Snippet> snippets, List<Problem> faults, Map<String, Integer> lostNames) {
         int number() {
             return piece.cell();
         }
@@ -43,13 +44,16 @@ record Program(List<SheetSource.GivenField> givens, List<CellCode> cells, List<C
                 switch (snippet.kind()) {
                     case VARIABLES ->
                         snippet.variables()
-                                .forEach(v -> fields.add(new Field(v.name(), v.name(), v.type(), v.typeAt(), snippet)));
+                                .forEach(v ->
+                                        fields.add(new Field(v.name(), v.name(), v.type(), v.typeSpan(), snippet)));
                     case CALL, EXPRESSION ->
                         fields.add(new Field(
                                 "$value" + number() + "_" + (fields.size() + 1),
                                 "",
-                                "var",
-                                snippet.expression().start(),
+                                Snippet.OPEN,
+                                new Span(
+                                        snippet.expression().start(),
+                                        snippet.expression().start()),
                                 snippet));
                     default -> {
                         // Imports, methods, types and statements give no value.
@@ -65,12 +69,18 @@ record Program(List<SheetSource.GivenField> givens, List<CellCode> cells, List<C
      *
      * @param field its name in the class
      * @param name its name in the worksheet; empty for a bare expression
-     * @param type as written; {@code var} when open
-     * @param at offset of the type, or of the bare expression
+     * @param type as the compiler prints it; {@link Snippet#OPEN} when open
+     * @param typeSpan where the type is written; empty, at the name or the bare expression, when it is open
      */
-    record Field(String field, String name, String type, int at, Snippet snippet) {
+    record Field(String field, String name, String type, Span typeSpan, Snippet snippet) {
         boolean isOpen() {
-            return type.equals("var");
+            return type.equals(Snippet.OPEN);
+        }
+
+        /** Whether the type can be copied from the worksheet; an array's brackets may stand behind the name. */
+        boolean typeIsOnePiece() {
+            String written = typeSpan.of(snippet.piece().text());
+            return written.replaceAll("\\s", "").equals(type.replaceAll("\\s", ""));
         }
 
         /** Whether it holds a bare expression's value: no other code can name it. */

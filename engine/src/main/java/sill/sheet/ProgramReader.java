@@ -2,6 +2,7 @@ package sill.sheet;
 
 import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -23,10 +24,10 @@ final class ProgramReader {
 
     private List<Program.CellCode> cells(List<SheetSource.CodeCell> cells) {
         List<SnippetParser.Raw> raws = new ArrayList<>();
-        List<Piece> pieces = new ArrayList<>();
+        Map<Integer, Piece> pieces = new LinkedHashMap<>();
         for (SheetSource.CodeCell cell : cells) {
             Piece piece = Piece.of(cell);
-            pieces.add(piece);
+            pieces.put(piece.cell(), piece);
             String code = CodeText.codeOnly(piece.text());
             for (Span span : splitter.split(piece.text())) {
                 raws.add(new SnippetParser.Raw(piece, code, span, caption(piece, code, span)));
@@ -37,7 +38,7 @@ final class ProgramReader {
             byCell.computeIfAbsent(parsed.raw().piece().cell(), cell -> new ArrayList<>())
                     .add(parsed);
         }
-        return pieces.stream()
+        return pieces.values().stream()
                 .map(piece -> cell(piece, byCell.getOrDefault(piece.cell(), List.of())))
                 .toList();
     }
@@ -45,10 +46,24 @@ final class ProgramReader {
     private static Program.CellCode cell(Piece piece, List<SnippetParser.Parsed> parsed) {
         List<Snippet> snippets = new ArrayList<>();
         List<Problem> faults = new ArrayList<>();
+        Map<String, Integer> lost = new LinkedHashMap<>();
         for (SnippetParser.Parsed each : parsed) {
-            each.snippet().ifPresentOrElse(snippets::add, () -> faults.add(problem(piece, each.fault())));
+            if (each.snippet().isPresent()) {
+                snippets.add(each.snippet().get());
+            } else {
+                SnippetParser.Raw raw = each.raw();
+                faults.add(problem(
+                        piece, Brackets.fault(raw.codeOnly(), raw.span()).orElse(each.fault())));
+                lost.putAll(LostNames.in(raw.codeOnly(), raw.span()));
+            }
         }
-        return new Program.CellCode(piece, List.copyOf(snippets), List.copyOf(faults));
+        int comment = CodeText.unclosedComment(piece.text());
+        if (comment >= 0) {
+            faults.add(problem(piece, new SnippetParser.Fault(comment, Wording.OURS, "found '/*' without its '*/'")));
+            lost.putAll(
+                    LostNames.in(piece.text(), new Span(comment, piece.text().length())));
+        }
+        return new Program.CellCode(piece, List.copyOf(snippets), List.copyOf(faults), lost);
     }
 
     private List<Program.CheckCode> checks(List<SheetSource.CheckLine> lines) {
@@ -72,7 +87,11 @@ final class ProgramReader {
     }
 
     private static Problem problem(Piece piece, SnippetParser.Fault fault) {
-        return Wording.problem(piece, fault.offset(), fault.code(), fault.message(), List.of());
+        return Wording.problem(
+                piece,
+                fault.offset(),
+                new Compiler.Complaint(fault.offset(), fault.code(), fault.message()),
+                List.of());
     }
 
     /** The comment behind a snippet, on the line it ends on. */
@@ -81,9 +100,9 @@ final class ProgramReader {
         int lineEnd = piece.text().indexOf('\n', end);
         String rest = piece.text().substring(end, lineEnd < 0 ? piece.text().length() : lineEnd);
         // With a second snippet on the line the comment belongs to that one.
-        String code2 = code.substring(end, end + rest.length()).strip();
+        String codeBehind = code.substring(end, end + rest.length()).strip();
         int slashes = rest.indexOf("//");
-        if (slashes < 0 || !(code2.isEmpty() || code2.equals(";"))) {
+        if (slashes < 0 || !(codeBehind.isEmpty() || codeBehind.equals(";"))) {
             return Caption.NONE;
         }
         return Caption.read(rest.substring(slashes + 2), end + slashes + 2);

@@ -13,7 +13,7 @@ import java.util.regex.Pattern;
  * @param expression the bare expression, for {@link Kind#EXPRESSION}
  * @param calls where a line break tells calls apart
  * @param bodies bodies of the methods it declares, for {@link Kind#METHOD} and {@link Kind#TYPE}
- * @param name name of the method or type it declares, else empty
+ * @param name the method or type it declares, for {@link Kind#METHOD} and {@link Kind#TYPE}
  * @param caption text of the comment behind it
  */
 record Snippet(
@@ -24,7 +24,7 @@ record Snippet(
         Span expression,
         List<MappedText.Break> calls,
         List<Span> bodies,
-        String name,
+        Name name,
         Caption caption) {
 
     private static final Pattern STATIC = Pattern.compile("\\bstatic\\b");
@@ -43,20 +43,32 @@ record Snippet(
         EXPRESSION
     }
 
+    /** Stands for the type of a variable declared with {@code var}. */
+    static final String OPEN = "var";
+
     /**
      * A declared variable.
      *
      * @param name its name
      * @param at offset of its name in the piece
-     * @param type its type as written, {@code var} for none
-     * @param typeAt offset of the type in the piece
+     * @param type its type as the compiler prints it, {@link #OPEN} for none
+     * @param typeSpan where the type stands
      * @param initialiser its initialiser; empty span when there is none
      * @param arrayInitialiser whether that is a list in braces
      */
-    record Variable(String name, int at, String type, int typeAt, Span initialiser, boolean arrayInitialiser) {
+    record Variable(String name, int at, String type, Span typeSpan, Span initialiser, boolean arrayInitialiser) {
         boolean typeIsOpen() {
-            return type.equals("var");
+            return type.equals(OPEN);
         }
+
+        boolean hasInitialiser() {
+            return initialiser.end() > initialiser.start();
+        }
+    }
+
+    /** A member's name and its offset in the piece. */
+    record Name(String text, int at) {
+        static final Name NONE = new Name("", 0);
     }
 
     int cell() {

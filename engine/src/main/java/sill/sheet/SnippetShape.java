@@ -1,6 +1,7 @@
 package sill.sheet;
 
 import com.sun.source.tree.BinaryTree;
+import com.sun.source.tree.BlockTree;
 import com.sun.source.tree.ClassTree;
 import com.sun.source.tree.CompilationUnitTree;
 import com.sun.source.tree.LambdaExpressionTree;
@@ -9,6 +10,7 @@ import com.sun.source.tree.MethodInvocationTree;
 import com.sun.source.tree.MethodTree;
 import com.sun.source.tree.NewClassTree;
 import com.sun.source.tree.ReturnTree;
+import com.sun.source.tree.StatementTree;
 import com.sun.source.tree.Tree;
 import com.sun.source.util.SourcePositions;
 import com.sun.source.util.TreeScanner;
@@ -65,7 +67,17 @@ final class SnippetShape extends TreeScanner<Void, Boolean> {
 
     /** The argument of every visit: whether a {@code return} belongs to a method or lambda of the snippet. */
     void look(Tree tree) {
-        scan(tree, false);
+        // The snippet itself starts on a line of its own.
+        tree.accept(this, false);
+    }
+
+    @Override
+    public Void scan(Tree tree, Boolean inside) {
+        // The compiler numbers the lines of statements too; several may stand on one.
+        if (tree instanceof StatementTree && !(tree instanceof BlockTree)) {
+            calls.add(new MappedText.Break(start(tree), start(tree)));
+        }
+        return super.scan(tree, inside);
     }
 
     @Override

@@ -3,13 +3,15 @@ package sill.sheet;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.HashSet;
+import java.util.IdentityHashMap;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
-import java.util.regex.Pattern;
+import java.util.TreeMap;
+import sill.words.Quoted;
 import sill.worksheet.Problem;
 
 /**
@@ -22,29 +24,35 @@ public final class Translation {
     private final Map<String, String> types;
     private final Attribution attribution;
     private final Dependencies dependencies;
-    private final List<Problem> problems = new ArrayList<>();
+    private final Set<Problem> problems = new LinkedHashSet<>();
     private final Set<Integer> brokenCells = new HashSet<>();
-    private final Set<Place> brokenChecks = new HashSet<>();
     private final Set<Snippet> brokenImports = new HashSet<>();
+    private final TreeMap<Place, Place> checkPlaces = new TreeMap<>();
+    private final Set<Place> brokenChecks = new HashSet<>();
     private final Set<String> missingGivens = new HashSet<>();
-    private final Map<String, Pattern> unavailable = new LinkedHashMap<>();
+    private final Set<String> unavailable = new HashSet<>();
+    private final Map<Snippet, Set<String>> waits = new IdentityHashMap<>();
+    private final SnippetFinder snippets;
 
     private Translation(SheetSource source, Compiler compiler, Splitter splitter) {
         program = new ProgramReader(new SnippetParser(compiler), splitter).read(source);
         names = Names.of(program);
+        snippets = new SnippetFinder(program);
+        source.checks().forEach(check -> checkPlaces.put(check.place(), check.place()));
         source.givens().stream()
                 .filter(given -> given.type() == SheetSource.GivenType.MISSING)
                 .forEach(given -> missingGivens.add(given.name()));
-        findFaults();
+        program.cells().forEach(cell -> cell.faults().forEach(this::add));
+        program.checks().forEach(check -> check.faults().forEach(this::add));
+        names.problems().forEach(this::add);
         types = new TypeFinder(compiler).find(program);
         findUnavailable();
-        attribution = Attribution.of(new ClassText(program, types, brokenCells, brokenChecks), compiler);
+        attribution = Attribution.of(ClassText.whole(program, types, names.again()), compiler);
         attribution.types().forEach(types::putIfAbsent);
-        dependencies = new Dependencies(program, names, attribution.usages());
-        attribution
-                .errors()
-                .forEach(error -> complain(attribution.text(), error.offset(), error.code(), error.message()));
+        dependencies = new Dependencies(program, names, attribution.usages(), snippets);
+        attribution.errors().forEach(error -> complain(attribution.text(), error));
         OrderRules.problems(names, attribution.usages()).forEach(this::add);
+        findOpenTypes();
         captionFaults();
     }
 
@@ -58,9 +66,9 @@ public final class Translation {
      *
      * @return whether something was found to leave out
      */
-    public boolean leaveOut(TranslatedSheet.Code code, int offset, String message) {
+    public boolean leaveOut(TranslatedSheet.Code code, Compiler.Complaint complaint) {
         int before = brokenCells.size() + brokenChecks.size();
-        complain(code.mapped(), offset, "", message);
+        complain(code.mapped(), complaint);
         return brokenCells.size() + brokenChecks.size() > before;
     }
 
@@ -71,7 +79,10 @@ public final class Translation {
         List<TranslatedSheet.Step> steps = new ArrayList<>();
         for (Program.CellCode cell : program.cells()) {
             Map<String, Integer> needs = needs(cell.snippets());
-            if (isLost(needs, cells)) {
+            if (brokenCells.contains(cell.number())) {
+                // It would not run if all it waits on did.
+                needs = Map.of();
+            } else if (isLost(needs, cells)) {
                 cells.add(cell.number());
             }
             steps.add(step(cell, needs, !cells.contains(cell.number())));
@@ -85,7 +96,7 @@ public final class Translation {
             steps.add(step(check, needs, !checks.contains(place)));
         }
         steps.sort(Comparator.comparing(TranslatedSheet.Step::place));
-        ClassText text = new ClassText(program, types, cells, checks);
+        ClassText text = ClassText.running(program, types, cells, checks);
         List<String> imports = new ArrayList<>();
         // Each import that the evaluator is given costs it as much as some lines of Java.
         Program.IMPORTS.stream()
@@ -93,9 +104,11 @@ public final class Translation {
                 .forEach(name -> imports.add("import " + name + ";"));
         program.imports().stream()
                 .filter(snippet -> !brokenImports.contains(snippet))
-                .forEach(
-                        snippet -> imports.add(snippet.span().of(snippet.piece().text())));
-        problems.sort(Comparator.comparingInt(Problem::line).thenComparingInt(Problem::column));
+                .forEach(snippet -> imports.add(
+                        CodeText.oneLine(snippet.span().of(snippet.piece().text()))
+                                + (snippet.hasSemicolon() ? "" : ";")));
+        List<Problem> sorted = new ArrayList<>(problems);
+        sorted.sort(Comparator.comparingInt(Problem::line).thenComparingInt(Problem::column));
         return new TranslatedSheet(
                 ClassText.NAME,
                 ClassText.FIRST_LINE,
@@ -103,7 +116,7 @@ public final class Translation {
                 new TranslatedSheet.Code(text.declaration()),
                 steps,
                 missingGivens,
-                problems);
+                sorted);
     }
 
     private boolean isLost(Map<String, Integer> needs, Set<Integer> lostCells) {
@@ -111,62 +124,69 @@ public final class Translation {
                 .anyMatch(need -> lostCells.contains(need.getValue()) || missingGivens.contains(need.getKey()));
     }
 
-    private void findFaults() {
-        program.cells().forEach(cell -> cell.faults().forEach(this::add));
-        program.checks().forEach(check -> check.faults().forEach(this::add));
-        names.problems().forEach(this::add);
-    }
-
-    /** Names that later cells may mention and the class can't give: they wait, and what the compiler says of that is no news. */
+    /** Names that the class can't give: what uses them waits, and what the compiler says of that is no news. */
     private void findUnavailable() {
+        unavailable.addAll(missingGivens);
         for (Names.Declaration declaration : names.declarations().values()) {
-            Snippet snippet = declaration.snippet();
-            boolean noGiven = missingGivens.contains(declaration.name());
-            boolean lostMember = declaration.isMember() && brokenCells.contains(declaration.cell());
-            boolean open = declaration.kind() == Names.Kind.RESULT
-                    && !types.containsKey(declaration.name())
-                    && snippet.variables().stream()
-                            .anyMatch(v -> v.name().equals(declaration.name()) && v.typeIsOpen());
-            if (noGiven || lostMember || open) {
-                unavailable.put(
-                        declaration.name(),
-                        Pattern.compile("(?<![\\w$.])" + Pattern.quote(declaration.name()) + "\\b"));
+            if (declaration.kind() == Names.Kind.LOST) {
+                unavailable.add(declaration.name());
             }
         }
+        unavailable.addAll(program.openVariables().keySet());
+        unavailable.removeAll(types.keySet());
     }
 
-    private void complain(MappedText text, int offset, String code, String message) {
-        MappedText.Origin origin = text.origin(offset);
-        Snippet snippet = snippetAt(origin);
-        if (snippet != null && !missing(snippet).isEmpty()) {
+    private void complain(MappedText text, Compiler.Complaint complaint) {
+        MappedText.Origin origin = text.origin(complaint.offset());
+        Optional<Snippet> snippet = snippets.at(origin.piece(), origin.offset());
+        String unknown = Wording.unknownName(complaint);
+        if (snippet.isPresent() && unavailable.contains(unknown)) {
+            waits.computeIfAbsent(snippet.get(), each -> new LinkedHashSet<>()).add(unknown);
             return;
         }
-        if (snippet != null && snippet.kind() == Snippet.Kind.IMPORT) {
-            brokenImports.add(snippet);
-        }
-        add(Wording.problem(
-                origin.piece(),
-                origin.offset(),
-                code,
-                message,
-                names.declarations().keySet().stream()
-                        .filter(name -> !name.startsWith("$"))
-                        .toList()));
+        snippet.filter(each -> each.kind() == Snippet.Kind.IMPORT).ifPresent(brokenImports::add);
+        add(Wording.problem(origin.piece(), origin.offset(), complaint, knownWords(complaint)));
     }
 
+    /** What a misspelt name may have been meant to be, the worksheet's own names first. */
+    private List<String> knownWords(Compiler.Complaint complaint) {
+        if (Wording.unknownName(complaint).isEmpty()) {
+            return List.of();
+        }
+        boolean type = Wording.isAboutType(complaint);
+        List<String> words = new ArrayList<>();
+        for (Names.Declaration declaration : names.declarations().values()) {
+            if (!declaration.name().startsWith("$") && (!type || declaration.kind() == Names.Kind.TYPE)) {
+                words.add(declaration.name());
+            }
+        }
+        words.addAll(type ? attribution.known().types() : attribution.known().names());
+        return words;
+    }
+
+    /** Each check line is left out alone, a calculation cell as a whole. */
     private void add(Problem problem) {
-        Optional<Place> check = program.checks().stream()
-                .map(each -> each.line().place())
-                .filter(place -> place.line() == problem.line() && place.column() <= problem.column())
-                .reduce((earlier, later) -> later);
-        if (check.isPresent()) {
-            brokenChecks.add(check.get());
+        Place place = checkPlaces.floorKey(new Place(problem.line(), problem.column()));
+        if (place != null && place.line() == problem.line()) {
+            brokenChecks.add(place);
         } else {
             brokenCells.add(problem.cell());
         }
-        if (!problems.contains(problem)) {
-            problems.add(problem);
-        }
+        problems.add(problem);
+    }
+
+    /** Where nothing explains why a type could not be found, its author can still help. */
+    private void findOpenTypes() {
+        program.openVariables().forEach((name, field) -> {
+            Snippet snippet = field.snippet();
+            if (!types.containsKey(name) && !brokenCells.contains(snippet.cell()) && !waits.containsKey(snippet)) {
+                add(Wording.problem(
+                        snippet.piece(),
+                        field.typeSpan().start(),
+                        Compiler.Complaint.ours("found no type for " + Quoted.of(name)),
+                        List.of()));
+            }
+        });
     }
 
     private void captionFaults() {
@@ -179,50 +199,19 @@ public final class Translation {
                             place.line(),
                             place.column(),
                             cell.number(),
-                            cell.piece().where() + ", unit in brackets: " + caption.fault(),
+                            cell.piece().where() + ": " + Wording.within(caption.fault()),
                             caption.hint()));
                 }
             }
         }
     }
 
-    private Snippet snippetAt(MappedText.Origin origin) {
-        List<Snippet> candidates = new ArrayList<>();
-        program.cells().stream()
-                .filter(cell -> cell.piece() == origin.piece())
-                .forEach(cell -> candidates.addAll(cell.snippets()));
-        program.checks().stream()
-                .filter(check -> check.piece() == origin.piece())
-                .forEach(check -> check.snippet().ifPresent(candidates::add));
-        return candidates.stream()
-                .filter(snippet -> origin.offset() >= snippet.span().start()
-                        && origin.offset() <= snippet.span().end())
-                .findFirst()
-                .orElse(null);
-    }
-
-    /** The unavailable names of other snippets that a snippet mentions. */
-    private Set<String> missing(Snippet snippet) {
-        if (unavailable.isEmpty()) {
-            return Set.of();
-        }
-        String code = CodeText.codeOnly(snippet.span().of(snippet.piece().text()));
-        Set<String> missing = new LinkedHashSet<>();
-        unavailable.forEach((name, word) -> {
-            if (names.declarations().get(name).snippet() != snippet
-                    && word.matcher(code).find()) {
-                missing.add(name);
-            }
-        });
-        return missing;
-    }
-
     private Map<String, Integer> needs(List<Snippet> snippets) {
         Map<String, Integer> needs = new LinkedHashMap<>();
         for (Snippet snippet : snippets) {
             Set<String> needed = new LinkedHashSet<>(dependencies.needs(snippet));
-            needed.addAll(missing(snippet));
-            for (String name : needed) {
+            needed.addAll(waits.getOrDefault(snippet, Set.of()));
+            for (String name : dependencies.inOrder(needed)) {
                 int cell = names.declarations().get(name).cell();
                 if (cell != snippet.cell()) {
                     needs.put(name, cell);
@@ -275,8 +264,8 @@ public final class Translation {
                 field.field(),
                 field.name(),
                 index,
-                snippet.piece().place(field.at()).line(),
-                formula.of(snippet.piece().text()).strip().replaceAll("\\s+", " "),
+                snippet.piece().place(field.typeSpan().start()).line(),
+                CodeText.oneLine(formula.of(snippet.piece().text())),
                 TypeNames.withoutPackages(type),
                 caption.unit()
                         .map(unit -> unit.coherent().symbol())

@@ -16,6 +16,7 @@ import com.sun.source.tree.ParenthesizedTree;
 import com.sun.source.tree.Tree;
 import com.sun.source.tree.UnaryTree;
 import com.sun.source.util.SourcePositions;
+import com.sun.source.util.TreePath;
 import com.sun.source.util.TreePathScanner;
 import com.sun.source.util.Trees;
 import java.util.ArrayList;
@@ -29,6 +30,9 @@ import javax.lang.model.element.ElementKind;
 import javax.lang.model.element.Modifier;
 import javax.lang.model.element.PackageElement;
 import javax.lang.model.element.TypeElement;
+import javax.lang.model.type.DeclaredType;
+import javax.lang.model.type.TypeKind;
+import javax.lang.model.type.TypeMirror;
 
 /** Collects where the attributed class uses the sheet's own names. The scan's argument: whether the code may run later. */
 final class UsageScanner extends TreePathScanner<Void, Boolean> {
@@ -67,6 +71,9 @@ final class UsageScanner extends TreePathScanner<Void, Boolean> {
             // A helper's field is written to by the class itself, not by the author.
             MappedText.Origin origin = text.origin((int) positions.getStartPosition(unit, identifier));
             Usage.How how = targets.getOrDefault(identifier, Usage.How.READ);
+            if (how == Usage.How.ALTERED && !canBeAltered(element.asType())) {
+                how = Usage.How.READ;
+            }
             usages.add(new Usage(
                     element.getSimpleName().toString(), kind(element), how, origin.piece(), origin.offset(), deferred));
         } else if (owner instanceof PackageElement from) {
@@ -112,7 +119,11 @@ final class UsageScanner extends TreePathScanner<Void, Boolean> {
     public Void visitExpressionStatement(ExpressionStatementTree statement, Boolean deferred) {
         if (statement.getExpression() instanceof MethodInvocationTree call) {
             mayAlter(call.getMethodSelect());
-            call.getArguments().forEach(this::mayAlter);
+            // A call that gives a value is made for it, or, as list.add(x), for what it is called on.
+            TypeMirror value = trees.getTypeMirror(new TreePath(getCurrentPath(), call));
+            if (value != null && value.getKind() == TypeKind.VOID) {
+                call.getArguments().forEach(this::mayAlter);
+            }
         }
         return super.visitExpressionStatement(statement, deferred);
     }
@@ -138,7 +149,7 @@ final class UsageScanner extends TreePathScanner<Void, Boolean> {
         ExpressionTree inner = bare(variable);
         if (inner instanceof IdentifierTree) {
             targets.put(inner, Usage.How.ASSIGNED);
-        } else if (inner instanceof ArrayAccessTree) {
+        } else {
             mayAlter(inner);
         }
     }
@@ -158,6 +169,19 @@ final class UsageScanner extends TreePathScanner<Void, Boolean> {
             }
         }
         targets.putIfAbsent(inner, Usage.How.ALTERED);
+    }
+
+    /** Numbers, texts, records and enum constants stay what they are, whatever they are handed to. */
+    private static boolean canBeAltered(TypeMirror type) {
+        if (!(type instanceof DeclaredType declared)) {
+            return !type.getKind().isPrimitive();
+        }
+        TypeElement element = (TypeElement) declared.asElement();
+        String name = element.getQualifiedName().toString();
+        return element.getKind() != ElementKind.RECORD
+                && element.getKind() != ElementKind.ENUM
+                && !name.startsWith("java.math.")
+                && !(name.startsWith("java.lang.") && !name.startsWith("java.lang.StringBu"));
     }
 
     private static ExpressionTree bare(ExpressionTree expression) {

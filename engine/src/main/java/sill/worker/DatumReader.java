@@ -1,20 +1,19 @@
 package sill.worker;
 
 import java.lang.reflect.Array;
+import java.lang.reflect.InvocationTargetException;
 import java.lang.reflect.Method;
 import java.lang.reflect.RecordComponent;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.Collection;
 import java.util.LinkedHashMap;
-import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.Set;
-import java.util.SortedMap;
-import java.util.SortedSet;
-import java.util.TreeMap;
+import java.util.OptionalDouble;
+import java.util.OptionalInt;
+import java.util.OptionalLong;
 import sill.stdlib.Plot;
 import sill.stdlib.Table;
 import sill.values.Datum;
@@ -35,7 +34,12 @@ final class DatumReader {
      * @param type its declared type, said when the value has no text of its own
      */
     static Datum read(Object value, String type) {
-        return new DatumReader().datum(value, type, 0);
+        try {
+            return new DatumReader().datum(value, type, 0);
+        } catch (RuntimeException | StackOverflowError e) {
+            // A worksheet's own collection may throw where the JDK's do not.
+            return new Datum.Opaque(unreadable(type, e));
+        }
     }
 
     private Datum datum(Object value, String type, int depth) {
@@ -66,6 +70,17 @@ final class DatumReader {
     private Datum structure(Object value, String type, int depth) {
         if (value instanceof Optional<?> optional) {
             return datum(optional.orElse(null), "Object", depth + 1);
+        } else if (value instanceof OptionalDouble optional) {
+            return optional.isEmpty() ? new Datum.Absent() : new Datum.Real(optional.getAsDouble());
+        } else if (value instanceof OptionalInt optional) {
+            return optional.isEmpty() ? new Datum.Absent() : new Datum.Whole(String.valueOf(optional.getAsInt()));
+        } else if (value instanceof OptionalLong optional) {
+            return optional.isEmpty() ? new Datum.Absent() : new Datum.Whole(String.valueOf(optional.getAsLong()));
+        } else if (value instanceof Map.Entry<?, ?> entry) {
+            Map<String, Datum> parts = new LinkedHashMap<>();
+            parts.put("key", datum(entry.getKey(), "Object", depth + 1));
+            parts.put("value", datum(entry.getValue(), "Object", depth + 1));
+            return new Datum.Fields(parts);
         } else if (value.getClass().isArray()) {
             return array(value, depth);
         } else if (value instanceof Map<?, ?> map) {
@@ -91,29 +106,22 @@ final class DatumReader {
 
     private Datum collection(Collection<?> collection, int depth) {
         List<Datum> read = new ArrayList<>();
-        for (Object item : collection) {
+        for (Object item : StableOrder.of(collection)) {
             if (items++ >= MOST_ITEMS) {
                 break;
             }
             read.add(datum(item, "Object", depth + 1));
         }
-        boolean ordered =
-                !(collection instanceof Set) || collection instanceof SortedSet || collection instanceof LinkedHashSet;
-        if (!ordered) {
-            // A hash set's order is an accident that a re-run need not repeat.
-            read.sort(java.util.Comparator.comparing(Datum::toString));
-        }
         return new Datum.Items(read, collection.size());
     }
 
     private Datum map(Map<?, ?> map, int depth) {
-        boolean ordered = map instanceof SortedMap || map instanceof LinkedHashMap;
-        Map<String, Datum> read = ordered ? new LinkedHashMap<>() : new TreeMap<>();
-        for (Map.Entry<?, ?> entry : map.entrySet()) {
+        Map<String, Datum> read = new LinkedHashMap<>();
+        for (Object key : StableOrder.of(map)) {
             if (items++ >= MOST_ITEMS) {
                 break;
             }
-            read.put(ownText(entry.getKey(), "key"), datum(entry.getValue(), "Object", depth + 1));
+            read.put(ownText(key, "key"), datum(map.get(key), "Object", depth + 1));
         }
         return new Datum.Fields(read);
     }
@@ -128,14 +136,15 @@ final class DatumReader {
     private Datum components(Record value, int depth) {
         Map<String, Datum> read = new LinkedHashMap<>();
         for (RecordComponent component : value.getClass().getRecordComponents()) {
+            String type = component.getType().getSimpleName();
             try {
                 Method accessor = component.getAccessor();
                 accessor.setAccessible(true);
-                read.put(
-                        component.getName(),
-                        datum(accessor.invoke(value), component.getType().getSimpleName(), depth + 1));
-            } catch (ReflectiveOperationException | RuntimeException e) {
-                read.put(component.getName(), new Datum.Opaque("not readable"));
+                read.put(component.getName(), datum(accessor.invoke(value), type, depth + 1));
+            } catch (InvocationTargetException e) {
+                read.put(component.getName(), new Datum.Opaque(unreadable(type, e.getCause())));
+            } catch (ReflectiveOperationException e) {
+                read.put(component.getName(), new Datum.Opaque(unreadable(type, e)));
             }
         }
         return new Datum.Fields(read);
@@ -149,9 +158,13 @@ final class DatumReader {
         try {
             boolean inherited = value.getClass().getMethod("toString").getDeclaringClass() == Object.class;
             return inherited ? type : cut(String.valueOf(value.toString()));
-        } catch (ReflectiveOperationException | RuntimeException e) {
-            return type;
+        } catch (ReflectiveOperationException | RuntimeException | StackOverflowError | AssertionError e) {
+            return unreadable(type, e);
         }
+    }
+
+    private static String unreadable(String type, Throwable thrown) {
+        return type + ", which can't be shown: " + thrown.getClass().getSimpleName();
     }
 
     private static String cut(String text) {

@@ -29,11 +29,8 @@ final class Evaluator implements AutoCloseable {
                 .build();
     }
 
-    /** An error in the class's text, at an offset of it. */
-    record Rejection(int offset, String message) {}
-
     /** The evaluated class's cells can be called, or the rejections say why not. */
-    record Evaluation(Class<?> sheet, List<Rejection> rejections) {}
+    record Evaluation(Class<?> sheet, List<Compiler.Complaint> rejections) {}
 
     Splitter splitter() {
         return new PromptSplitter(shell.sourceCodeAnalysis());
@@ -43,13 +40,13 @@ final class Evaluator implements AutoCloseable {
     Evaluation evaluate(TranslatedSheet sheet) throws ClassNotFoundException {
         sheet.imports().forEach(shell::eval);
         List<SnippetEvent> events = shell.eval(sheet.code().text());
-        List<Rejection> rejections = new ArrayList<>();
+        List<Compiler.Complaint> rejections = new ArrayList<>();
         for (SnippetEvent event : events) {
             if (event.status() != Snippet.Status.VALID) {
                 shell.diagnostics(event.snippet())
                         .filter(Diag::isError)
-                        .forEach(d ->
-                                rejections.add(new Rejection((int) d.getPosition(), d.getMessage(Locale.ENGLISH))));
+                        .forEach(d -> rejections.add(new Compiler.Complaint(
+                                (int) d.getPosition(), d.getCode(), d.getMessage(Locale.ENGLISH))));
                 shell.drop(event.snippet());
             }
         }

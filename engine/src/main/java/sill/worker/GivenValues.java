@@ -7,6 +7,7 @@ import java.util.Map;
 import sill.sheet.SheetSource;
 import sill.sheet.SheetSource.GivenField;
 import sill.sheet.SheetSource.GivenType;
+import sill.words.Quoted;
 import sill.worksheet.Problem;
 
 /**
@@ -33,8 +34,8 @@ record GivenValues(SheetSource source, Map<String, Object> values, List<Problem>
                         given.line(),
                         1,
                         given.cell(),
-                        "data file of \"" + given.name() + "\" can't be read as a table: " + e.getMessage(),
-                        "give a comma separated text with a header line, numbers with a decimal point"));
+                        "Data file of " + Quoted.of(given.name()) + ": " + e.getMessage(),
+                        "Give comma separated text in UTF-8, a header line first, numbers with a decimal point."));
             }
         }
         SheetSource source =

@@ -62,10 +62,12 @@ record Job(SheetSource source, Map<String, GivenValue> values, Set<Place> leftOu
                 in.list(i -> new SheetSource.CodeCell(i.number(), i.text(), i.number(), i.text()));
         List<SheetSource.CheckLine> checks =
                 in.list(i -> new SheetSource.CheckLine(i.number(), i.number(), i.number(), i.text(), i.flag()));
-        return new Job(
+        Job job = new Job(
                 new SheetSource(givens, cells, checks),
                 in.map(Job::value),
                 Set.copyOf(in.list(i -> new Place(i.number(), i.number()))));
+        in.end();
+        return job;
     }
 
     private static void value(WireOut out, GivenValue value) {

@@ -11,14 +11,21 @@ import sill.sheet.Span;
 import sill.sheet.Splitter;
 
 /**
- * Splits a cell as the JDK's prompt splits what is typed into it: line by line, a snippet ends as soon as it can. Lines that
- * are one plain statement are told without asking the prompt's analysis, which takes milliseconds a line.
+ * Splits a cell as the JDK's prompt splits what is typed into it: line by line, a snippet ends as soon as it can. Other than
+ * the prompt it sees the next line before it decides: one that starts with what can't start a snippet ({@code else}, {@code
+ * .map(…)}, {@code * 2}) goes on, and so does an indented one that starts with a sign, where the prompt would quietly take
+ * half of a sum. Lines that are one plain statement are told without asking the prompt's analysis, which takes milliseconds.
  */
 final class PromptSplitter implements Splitter {
     /** Words that start what may go on in the next line though it ends in a semicolon. */
     private static final Pattern MAY_GO_ON =
             Pattern.compile("(if|else|for|while|do|try|switch|case|default|catch|finally|class|record|enum|interface"
                     + "|abstract|sealed|non-sealed|synchronized|@interface)\\b.*");
+
+    private static final Pattern GOES_ON =
+            Pattern.compile("\\.(?!\\d)|[?:*/%=&|^,]|!=|->|[<>]=?\\s|>>|(?:else|catch|finally|instanceof)\\b");
+
+    private static final Pattern SIGN = Pattern.compile("[+-](?![+-])");
 
     private final SourceCodeAnalysis analysis;
 
@@ -53,15 +60,32 @@ final class PromptSplitter implements Splitter {
             CompletionInfo info = analysis.analyzeCompletion(typed);
             boolean complete = info.completeness() != Completeness.DEFINITELY_INCOMPLETE
                     && info.completeness() != Completeness.CONSIDERED_INCOMPLETE;
-            if (complete || lineEnd >= code.length()) {
-                int taken = complete && info.remaining() != null
-                        ? typed.length() - info.remaining().length()
-                        : typed.length();
-                int end = CodeText.endOfCode(code, start, start + Math.max(1, taken));
-                return Math.max(end, start + 1);
+            int taken = complete && info.remaining() != null
+                    ? typed.length() - info.remaining().length()
+                    : typed.length();
+            int end = Math.max(start + 1, CodeText.endOfCode(code, start, start + Math.max(1, taken)));
+            int next = skipBlank(code, end);
+            if (lineEnd >= code.length() || (complete && !goesOn(code, start, end, next))) {
+                return end;
             }
-            lineEnd = lineEnd(code, lineEnd + 1);
+            lineEnd = lineEnd(code, Math.max(lineEnd + 1, next));
         }
+    }
+
+    private static boolean goesOn(String code, int start, int end, int next) {
+        if (next >= code.length() || code.charAt(end - 1) == ';') {
+            // Behind a semicolon only an "else" can belong to what stands before it.
+            return code.startsWith("else", next)
+                    && GOES_ON.matcher(code).region(next, code.length()).lookingAt();
+        }
+        return GOES_ON.matcher(code).region(next, code.length()).lookingAt()
+                || (code.charAt(end - 1) != '}'
+                        && SIGN.matcher(code).region(next, code.length()).lookingAt()
+                        && indent(code, next) > indent(code, start));
+    }
+
+    private static int indent(String code, int at) {
+        return at - (code.lastIndexOf('\n', at - 1) + 1);
     }
 
     private static boolean isPlainStatement(String line) {

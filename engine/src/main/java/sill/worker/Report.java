@@ -66,6 +66,12 @@ sealed interface Report {
     /** The message that the bytes are. */
     static Report of(byte[] message) {
         WireIn in = new WireIn(message);
+        Report report = read(in);
+        in.end();
+        return report;
+    }
+
+    private static Report read(WireIn in) {
         int kind = in.number();
         return switch (kind) {
             case 0 -> new Translated(in.list(ValueWire::problem));

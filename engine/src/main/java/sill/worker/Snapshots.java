@@ -1,17 +1,22 @@
 package sill.worker;
 
+import java.security.MessageDigest;
+import java.security.NoSuchAlgorithmException;
 import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.Collection;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import sill.values.Datum;
+import sill.words.Quoted;
 import sill.worksheet.Problem;
 
 /** What values were when their cells ended, to find those that a later cell changed from inside. */
 final class Snapshots {
     private final Map<String, Kept> kept = new LinkedHashMap<>();
 
-    private record Kept(int cell, int line, Datum then) {}
+    private record Kept(int cell, int line, byte[] then) {}
 
     /** Keeps a settled value, unless its kind can't change from inside. */
     void keep(String name, int cell, int line, Object value, Datum then) {
@@ -21,7 +26,7 @@ final class Snapshots {
                 || then instanceof Datum.Absent
                 || value instanceof String;
         if (!fixed) {
-            kept.put(name, new Kept(cell, line, then));
+            kept.put(name, new Kept(cell, line, digest(then)));
         }
     }
 
@@ -31,17 +36,34 @@ final class Snapshots {
         for (Map.Entry<String, Kept> entry : kept.entrySet()) {
             Kept before = entry.getValue();
             Datum now = DatumReader.read(code.getField(entry.getKey()).get(null), "");
-            if (!now.equals(before.then()) && !(now instanceof Datum.Opaque)) {
+            if (!Arrays.equals(digest(now), before.then()) && !(now instanceof Datum.Opaque)) {
                 problems.add(Problem.error(
                         before.line(),
                         1,
                         before.cell(),
-                        "\"" + entry.getKey() + "\" was changed from inside after cell " + before.cell()
-                                + " had settled it",
-                        "change a copy: \"" + entry.getKey() + ".clone()\" for an array, \"new ArrayList<>("
-                                + entry.getKey() + ")\" for a list"));
+                        "Found " + Quoted.of(entry.getKey()) + " altered from inside, expected it to stay as cell "
+                                + before.cell() + " settled it",
+                        mend(entry.getKey(), code.getField(entry.getKey()).getType())));
             }
         }
         return problems;
+    }
+
+    private static String mend(String name, Class<?> type) {
+        if (type.isArray()) {
+            return "Alter a copy: '" + name + ".clone()'.";
+        } else if (Collection.class.isAssignableFrom(type)) {
+            return "Alter a copy: 'new ArrayList<>(" + name + ")'.";
+        }
+        return Map.class.isAssignableFrom(type) ? "Alter a copy: 'new TreeMap<>(" + name + ")'." : "Alter a copy.";
+    }
+
+    /** Of one length for any value, since a run may settle more than it could keep twice. */
+    private static byte[] digest(Datum datum) {
+        try {
+            return MessageDigest.getInstance("SHA-256").digest(ValueWire.bytes(datum));
+        } catch (NoSuchAlgorithmException e) {
+            throw new IllegalStateException(e);
+        }
     }
 }

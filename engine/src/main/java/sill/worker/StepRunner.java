@@ -99,8 +99,8 @@ final class StepRunner {
         Object value;
         try {
             value = code.getMethod(method).invoke(null);
-        } catch (InvocationTargetException | ExceptionInInitializerError e) {
-            Throwable thrown = e.getCause() == null ? e : e.getCause();
+        } catch (InvocationTargetException e) {
+            Throwable thrown = cause(e);
             Problem problem = Failure.problem(sheet, step, thrown, firstLine);
             lose(step, CellState.PROBLEM, "ended in " + thrown.getClass().getSimpleName(), List.of(), List.of(problem));
             return;
@@ -118,6 +118,12 @@ final class StepRunner {
             reports.accept(new Report.CellEnded(
                     new CellRun(step.cell(), CellState.DONE, "", List.of(), output.take()), results, List.of()));
         }
+    }
+
+    /** What the author's own text threw; a type that can't be set up wraps it once more. */
+    private static Throwable cause(Throwable wrapper) {
+        Throwable thrown = wrapper.getCause() == null ? wrapper : wrapper.getCause();
+        return thrown instanceof ExceptionInInitializerError && thrown.getCause() != null ? thrown.getCause() : thrown;
     }
 
     private Result result(TranslatedSheet.Step step, TranslatedSheet.ResultField field)

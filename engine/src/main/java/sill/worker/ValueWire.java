@@ -1,5 +1,6 @@
 package sill.worker;
 
+import java.util.List;
 import java.util.Optional;
 import sill.stdlib.Plot;
 import sill.values.CellRun;
@@ -73,6 +74,13 @@ final class ValueWire {
         return new CheckValue(in.number(), datum(in, 0), in.text(), in.texts(), in.texts());
     }
 
+    /** A value's bytes: equal for equal values. */
+    static byte[] bytes(Datum datum) {
+        WireOut out = new WireOut();
+        datum(out, datum);
+        return out.bytes();
+    }
+
     private static void datum(WireOut out, Datum datum) {
         if (datum instanceof Datum.Real real) {
             out.number(0).real(real.value());
@@ -105,7 +113,11 @@ final class ValueWire {
             case 3 -> new Datum.Text(in.text());
             case 4 -> {
                 int size = in.number();
-                yield new Datum.Items(in.list(item -> datum(item, depth + 1)), size);
+                List<Datum> items = in.list(item -> datum(item, depth + 1));
+                if (items.size() > size) {
+                    throw new WireIn.BadMessage("a list of " + size + " values holds " + items.size());
+                }
+                yield new Datum.Items(items, size);
             }
             case 5 -> new Datum.Fields(in.map(field -> datum(field, depth + 1)));
             case 6 -> new Datum.Opaque(in.text());

@@ -73,7 +73,8 @@ final class WireIn {
 
     <T> List<T> list(Function<WireIn, T> each) {
         int count = count(Integer.BYTES);
-        List<T> values = new ArrayList<>(count);
+        // The claimed count is within the message, yet lists in lists could claim it again and again.
+        List<T> values = new ArrayList<>(Math.min(count, 16));
         for (int i = 0; i < count; i++) {
             values.add(each.apply(this));
         }
@@ -95,6 +96,13 @@ final class WireIn {
             throw new BadMessage("message names constant " + ordinal + " of " + constants.length);
         }
         return constants[ordinal];
+    }
+
+    /** Tells that the message has been read to its end. */
+    void end() {
+        if (bytes.hasRemaining()) {
+            throw new BadMessage("message goes on for " + bytes.remaining() + " bytes behind its end");
+        }
     }
 
     /** A count of things that take at least {@code size} bytes each. */

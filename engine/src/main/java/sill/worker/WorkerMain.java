@@ -6,15 +6,11 @@ import java.io.File;
 import java.io.FileDescriptor;
 import java.io.FileOutputStream;
 import java.io.IOException;
+import java.io.InputStream;
 import java.nio.file.Path;
-import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import sill.sheet.Compiler;
-import sill.sheet.Place;
-import sill.sheet.TranslatedSheet;
-import sill.sheet.Translation;
-import sill.worksheet.Problem;
 
 /**
  * The worker process. It reads one {@link Job} from its standard input, and writes {@link Report}s to what was its standard
@@ -22,13 +18,11 @@ import sill.worksheet.Problem;
  */
 public final class WorkerMain {
     private final DataOutputStream reports;
-    private final CapturedOutput output;
     private final Compiler compiler;
     private final Evaluator evaluator;
 
-    private WorkerMain(DataOutputStream reports, CapturedOutput output, List<Path> classPath) {
+    private WorkerMain(DataOutputStream reports, List<Path> classPath) {
         this.reports = reports;
-        this.output = output;
         this.compiler = new Compiler(classPath);
         this.evaluator = new Evaluator(compiler);
     }
@@ -47,11 +41,13 @@ public final class WorkerMain {
         List<Path> classPath = Arrays.stream(arguments[0].split(File.pathSeparator))
                 .map(Path::of)
                 .toList();
-        WorkerMain worker = new WorkerMain(reports, output, classPath);
+        WorkerMain worker = new WorkerMain(reports, classPath);
         DataInputStream in = new DataInputStream(System.in);
         byte[] job = in.readNBytes(in.readInt());
+        // What worksheet code reads has an end.
+        System.setIn(InputStream.nullInputStream());
         try {
-            worker.run(Job.of(job));
+            new JobRun(worker.compiler, output, worker::report).run(Job.of(job), worker.evaluator);
         } catch (ReflectiveOperationException | RuntimeException | StackOverflowError e) {
             worker.report(new Report.Failed(e + " at " + Arrays.toString(Arrays.copyOf(e.getStackTrace(), 5))));
         }
@@ -70,29 +66,5 @@ public final class WorkerMain {
             // The parent is gone; there is nobody to work for.
             Runtime.getRuntime().halt(1);
         }
-    }
-
-    private void run(Job job) throws ReflectiveOperationException {
-        report(new Report.Begun(0, new Place(1, 1)));
-        GivenValues givens = GivenValues.of(job);
-        Translation translation = Translation.of(givens.source(), compiler, evaluator.splitter());
-        TranslatedSheet sheet = translation.sheet();
-        Evaluator.Evaluation evaluation = evaluator.evaluate(sheet);
-        while (evaluation.sheet() == null) {
-            boolean less = false;
-            for (Evaluator.Rejection rejection : evaluation.rejections()) {
-                less |= translation.leaveOut(sheet.code(), rejection.offset(), rejection.message());
-            }
-            if (!less) {
-                throw new IllegalStateException("the sheet's class was refused: " + evaluation.rejections());
-            }
-            sheet = translation.sheet();
-            evaluation = evaluator.evaluate(sheet);
-        }
-        List<Problem> problems = new ArrayList<>(givens.problems());
-        problems.addAll(sheet.problems());
-        report(new Report.Translated(problems));
-        givens.set(evaluation.sheet());
-        new StepRunner(sheet, evaluation.sheet(), job.leftOut(), output, this::report).run(givens.present());
     }
 }

@@ -31,13 +31,13 @@ final class WorkerProcess implements AutoCloseable {
 
     private final Process process;
     private final Path folder;
-    private final BlockingQueue<Event> events = new LinkedBlockingQueue<>(1024);
+    private final BlockingQueue<Heard> events = new LinkedBlockingQueue<>(1024);
 
-    /** A report, or the end of the worker. */
-    private record Event(Optional<Report> report, String end) {}
+    /** How a worker ended, and what its author may do about it. */
+    record End(String words, String hint) {}
 
-    /** A report, the worker's end with the reason, or neither within the time. */
-    record Heard(Optional<Report> report, Optional<String> end) {
+    /** A report, the worker's end, or neither within the time. */
+    record Heard(Optional<Report> report, Optional<End> end) {
         boolean timedOut() {
             return report.isEmpty() && end.isEmpty();
         }
@@ -105,11 +105,8 @@ final class WorkerProcess implements AutoCloseable {
 
     /** Waits for the next report. */
     Heard next(Duration atMost) throws InterruptedException {
-        Event event = events.poll(atMost.toMillis(), TimeUnit.MILLISECONDS);
-        if (event == null) {
-            return new Heard(Optional.empty(), Optional.empty());
-        }
-        return new Heard(event.report(), event.report().isPresent() ? Optional.empty() : Optional.of(event.end()));
+        Heard heard = events.poll(atMost.toMillis(), TimeUnit.MILLISECONDS);
+        return heard == null ? new Heard(Optional.empty(), Optional.empty()) : heard;
     }
 
     private void listen() {
@@ -123,7 +120,7 @@ final class WorkerProcess implements AutoCloseable {
     }
 
     private void readReports(Thread errors, byte[][] lastErrors) {
-        String end = "";
+        Optional<End> end = Optional.empty();
         try {
             DataInputStream in =
                     new DataInputStream(new java.io.BufferedInputStream(process.getInputStream(), 1 << 16));
@@ -136,12 +133,13 @@ final class WorkerProcess implements AutoCloseable {
                 if (message.length < length) {
                     break;
                 }
-                events.put(new Event(Optional.of(Report.of(message)), ""));
+                events.put(new Heard(Optional.of(Report.of(message)), Optional.empty()));
             }
         } catch (IOException e) {
             // The stream ends when the process does; its exit status tells more.
         } catch (WireIn.BadMessage e) {
-            end = "it sent what is no report (" + e.getMessage() + ")";
+            end = Optional.of(new End(
+                    "its worker sent what is no report: " + e.getMessage(), "Leave the process's own output alone."));
             process.destroyForcibly();
         } catch (InterruptedException e) {
             Thread.currentThread().interrupt();
@@ -149,18 +147,22 @@ final class WorkerProcess implements AutoCloseable {
         try {
             errors.join(1000);
             int exit = process.waitFor();
-            events.put(new Event(Optional.empty(), end.isEmpty() ? endWords(exit, lastErrors[0]) : end));
+            events.put(new Heard(Optional.empty(), end.or(() -> Optional.of(end(exit, lastErrors[0])))));
         } catch (InterruptedException e) {
             Thread.currentThread().interrupt();
         }
     }
 
-    private static String endWords(int exit, byte[] lastErrors) {
-        String said = new String(lastErrors, StandardCharsets.UTF_8).strip();
-        if (said.contains("OutOfMemoryError")) {
-            return "it ran out of memory";
+    private static End end(int exit, byte[] lastErrors) {
+        if (new String(lastErrors, StandardCharsets.UTF_8).contains("OutOfMemoryError")) {
+            return new End("it ran out of memory", "Keep fewer values, or allow more with --memory.");
         }
-        return "its process ended with status " + exit;
+        boolean own = exit < 128;
+        return new End(
+                "its worker ended with status " + exit,
+                own
+                        ? "Leave out what ends the process, such as System.exit."
+                        : "Something outside ended the process. Run again.");
     }
 
     private static byte[] drain(InputStream errors) {

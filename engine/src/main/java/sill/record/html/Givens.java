@@ -27,8 +27,9 @@ final class Givens {
             page.open("th", "scope", "row", "class", "name")
                     .leaf("var", given.name())
                     .close();
-            page.open("td", "class", "number", "data-label", "Value");
-            value(page, given);
+            String brief = given.shown().isEmpty() ? Values.brief(given.value(), given.unit()) : given.shown();
+            page.open("td", "class", "number" + Tables.length(brief), "data-label", "Value");
+            value(page, given, brief);
             page.close();
             Tables.cell(page, "Limits", "number", given.shownLimits());
             Tables.cell(page, "Distribution", "word", given.distribution());
@@ -38,8 +39,7 @@ final class Givens {
         page.close().close().line();
     }
 
-    private static void value(Markup page, GivenEntry given) {
-        String brief = given.shown().isEmpty() ? Values.brief(given.value(), given.unit()) : given.shown();
+    private static void value(Markup page, GivenEntry given, String brief) {
         if (given.value() instanceof Datum.Items items && items.items().size() > Values.SHORT_LIST) {
             page.open("details").leaf("summary", brief);
             Values.full(page, given.value(), given.unit());

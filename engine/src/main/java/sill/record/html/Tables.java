@@ -7,7 +7,7 @@ final class Tables {
     private Tables() {}
 
     /** A text up to this length stays on one line, so that a number is not parted from its unit. */
-    private static final int SHORT = 26;
+    private static final int SHORT = 32;
 
     /** The head row. */
     static void head(Markup page, String... columns) {
