@@ -28,7 +28,10 @@ public final class Main {
     public static void main(String[] arguments) {
         PrintStream out = utf8(FileDescriptor.out);
         PrintStream err = utf8(FileDescriptor.err);
-        int code = run(new Terminal(out, err, System.console() != null), out, err, arguments);
+        int code;
+        try (EarlyWorker early = EarlyWorker.forCommand(arguments)) {
+            code = run(new Terminal(out, err, System.console() != null), early, out, err, arguments);
+        }
         out.flush();
         err.flush();
         System.exit(code);
@@ -40,11 +43,12 @@ public final class Main {
      * @return its exit code
      */
     public static int run(PrintStream out, PrintStream err, String... arguments) {
-        return run(new Terminal(out, err, false), out, err, arguments);
+        return run(new Terminal(out, err, false), EarlyWorker.none(), out, err, arguments);
     }
 
-    private static int run(Terminal terminal, PrintStream out, PrintStream err, String... arguments) {
-        CommandLine line = new CommandLine(new Main(), new Factory(terminal));
+    private static int run(
+            Terminal terminal, EarlyWorker early, PrintStream out, PrintStream err, String... arguments) {
+        CommandLine line = new CommandLine(new Main(), new Factory(terminal, early));
         line.setOut(new PrintWriter(out, true));
         line.setErr(new PrintWriter(err, true));
         line.setUsageHelpWidth(110);
@@ -72,12 +76,12 @@ public final class Main {
         return new PrintStream(new FileOutputStream(descriptor), false, StandardCharsets.UTF_8);
     }
 
-    /** Gives commands their terminal. */
-    private record Factory(Terminal terminal) implements CommandLine.IFactory {
+    /** Gives commands what they work with. */
+    private record Factory(Terminal terminal, EarlyWorker early) implements CommandLine.IFactory {
         @Override
         public <K> K create(Class<K> type) throws Exception {
             if (type == RunCommand.class) {
-                return type.cast(new RunCommand(terminal));
+                return type.cast(new RunCommand(terminal, early));
             }
             if (type == NewCommand.class) {
                 return type.cast(new NewCommand(terminal));

@@ -10,6 +10,7 @@ import java.util.HexFormat;
 import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.Callable;
+import java.util.function.Function;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
@@ -19,6 +20,7 @@ import sill.record.DesignRecord;
 import sill.record.DesignRecord.DataFile;
 import sill.record.DesignRecord.Made;
 import sill.record.DesignRecord.Source;
+import sill.record.html.RecordPage;
 import sill.values.RunResult;
 import sill.worker.SheetRun;
 import sill.worksheet.DataFiles;
@@ -31,6 +33,7 @@ import sill.worksheet.Worksheet;
         description = "Runs worksheets and writes a record of each, as a page and as JSON.")
 final class RunCommand implements Callable<Integer> {
     private final Terminal terminal;
+    private final EarlyWorker early;
 
     @Parameters(arity = "1..*", paramLabel = "SHEET", description = "worksheet files")
     private List<Path> sheets;
@@ -47,8 +50,9 @@ final class RunCommand implements Callable<Integer> {
     @Mixin
     private LimitOptions limits;
 
-    RunCommand(Terminal terminal) {
+    RunCommand(Terminal terminal, EarlyWorker early) {
         this.terminal = terminal;
+        this.early = early;
     }
 
     @Override
@@ -61,8 +65,7 @@ final class RunCommand implements Callable<Integer> {
     }
 
     private int run(Path path) throws InterruptedException {
-        // The worker gets ready while this process reads.
-        try (SheetRun run = SheetRun.start(limits.limits())) {
+        try (SheetRun run = early.take(limits.limits())) {
             SheetFile file = SheetFile.read(path);
             RecordFiles files = new RecordFiles(out == null ? file.folder() : out, file.baseName());
             DesignRecord record = record(file, run);
@@ -85,16 +88,25 @@ final class RunCommand implements Callable<Integer> {
     private DesignRecord record(SheetFile file, SheetRun run) throws IOException, InterruptedException {
         Worksheet worksheet = Worksheet.parse(file.text());
         DataFiles data = DataFiles.read(worksheet, file.folder());
-        RunResult result;
-        try (RunProgress progress = new RunProgress(terminal, worksheet)) {
-            result = run.run(worksheet, data.bytes(), progress);
-        }
         List<DataFile> files = data.bytes().entrySet().stream()
                 .map(entry -> new DataFile(entry.getKey(), sha256(entry.getValue()), entry.getValue()))
                 .toList();
         Source source = new Source(file.name(), sha256(file.bytes()), file.text());
         Made made = new Made(Version.sill(), Version.java(), now());
-        return Assembly.record(worksheet, source, files, data.problems(), result, made);
+        Function<RunResult, DesignRecord> assemble =
+                result -> Assembly.record(worksheet, source, files, data.problems(), result, made);
+        rehearse(assemble);
+        try (RunProgress progress = new RunProgress(terminal, worksheet)) {
+            return assemble.apply(run.run(worksheet, data.bytes(), progress));
+        }
+    }
+
+    /** Writes the record of a run that gave nothing: while the worker works, all that a page needs gets loaded. */
+    private static void rehearse(Function<RunResult, DesignRecord> assemble) {
+        RunResult nothing = new RunResult(List.of(), List.of(), List.of(), List.of());
+        Thread rehearsal = new Thread(() -> RecordPage.write(assemble.apply(nothing)), "rehearsal");
+        rehearsal.setDaemon(true);
+        rehearsal.start();
     }
 
     /** Now, or the moment named in {@code SOURCE_DATE_EPOCH}, for builds that must repeat themselves. */

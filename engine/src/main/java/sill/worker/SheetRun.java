@@ -33,6 +33,11 @@ public final class SheetRun implements AutoCloseable {
         return new SheetRun(limits, WorkerProcess.start(limits));
     }
 
+    /** The same run with another time limit; the memory of its first worker is given. */
+    public SheetRun within(Limits others) {
+        return new SheetRun(others, worker);
+    }
+
     /**
      * Runs a worksheet.
      *

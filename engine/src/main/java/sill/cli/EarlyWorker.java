@@ -1,0 +1,58 @@
+package sill.cli;
+
+import java.io.IOException;
+import java.util.Arrays;
+import java.util.List;
+import sill.worker.Limits;
+import sill.worker.SheetRun;
+
+/**
+ * A worker that starts while the command line is still being read: reading it takes about as long as a worker needs to get
+ * ready. It serves the first worksheet, unless that wants other memory.
+ */
+final class EarlyWorker implements AutoCloseable {
+    private static final List<String> NOT_FOR = List.of("--memory", "--help", "-h", "--version", "-V");
+
+    private SheetRun ready;
+
+    private EarlyWorker(SheetRun ready) {
+        this.ready = ready;
+    }
+
+    static EarlyWorker none() {
+        return new EarlyWorker(null);
+    }
+
+    static EarlyWorker forCommand(String... arguments) {
+        boolean runs = arguments.length > 1
+                && arguments[0].equals("run")
+                && Arrays.stream(arguments)
+                        .noneMatch(argument -> NOT_FOR.stream().anyMatch(argument::startsWith));
+        try {
+            return runs ? new EarlyWorker(SheetRun.start(Limits.DEFAULT)) : none();
+        } catch (IOException e) {
+            // Whoever takes a worker tries again and says why there is none.
+            return none();
+        }
+    }
+
+    /** A worker: the early one the first time, when it fits, else a new one. */
+    SheetRun take(Limits limits) throws IOException {
+        SheetRun early = ready;
+        ready = null;
+        if (early != null && limits.memoryMegabytes() == Limits.DEFAULT.memoryMegabytes()) {
+            return early.within(limits);
+        }
+        if (early != null) {
+            early.close();
+        }
+        return SheetRun.start(limits);
+    }
+
+    @Override
+    public void close() {
+        if (ready != null) {
+            ready.close();
+        }
+    }
+}
