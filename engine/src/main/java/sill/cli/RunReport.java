@@ -13,6 +13,9 @@ import sill.worksheet.Problem;
 
 /** What {@code run} prints of a record: what ran, each check, each problem with its line, where the record is. */
 final class RunReport {
+    /** A margin of many times the limit's size is told by its number alone. */
+    private static final double LARGEST_SHARE = 10;
+
     private final Terminal terminal;
     private final DesignRecord record;
 
@@ -61,6 +64,7 @@ final class RunReport {
             return check.shownValue();
         }
         String share = check.marginShare()
+                .filter(part -> Math.abs(part) < LARGEST_SHARE)
                 .map(part -> " (" + String.valueOf(Math.round(part * 100)).replace('-', Notation.MINUS) + " %)")
                 .orElse("");
         return check.shownValue() + ", limit " + check.shownLimit() + ", margin " + check.shownMargin() + share;
@@ -88,7 +92,13 @@ final class RunReport {
         terminal.line(
                 colour(record.outcome()),
                 record.outcome().word(),
-                all == 0 ? ": there are no checks" : ": " + holds + " of " + all + " checks hold");
+                ": " + problems() + (all == 0 ? "there are no checks" : holds + " of " + all + " checks hold"));
+    }
+
+    /** As in {@code 2 problems, }; a line with a problem may be a check that is not even counted. */
+    private String problems() {
+        long count = record.problems().stream().filter(Problem::isError).count();
+        return count == 0 ? "" : count + (count == 1 ? " problem, " : " problems, ");
     }
 
     private static Colour colour(Verdict verdict) {

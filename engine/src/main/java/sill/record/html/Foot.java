@@ -81,12 +81,16 @@ final class Foot {
         page.open("td").leaf("code", sha256).close().close().line();
     }
 
+    /** Only what this version can do is told as an instruction. */
     private static void rerun(Markup page, DesignRecord record) {
-        String file = record.worksheet().file();
-        String name = (file.endsWith(".sill") ? file.substring(0, file.length() - 5) : file) + ".html";
-        page.open("p", "class", "rerun")
-                .text("This file carries the worksheet and its data. To run it again and see what" + " differs: ");
-        page.leaf("code", "sill rerun " + (name.matches("[A-Za-z0-9._/-]+") ? name : "\"" + name + "\""));
-        page.text(".").close().line();
+        page.open("p", "class", "rerun").text("To run it again, run the worksheet with its data beside it: ");
+        page.leaf("code", "sill run " + quoted(record.worksheet().file()));
+        page.text(". This file carries both; a Sill that has the command ");
+        page.leaf("code", "sill rerun");
+        page.text(" will run it from here and tell what differs.").close().line();
+    }
+
+    private static String quoted(String name) {
+        return name.matches("[A-Za-z0-9._/-]+") ? name : "\"" + name + "\"";
     }
 }

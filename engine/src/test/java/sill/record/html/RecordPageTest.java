@@ -173,7 +173,10 @@ class RecordPageTest {
         Document page = page(Records.ofEverything());
         assertThat(page.select(".title-block dt").eachText()).containsExactly("Title");
         assertThat(page.select(".digests tbody tr").eachText()).containsExactly("door.sill 00ff", "a.csv ff00");
-        assertThat(page.selectFirst(".rerun code").text()).isEqualTo("sill rerun door.html");
+        assertThat(page.selectFirst(".rerun").text())
+                .isEqualTo(
+                        "To run it again, run the worksheet with its data beside it: sill run door.sill. This file carries"
+                                + " both; a Sill that has the command sill rerun will run it from here and tell what differs.");
         assertThat(page.selectFirst(".caution").text())
                 .isEqualTo(
                         "Caution: the results are design aids. What switches mains voltage or protects people follows"

@@ -72,7 +72,7 @@ class RunCommandTest {
         assertThat(ran.out())
                 .contains("problem at line 5, column 19: cell 1 \"C\"")
                 .contains("  5 | double y = x + \"\" - 1;\n    |                   ^\n")
-                .contains("incomplete: there are no checks");
+                .contains("incomplete: 1 problem, there are no checks");
         assertThat(ran.code()).isEqualTo(2);
         assertThat(folder.resolve("a.html")).isRegularFile();
     }
