@@ -4,24 +4,30 @@ import de.siegmar.fastcsv.reader.CsvParseException;
 import de.siegmar.fastcsv.reader.CsvReader;
 import de.siegmar.fastcsv.reader.CsvRecord;
 import java.io.ByteArrayInputStream;
+import java.io.IOException;
 import java.io.InputStreamReader;
 import java.io.Reader;
+import java.io.UncheckedIOException;
 import java.nio.charset.CharacterCodingException;
 import java.nio.charset.CodingErrorAction;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import sill.stdlib.Table;
 import sill.units.Unit;
 import sill.units.UnitException;
+import sill.words.Quoted;
 
 /**
  * Reads a data file as a table: comma separated (RFC 4180) in UTF-8, a header line first. A header such as {@code vIn [mV]}
  * names the unit its numbers are in. A column is text as soon as one of its fields is neither a number nor empty.
  */
 final class TableReader {
+    private static final String OPEN_QUOTE = "found a quoted field without its closing quote";
+
     private TableReader() {}
 
     /** A file that is no table; the message names the line. */
@@ -34,6 +40,7 @@ final class TableReader {
     }
 
     static Table read(byte[] bytes) throws NoTable {
+        quotesArePaired(bytes);
         List<List<String>> rows = new ArrayList<>();
         List<Long> lines = new ArrayList<>();
         // A decoder that reports, since a wrong character would be a wrong number.
@@ -43,23 +50,36 @@ final class TableReader {
                         .newDecoder()
                         .onMalformedInput(CodingErrorAction.REPORT)
                         .onUnmappableCharacter(CodingErrorAction.REPORT));
-        try (CsvReader<CsvRecord> csv = CsvReader.builder().ofCsvRecord(text)) {
+        try (CsvReader<CsvRecord> csv = CsvReader.builder()
+                .allowMissingFields(true)
+                .allowExtraFields(true)
+                .ofCsvRecord(text)) {
             for (CsvRecord row : csv) {
                 rows.add(row.getFields());
                 lines.add(row.getStartingLineNumber());
             }
-        } catch (CsvParseException | java.io.UncheckedIOException | java.io.IOException e) {
-            if (e instanceof CharacterCodingException
-                    || e.getCause() instanceof CharacterCodingException
-                    || (e.getCause() != null && e.getCause().getCause() instanceof CharacterCodingException)) {
-                throw new NoTable("it is not UTF-8 text");
-            }
-            throw new NoTable("it is not comma separated text: " + e.getMessage());
+        } catch (CsvParseException | UncheckedIOException | IOException e) {
+            throw new NoTable(isAboutCharacters(e) ? "found bytes that are not UTF-8 text" : OPEN_QUOTE);
         }
         if (rows.isEmpty()) {
-            throw new NoTable("it is empty: a header line was expected");
+            throw new NoTable("found nothing, expected a header line");
         }
         return table(rows, lines);
+    }
+
+    private static boolean isAboutCharacters(Throwable thrown) {
+        return thrown != null && (thrown instanceof CharacterCodingException || isAboutCharacters(thrown.getCause()));
+    }
+
+    /** The reader takes all that follows an open quote for one field: a table would quietly be short. */
+    private static void quotesArePaired(byte[] bytes) throws NoTable {
+        boolean open = false;
+        for (byte b : bytes) {
+            open ^= b == '"';
+        }
+        if (open) {
+            throw new NoTable(OPEN_QUOTE);
+        }
     }
 
     private static byte[] withoutMark(byte[] bytes) {
@@ -70,10 +90,12 @@ final class TableReader {
 
     private static Table table(List<List<String>> rows, List<Long> lines) throws NoTable {
         List<String> header = rows.get(0);
+        otherSeparator(header);
         for (int row = 1; row < rows.size(); row++) {
-            if (rows.get(row).size() != header.size()) {
-                throw new NoTable("line " + lines.get(row) + " has "
-                        + rows.get(row).size() + " fields, the header has " + header.size());
+            int found = rows.get(row).size();
+            if (found != header.size()) {
+                throw new NoTable("line " + lines.get(row) + ": found " + found + (found == 1 ? " field" : " fields")
+                        + ", expected " + header.size() + " as in the header");
             }
         }
         Map<String, Object> columns = new LinkedHashMap<>();
@@ -85,21 +107,32 @@ final class TableReader {
             int bracket = title.endsWith("]") ? title.lastIndexOf('[') : -1;
             String name = bracket < 0 ? title : title.substring(0, bracket).strip();
             if (name.isEmpty()) {
-                throw new NoTable("column " + (i + 1) + " has no name in the header line");
+                throw new NoTable("line 1: found no name for column " + (i + 1));
             }
-            Unit unit = bracket < 0 ? Unit.ONE : unit(title.substring(bracket + 1, title.length() - 1), name);
+            Unit unit = bracket < 0 ? Unit.ONE : unit(title.substring(bracket + 1, title.length() - 1));
             if (columns.put(name, values(fields, unit)) != null) {
-                throw new NoTable("two columns are named \"" + name + "\"");
+                throw new NoTable("line 1: found the column " + Quoted.of(name) + " twice, expected each name once");
             }
         }
         return new Table(columns);
     }
 
-    private static Unit unit(String symbol, String column) throws NoTable {
+    /** One column whose name holds what other programs put between fields is more likely several. */
+    private static void otherSeparator(List<String> header) throws NoTable {
+        String only = header.size() == 1 ? header.get(0) : "";
+        if (only.contains(";")) {
+            throw new NoTable("found semicolons, expected commas between the fields");
+        } else if (only.contains("\t")) {
+            throw new NoTable("found tabs, expected commas between the fields");
+        }
+    }
+
+    private static Unit unit(String symbol) throws NoTable {
         try {
             return Unit.parse(symbol.strip());
         } catch (UnitException e) {
-            throw new NoTable("column \"" + column + "\": " + e.getMessage());
+            throw new NoTable("line 1: " + e.getMessage().substring(0, 1).toLowerCase(Locale.ROOT)
+                    + e.getMessage().substring(1));
         }
     }
 
