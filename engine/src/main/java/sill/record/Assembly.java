@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Set;
 import java.util.stream.Collectors;
+import sill.formula.WorkingOut;
 import sill.record.DesignRecord.CellEntry;
 import sill.record.DesignRecord.CheckEntry;
 import sill.record.DesignRecord.DataFile;
@@ -114,14 +115,16 @@ public final class Assembly {
     }
 
     private List<ValueEntry> values() {
+        KnownValues known = new KnownValues(worksheet, run.results());
         return run.results().stream()
                 .filter(result -> result.plot().isEmpty())
-                .map(Assembly::value)
+                .map(result -> value(result, known))
                 .toList();
     }
 
-    private static ValueEntry value(Result result) {
+    private static ValueEntry value(Result result, KnownValues known) {
         ShownValue shown = ShownValue.of(result);
+        ResultText text = new ResultText(result, shown);
         return new ValueEntry(
                 result.name(),
                 result.formula(),
@@ -136,7 +139,8 @@ public final class Assembly {
                 result.address(),
                 result.line(),
                 result.uses(),
-                result.dependsOn());
+                result.dependsOn(),
+                result.meaning().flatMap(meaning -> WorkingOut.of(result.name(), meaning, known, text)));
     }
 
     private List<PlotEntry> plots() {

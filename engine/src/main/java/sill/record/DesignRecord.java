@@ -3,6 +3,7 @@ package sill.record;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import sill.formula.Working;
 import sill.stdlib.Plot;
 import sill.values.CellState;
 import sill.values.Datum;
@@ -140,6 +141,8 @@ public record DesignRecord(
      * @param shown value with unit and prefix, four significant digits
      * @param shownFull the same with every digit
      * @param shownComponents a record's components, each as {@code shown}; empty for other values
+     * @param working how it is made, as mathematics; empty when its source is all there is to show. The JSON is without it:
+     *     it follows from the worksheet's text
      */
     public record ValueEntry(
             String name,
@@ -155,7 +158,42 @@ public record DesignRecord(
             String at,
             int line,
             List<String> uses,
-            List<String> dependsOn) {}
+            List<String> dependsOn,
+            Optional<Working> working) {
+        /** A result of which only its source can be shown. */
+        public ValueEntry(
+                String name,
+                String formula,
+                String type,
+                Datum value,
+                String unit,
+                Map<String, String> componentUnits,
+                String shown,
+                String shownFull,
+                Map<String, String> shownComponents,
+                String caption,
+                String at,
+                int line,
+                List<String> uses,
+                List<String> dependsOn) {
+            this(
+                    name,
+                    formula,
+                    type,
+                    value,
+                    unit,
+                    componentUnits,
+                    shown,
+                    shownFull,
+                    shownComponents,
+                    caption,
+                    at,
+                    line,
+                    uses,
+                    dependsOn,
+                    Optional.empty());
+        }
+    }
 
     /**
      * A check.

@@ -37,6 +37,13 @@ record ShownValue(String text, String full, Map<String, String> components) {
                 components);
     }
 
+    /** How a result's text, or that of one of its components, would read with another value. */
+    static String of(Result result, String component, Datum value) {
+        Unit exact = result.shownIn().isEmpty() ? null : Units.of(result.shownIn());
+        Unit own = Units.of(result.componentUnits().getOrDefault(component, result.unit()));
+        return new Writer(own, exact, false).text(value);
+    }
+
     /** A number with its unit, as a check prints it. */
     static String of(Datum value, Unit unit) {
         return new Writer(unit, null, false).text(value);

@@ -17,6 +17,7 @@ import java.util.Set;
  * @param types types of the bare expressions, by field; {@link ClassText#NO_VALUE} for a call that gives none
  * @param units unit symbols that helpers state, by field
  * @param known names that every worksheet may use, where there is an error that may be about a misspelt one
+ * @param formulas what the values mean as mathematics, by field, as far as they do
  */
 record Attribution(
         MappedText text,
@@ -25,7 +26,8 @@ record Attribution(
         Set<String> imports,
         Map<String, String> types,
         Map<String, String> units,
-        KnownNames known) {
+        KnownNames known,
+        Map<String, FormulaReader.Formula> formulas) {
     static Attribution of(ClassText classText, Compiler compiler) {
         MappedText text = classText.unit();
         Compiler.Task task = compiler.task(List.of(text.toString()));
@@ -40,7 +42,15 @@ record Attribution(
             KnownNames known = errors.isEmpty()
                     ? KnownNames.NONE
                     : KnownNames.in(task.task().getElements());
-            return new Attribution(text, errors, usages, scanner.imports(), facts.types(), facts.units(), known);
+            return new Attribution(
+                    text,
+                    errors,
+                    usages,
+                    scanner.imports(),
+                    facts.types(),
+                    facts.units(),
+                    known,
+                    Formulas.of(trees, unit, text.toString(), classText.slots()));
         } catch (IOException e) {
             throw new java.io.UncheckedIOException(e);
         }

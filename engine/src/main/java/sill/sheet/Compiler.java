@@ -20,9 +20,13 @@ import javax.tools.ToolProvider;
 
 /** The JDK's compiler with the options and the class path of worksheet code. */
 public final class Compiler {
-    /** Same language on every JDK; the bare {@code -source} costs nothing where {@code --release} does. */
+    /**
+     * Same language on every JDK; the bare {@code -source} costs nothing where {@code --release} does. With
+     * {@code -parameters} the compiler reads the names of the helpers' parameters too, in which their forms are written.
+     */
     public static final List<String> OPTIONS = List.of(
             "-proc:none",
+            "-parameters",
             "-source",
             "17",
             "-target",

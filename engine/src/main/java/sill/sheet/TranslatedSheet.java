@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import sill.formula.Expression;
 import sill.worksheet.Problem;
 
 /**
@@ -103,6 +104,7 @@ public record TranslatedSheet(
      * @param type its type, without packages
      * @param unit coherent SI unit symbol; empty when unknown
      * @param shownIn the unit its caption asks for; empty when none
+     * @param meaning what the Java means as mathematics; empty when it has none
      */
     public record ResultField(
             String field,
@@ -115,5 +117,6 @@ public record TranslatedSheet(
             String shownIn,
             String caption,
             List<String> uses,
-            List<String> dependsOn) {}
+            List<String> dependsOn,
+            Optional<Expression> meaning) {}
 }

@@ -24,6 +24,7 @@ public final class Translation {
     private final Map<String, String> types;
     private final Attribution attribution;
     private final Dependencies dependencies;
+    private final Steadiness steadiness;
     private final Set<Problem> problems = new LinkedHashSet<>();
     private final Set<Integer> brokenCells = new HashSet<>();
     private final Set<Snippet> brokenImports = new HashSet<>();
@@ -50,6 +51,7 @@ public final class Translation {
         attribution = Attribution.of(ClassText.whole(program, types, names.again()), compiler);
         attribution.types().forEach(types::putIfAbsent);
         dependencies = new Dependencies(program, names, attribution.usages(), snippets);
+        steadiness = new Steadiness(program, types, attribution.usages());
         attribution.errors().forEach(error -> complain(attribution.text(), error));
         OrderRules.problems(names, attribution.usages()).forEach(this::add);
         findOpenTypes();
@@ -273,6 +275,9 @@ public final class Translation {
                 caption.unit().map(unit -> unit.symbol()).orElse(""),
                 caption.text(),
                 uses,
-                dependencies.closure(uses));
+                dependencies.closure(uses),
+                Optional.ofNullable(attribution.formulas().get(field.field()))
+                        .filter(read -> steadiness.holds(field.field(), snippet, read))
+                        .map(FormulaReader.Formula::expression));
     }
 }

@@ -22,7 +22,6 @@ public final class Notation {
     public static final char MINUS = '−';
 
     private static final int DIGITS = 4;
-    private static final MathContext ROUNDED = new MathContext(DIGITS, RoundingMode.HALF_UP);
 
     private Notation() {}
 
@@ -37,18 +36,42 @@ public final class Notation {
      * @param unit its unit, with any prefix; {@code %}, {@code °C} and other units that take none stay as they are
      */
     public static String shown(double si, Unit unit) {
+        return shown(si, unit, DIGITS);
+    }
+
+    /** As {@link #shown(double, Unit)}, with another number of digits. */
+    private static String shown(double si, Unit unit, int digits) {
         Optional<UnitExpression> expression = prefixable(unit);
         if (expression.isEmpty()) {
-            return shownIn(si, unit);
+            return shownIn(si, unit, digits);
         }
         UnitExpression bare = expression.get().withPrefix(Prefix.NONE);
         if (!Double.isFinite(si) || si == 0) {
-            return shownIn(si, bare.toUnit());
+            return shownIn(si, bare.toUnit(), digits);
         }
-        BigDecimal number = bare.toUnit().exactFromSi(si).round(ROUNDED);
+        BigDecimal number = bare.toUnit().exactFromSi(si).round(rounding(digits));
         Prefix prefix = prefix(bare.top().get(0).unit(), magnitude(number));
         BigDecimal scaled = number.scaleByPowerOfTen(-prefix.exponent());
-        return joined(rounded(scaled), bare.withPrefix(prefix).symbol());
+        return joined(rounded(scaled, digits), bare.withPrefix(prefix).symbol());
+    }
+
+    /**
+     * What {@link #shown(double, Unit)} prints with a number of significant digits.
+     *
+     * @param digits at least 1
+     */
+    public static PrintedQuantity printed(double si, Unit unit, int digits) {
+        return PrintedQuantity.of(shown(si, unit, digits), si);
+    }
+
+    /** What {@link #shownIn(double, Unit)} prints with a number of significant digits, at least 1. */
+    public static PrintedQuantity printedIn(double si, Unit unit, int digits) {
+        return PrintedQuantity.of(shownIn(si, unit, digits), si);
+    }
+
+    /** What {@link #plain(double, Unit)} prints. */
+    public static PrintedQuantity printedPlain(double si, Unit unit) {
+        return PrintedQuantity.of(plain(si, unit), si);
     }
 
     /**
@@ -57,11 +80,15 @@ public final class Notation {
      * @param si the value in coherent SI
      */
     public static String shownIn(double si, Unit unit) {
+        return shownIn(si, unit, DIGITS);
+    }
+
+    private static String shownIn(double si, Unit unit, int digits) {
         if (!Double.isFinite(si)) {
             return notFinite(si, unit);
         }
         BigDecimal number = unit.exactFromSi(si);
-        return joined(number.signum() == 0 ? "0" : rounded(number.round(ROUNDED)), unit.symbol());
+        return joined(number.signum() == 0 ? "0" : rounded(number.round(rounding(digits)), digits), unit.symbol());
     }
 
     /**
@@ -138,14 +165,18 @@ public final class Notation {
         return oneSymbol ? denominator + Superscript.of(-1) : symbol;
     }
 
-    /** A number of {@value #DIGITS} significant digits, with the zeros at its end. */
-    private static String rounded(BigDecimal number) {
+    private static MathContext rounding(int digits) {
+        return new MathContext(digits, RoundingMode.HALF_UP);
+    }
+
+    /** A number of so many significant digits, with the zeros at its end. */
+    private static String rounded(BigDecimal number, int digits) {
         int magnitude = magnitude(number);
-        if (magnitude >= -3 && magnitude < DIGITS) {
-            return signed(number.setScale(DIGITS - 1 - magnitude, RoundingMode.HALF_UP)
+        if (magnitude >= -3 && magnitude < digits) {
+            return signed(number.setScale(digits - 1 - magnitude, RoundingMode.HALF_UP)
                     .toPlainString());
         }
-        BigDecimal mantissa = number.scaleByPowerOfTen(-magnitude).setScale(DIGITS - 1, RoundingMode.HALF_UP);
+        BigDecimal mantissa = number.scaleByPowerOfTen(-magnitude).setScale(digits - 1, RoundingMode.HALF_UP);
         return withPower(signed(mantissa.toPlainString()), magnitude);
     }
 

@@ -1,12 +1,13 @@
 package sill.units;
 
 /** Whole numbers in raised digits. */
-final class Superscript {
+public final class Superscript {
     private static final String DIGITS = "⁰¹²³⁴⁵⁶⁷⁸⁹";
 
     private Superscript() {}
 
-    static String of(int number) {
+    /** A whole number in raised digits. */
+    public static String of(int number) {
         StringBuilder raised = new StringBuilder();
         for (char c : Integer.toString(number).toCharArray()) {
             raised.append(c == '-' ? '⁻' : DIGITS.charAt(c - '0'));

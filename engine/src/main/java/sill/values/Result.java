@@ -5,6 +5,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import sill.formula.Expression;
 import sill.stdlib.Plot;
 
 /**
@@ -24,6 +25,7 @@ import sill.stdlib.Plot;
  * @param caption the trailing comment's text, without the unit
  * @param uses names it is made from directly
  * @param dependsOn all names it rests on, down to the givens
+ * @param meaning what the Java means as mathematics; empty when it has none
  */
 public record Result(
         String name,
@@ -39,7 +41,8 @@ public record Result(
         Map<String, String> componentUnits,
         String caption,
         List<String> uses,
-        List<String> dependsOn) {
+        List<String> dependsOn,
+        Optional<Expression> meaning) {
     public Result {
         // Map.copyOf would forget the order of the components.
         componentUnits = Collections.unmodifiableMap(new LinkedHashMap<>(componentUnits));

@@ -152,7 +152,8 @@ final class StepRunner {
                 componentUnits,
                 field.caption(),
                 field.uses(),
-                field.dependsOn());
+                field.dependsOn(),
+                field.meaning());
     }
 
     /** The units that a helper's record states for its components. */

@@ -44,6 +44,8 @@ final class ValueWire {
         result.plot().ifPresent(plot -> plot(out, plot));
         out.text(result.unit()).text(result.shownIn()).map(result.componentUnits(), WireOut::text);
         out.text(result.caption()).texts(result.uses()).texts(result.dependsOn());
+        out.flag(result.meaning().isPresent());
+        result.meaning().ifPresent(meaning -> ExpressionWire.write(out, meaning));
     }
 
     static Result result(WireIn in) {
@@ -61,7 +63,8 @@ final class ValueWire {
                 in.map(WireIn::text),
                 in.text(),
                 in.texts(),
-                in.texts());
+                in.texts(),
+                in.flag() ? Optional.of(ExpressionWire.read(in)) : Optional.empty());
     }
 
     static void checkValue(WireOut out, CheckValue check) {

@@ -74,6 +74,7 @@ class ShownValueTest {
                 Map.of(),
                 "",
                 List.of(),
-                List.of()));
+                List.of(),
+                Optional.empty()));
     }
 }

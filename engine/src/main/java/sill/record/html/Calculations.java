@@ -30,20 +30,15 @@ final class Calculations {
         page.open("div", "class", "line");
         Addresses.write(page, value.at(), true);
         page.open("div", "class", "equation");
-        boolean started = false;
-        if (!value.name().isEmpty()) {
-            page.leaf("var", value.name());
-            started = true;
-        }
         boolean inOwnWords = value.shown().isEmpty() || Values.isTable(value.value());
         String shown = inOwnWords ? Values.brief(value.value(), value.unit()) : value.shown();
-        if (!value.formula().isEmpty() && !value.formula().equals(shown)) {
-            equals(page, started);
-            page.leaf("code", value.formula());
-            started = true;
+        if (value.working().isPresent()) {
+            Workings.line(page, value.working().get().lines().get(0));
+        } else {
+            source(page, value, shown);
         }
-        equals(page, started);
         result(page, value, shown);
+        value.working().ifPresent(working -> Workings.beneath(page, working));
         page.close();
         if (!value.caption().isEmpty()) {
             page.leaf("div", value.caption(), "class", "meaning");
@@ -51,8 +46,14 @@ final class Calculations {
         page.close().line();
     }
 
-    private static void equals(Markup page, boolean started) {
-        page.text(started ? " = " : "");
+    /** Name and Java of what has no mathematics. */
+    private static void source(Markup page, ValueEntry value, String shown) {
+        if (!value.name().isEmpty()) {
+            page.leaf("var", value.name()).text(" = ");
+        }
+        if (!value.formula().isEmpty() && !value.formula().equals(shown)) {
+            page.leaf("code", value.formula()).text(" = ");
+        }
     }
 
     /** The value in brief, and on demand in full with its type and what it rests on; needs no script. */
