@@ -1,0 +1,35 @@
+package sill.inference;
+
+import java.util.Map;
+import java.util.Optional;
+import java.util.function.IntUnaryOperator;
+import sill.units.Dimension;
+import sill.units.Unit;
+
+/**
+ * What is known before the inference starts.
+ *
+ * @param givens the fields that givens fill, by name
+ * @param stated units that captions state, by field
+ * @param limits dimensions of the limits of checks, by the check's method; without those whose limits are bare zeros
+ * @param line the worksheet's line for an offset of the compilation unit
+ */
+public record Seeds(
+        Map<String, GivenValue> givens,
+        Map<String, Unit> stated,
+        Map<String, Dimension> limits,
+        IntUnaryOperator line) {
+    /**
+     * A given.
+     *
+     * @param line its line in the worksheet
+     * @param dimension of its number or numbers; empty for others
+     * @param columns of a table, those whose dimension is known
+     */
+    public record GivenValue(int line, Optional<Dimension> dimension, Map<String, Dimension> columns) {
+        /** A number or a list of numbers. */
+        public static GivenValue of(int line, Dimension dimension) {
+            return new GivenValue(line, Optional.of(dimension), Map.of());
+        }
+    }
+}
