@@ -6,6 +6,10 @@ import java.io.IOException;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import java.util.function.Function;
+import sill.inference.Inference;
+import sill.inference.Inferred;
+import sill.inference.Seeds;
 
 /**
  * The sheet's class, attributed: what the compiler complains of, and what its one tree tells the readers.
@@ -15,7 +19,7 @@ import java.util.Set;
  * @param usages uses of the sheet's own names
  * @param imports the imports on demand that the text rests on
  * @param types types of the bare expressions, by field; {@link ClassText#NO_VALUE} for a call that gives none
- * @param units unit symbols that helpers state, by field
+ * @param inferred dimensions, and where they don't go together
  * @param known names that every worksheet may use, where there is an error that may be about a misspelt one
  */
 record Attribution(
@@ -24,9 +28,9 @@ record Attribution(
         List<Usage> usages,
         Set<String> imports,
         Map<String, String> types,
-        Map<String, String> units,
+        Inferred inferred,
         KnownNames known) {
-    static Attribution of(ClassText classText, Compiler compiler) {
+    static Attribution of(ClassText classText, Compiler compiler, Function<MappedText, Seeds> seeds) {
         MappedText text = classText.unit();
         Compiler.Task task = compiler.task(List.of(text.toString()));
         try {
@@ -36,11 +40,12 @@ record Attribution(
             UsageScanner scanner = new UsageScanner(trees, unit, text);
             List<Usage> usages = scanner.usages();
             FieldFacts facts = FieldFacts.of(trees, unit, classText.slots());
+            Inferred inferred = Inference.of(trees, unit, seeds.apply(text));
             List<Compiler.Complaint> errors = task.errors();
             KnownNames known = errors.isEmpty()
                     ? KnownNames.NONE
                     : KnownNames.in(task.task().getElements());
-            return new Attribution(text, errors, usages, scanner.imports(), facts.types(), facts.units(), known);
+            return new Attribution(text, errors, usages, scanner.imports(), facts.types(), inferred, known);
         } catch (IOException e) {
             throw new java.io.UncheckedIOException(e);
         }

@@ -33,7 +33,14 @@ final class TableReader {
         }
     }
 
-    static Table read(byte[] bytes) throws NoTable {
+    /**
+     * A table as read.
+     *
+     * @param units coherent unit symbols of the columns whose header names a unit
+     */
+    record Read(Table table, Map<String, String> units) {}
+
+    static Read read(byte[] bytes) throws NoTable {
         List<List<String>> rows = new ArrayList<>();
         List<Long> lines = new ArrayList<>();
         // A decoder that reports, since a wrong character would be a wrong number.
@@ -68,7 +75,7 @@ final class TableReader {
         return marked ? java.util.Arrays.copyOfRange(bytes, 3, bytes.length) : bytes;
     }
 
-    private static Table table(List<List<String>> rows, List<Long> lines) throws NoTable {
+    private static Read table(List<List<String>> rows, List<Long> lines) throws NoTable {
         List<String> header = rows.get(0);
         for (int row = 1; row < rows.size(); row++) {
             if (rows.get(row).size() != header.size()) {
@@ -77,6 +84,7 @@ final class TableReader {
             }
         }
         Map<String, Object> columns = new LinkedHashMap<>();
+        Map<String, String> units = new LinkedHashMap<>();
         for (int i = 0; i < header.size(); i++) {
             int column = i;
             List<String> fields =
@@ -88,11 +96,14 @@ final class TableReader {
                 throw new NoTable("column " + (i + 1) + " has no name in the header line");
             }
             Unit unit = bracket < 0 ? Unit.ONE : unit(title.substring(bracket + 1, title.length() - 1), name);
+            if (bracket >= 0) {
+                units.put(name, unit.coherent().symbol());
+            }
             if (columns.put(name, values(fields, unit)) != null) {
                 throw new NoTable("two columns are named \"" + name + "\"");
             }
         }
-        return new Table(columns);
+        return new Read(new Table(columns), units);
     }
 
     private static Unit unit(String symbol, String column) throws NoTable {
