@@ -3,8 +3,12 @@ package sill.inference;
 import java.util.LinkedHashMap;
 import java.util.Map;
 
-/** The parts of a record by their names, or the {@link #KEY} and {@link #VALUE} of a map or a map's entry. */
-record Components(Map<String, Value> parts) implements Value {
+/**
+ * A value in parts.
+ *
+ * @param parts of a record by their names; of a map or a map's entry its {@link #KEY} and {@link #VALUE}
+ */
+record Components(Map<String, Value> parts, boolean ofMap) implements Value {
     static final String KEY = "key";
     static final String VALUE = "value";
 
@@ -17,11 +21,16 @@ record Components(Map<String, Value> parts) implements Value {
         parts = shallow;
     }
 
+    /** A record. */
+    Components(Map<String, Value> parts) {
+        this(parts, false);
+    }
+
     static Components entry(Value key, Value value) {
         Map<String, Value> parts = new LinkedHashMap<>();
         parts.put(KEY, key);
         parts.put(VALUE, value);
-        return new Components(parts);
+        return new Components(parts, true);
     }
 
     Value part(String name) {
@@ -29,12 +38,12 @@ record Components(Map<String, Value> parts) implements Value {
     }
 
     Value join(Components other) {
-        if (!parts.keySet().equals(other.parts.keySet())) {
+        if (ofMap != other.ofMap || !parts.keySet().equals(other.parts.keySet())) {
             return Quantity.UNKNOWN;
         }
         Map<String, Value> joined = new LinkedHashMap<>();
         parts.forEach((name, part) -> joined.put(name, Value.join(part, other.part(name))));
-        return new Components(joined);
+        return new Components(joined, ofMap);
     }
 
     private static int depth(Value value) {

@@ -31,7 +31,7 @@ public final class Inference implements Walker {
     private final Map<String, Dimension> checks = new HashMap<>();
 
     private Inference(Trees trees, CompilationUnitTree unit, Seeds seeds) {
-        this.tree = new SheetTree(trees, unit);
+        this.tree = new SheetTree(trees, unit, seeds.source());
         this.seeds = seeds;
         Wording wording = new Wording(tree, seeds);
         fields = new Fields(seeds);
@@ -86,9 +86,7 @@ public final class Inference implements Walker {
         }
         Environment env = Environment.ofBody(new Environment.Frame(Quantity.UNKNOWN, -1));
         Operand found = operand(statement.getExpression(), env);
-        if (found.quantity().hasDimension()) {
-            checks.put(name, found.quantity().dimension());
-        }
+        found.quantity().known().ifPresent(dimension -> checks.put(name, dimension));
         Dimension limit = seeds.limits().get(name);
         if (limit != null && !found.quantity().fits(Quantity.of(limit))) {
             rules.limit(found, limit);
@@ -99,10 +97,12 @@ public final class Inference implements Walker {
         Map<String, Dimension> dimensions = new LinkedHashMap<>();
         Map<String, Map<String, Dimension>> components = new LinkedHashMap<>();
         fields.byName().forEach((name, value) -> {
-            if (value instanceof Components record) {
-                components.put(name, known(record));
-            } else if (value.quantity().hasDimension()) {
-                dimensions.put(name, value.quantity().dimension());
+            if (value instanceof Components parts && parts.ofMap()) {
+                parts.part(Components.VALUE).quantity().known().ifPresent(dimension -> dimensions.put(name, dimension));
+            } else if (value instanceof Components parts) {
+                components.put(name, known(parts));
+            } else {
+                value.quantity().known().ifPresent(dimension -> dimensions.put(name, dimension));
             }
         });
         return new Inferred(dimensions, components, checks, log.all());
@@ -110,11 +110,8 @@ public final class Inference implements Walker {
 
     private static Map<String, Dimension> known(Components record) {
         Map<String, Dimension> known = new LinkedHashMap<>();
-        record.parts().forEach((name, part) -> {
-            if (part.quantity().hasDimension()) {
-                known.put(name, part.quantity().dimension());
-            }
-        });
+        record.parts()
+                .forEach((name, part) -> part.quantity().known().ifPresent(dimension -> known.put(name, dimension)));
         return known;
     }
 }

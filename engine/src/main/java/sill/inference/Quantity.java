@@ -1,5 +1,6 @@
 package sill.inference;
 
+import java.util.Optional;
 import sill.units.Dimension;
 import sill.units.Rational;
 
@@ -38,6 +39,11 @@ record Quantity(Kind kind, Dimension dimension) implements Value {
     /** Whether there is a dimension to compare; a pure number's counts. */
     boolean hasDimension() {
         return kind != Kind.ANY && kind != Kind.UNKNOWN;
+    }
+
+    /** The dimension, where it is known. */
+    Optional<Dimension> known() {
+        return hasDimension() ? Optional.of(dimension) : Optional.empty();
     }
 
     /** Whether it is surely a pure number. */

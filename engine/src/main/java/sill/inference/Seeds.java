@@ -9,12 +9,14 @@ import sill.units.Unit;
 /**
  * What is known before the inference starts.
  *
+ * @param source the compilation unit's text
  * @param givens the fields that givens fill, by name
  * @param stated units that captions state, by field
  * @param limits dimensions of the limits of checks, by the check's method; without those whose limits are bare zeros
  * @param line the worksheet's line for an offset of the compilation unit
  */
 public record Seeds(
+        String source,
         Map<String, GivenValue> givens,
         Map<String, Unit> stated,
         Map<String, Dimension> limits,

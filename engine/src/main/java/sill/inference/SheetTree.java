@@ -10,8 +10,6 @@ import com.sun.source.util.SourcePositions;
 import com.sun.source.util.TreePath;
 import com.sun.source.util.TreeScanner;
 import com.sun.source.util.Trees;
-import java.io.IOException;
-import java.io.UncheckedIOException;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
@@ -32,16 +30,12 @@ final class SheetTree {
     private final Element sheetClass;
     private final Map<Element, MethodTree> bodies = new HashMap<>();
 
-    SheetTree(Trees trees, CompilationUnitTree unit) {
+    SheetTree(Trees trees, CompilationUnitTree unit, String source) {
         this.trees = trees;
         this.positions = trees.getSourcePositions();
         this.unit = unit;
         this.root = new TreePath(unit);
-        try {
-            this.source = unit.getSourceFile().getCharContent(true).toString();
-        } catch (IOException e) {
-            throw new UncheckedIOException(e);
-        }
+        this.source = source;
         this.sheet = (ClassTree) unit.getTypeDecls().get(0);
         this.sheetClass = trees.getElement(new TreePath(root, sheet));
         new TreeScanner<Void, Void>() {

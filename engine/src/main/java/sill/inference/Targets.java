@@ -90,7 +90,7 @@ final class Targets {
         }
         Value before = read(variable, env);
         Value now = element;
-        if (inMap && before instanceof Components map && !(element instanceof Components)) {
+        if (inMap && before instanceof Components map && map.ofMap() && !(element instanceof Components)) {
             now = Components.entry(map.part(Components.KEY), Value.join(map.part(Components.VALUE), element));
         }
         Value after = Value.join(before, now instanceof Quantity quantity ? quantity.named() : now);

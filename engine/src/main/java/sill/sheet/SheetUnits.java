@@ -47,7 +47,11 @@ final class SheetUnits {
             }
         }
         return new Seeds(
-                givens, stated, limits, offset -> text.origin(offset).place().line());
+                text.toString(),
+                givens,
+                stated,
+                limits,
+                offset -> text.origin(offset).place().line());
     }
 
     /** The slips, where the worksheet's author finds them. */
