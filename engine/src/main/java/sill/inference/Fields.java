@@ -28,6 +28,11 @@ final class Fields {
                 : given.dimension().<Value>map(Quantity::of).orElse(Quantity.UNKNOWN);
     }
 
+    /** What a statement of the sheet shows, under the name of the field it will be kept in. */
+    void show(String field, Value value) {
+        byName.put(field, value);
+    }
+
     boolean isSet(Element field) {
         return values.containsKey(field);
     }
@@ -41,8 +46,13 @@ final class Fields {
     }
 
     /** The unit that a field's caption states. */
-    Optional<Unit> stated(Element field) {
-        return Optional.ofNullable(seeds.stated().get(name(field)));
+    Optional<Unit> stated(String field) {
+        return Optional.ofNullable(seeds.stated().get(field));
+    }
+
+    /** The field that a statement gives its first value; empty when it is no such statement. */
+    Optional<String> slot(int offset) {
+        return Optional.ofNullable(seeds.slots().get(offset));
     }
 
     /** How often a field that had a value got another one. */
@@ -55,7 +65,7 @@ final class Fields {
         return byName;
     }
 
-    private static String name(Element field) {
+    static String name(Element field) {
         return field.getSimpleName().toString();
     }
 }

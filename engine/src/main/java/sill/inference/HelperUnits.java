@@ -160,7 +160,7 @@ final class HelperUnits {
             ExecutableElement method, int i, int other, Operand argument, Quantity expected, List<Operand> arguments) {
         boolean many = arguments.size() > 1;
         String place = many ? " as argument " + (i + 1) : "";
-        String hint = other >= 0 ? "swap arguments " + (i + 1) + " and " + (other + 1) : "";
+        String hint = other >= 0 ? "Swap arguments " + (i + 1) + " and " + (other + 1) + "." : "";
         rules.unfit(
                 argument,
                 expected.dimension(),

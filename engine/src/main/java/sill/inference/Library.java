@@ -162,7 +162,8 @@ final class Library {
                     "unordered",
                     "summaryStatistics",
                     "build" -> element;
-            case "add", "accept" -> added(call, 0);
+            case "add" -> Value.join(call.receiver(), added(call, 0));
+            case "accept" -> added(call, 0);
             default -> Quantity.UNKNOWN;
         };
     }
@@ -268,9 +269,14 @@ final class Library {
         Value element = call.receiver();
         return switch (call.name()) {
             case "size", "length", "indexOf", "getCount", "nextInt", "cardinality" -> Quantity.NUMBER;
-            case "add", "addLast", "addFirst", "push", "offer", "accept", "addAll", "offerLast", "offerFirst" ->
+            case "add", "addLast", "addFirst", "push", "offer", "accept", "addAll", "offerLast", "offerFirst" -> {
                 added(call, call.count() - 1);
-            case "set" -> added(call, call.count() - 1);
+                yield Quantity.UNKNOWN;
+            }
+            case "set" -> {
+                added(call, call.count() - 1);
+                yield element;
+            }
             case "orElse" -> Value.join(element, call.argument(0));
             case "orElseGet" -> Value.join(element, applied(call, 0));
             case "map", "flatMap" -> applied(call, 0, element);
@@ -357,13 +363,14 @@ final class Library {
         };
     }
 
+    /** Adds an argument to the container it is called on, and gives that argument. */
     private Value added(Call call, int argument) {
         return addedTo(call, call.argument(argument));
     }
 
     private Value addedTo(Call call, Value element) {
         call.target().ifPresent(target -> targets.add(target, element, call.env()));
-        return Value.join(call.receiver(), element);
+        return element;
     }
 
     private static Value joined(Call call, int from) {

@@ -171,7 +171,11 @@ final class MethodBodies {
     /** The record that its canonical constructor makes of its parameters. */
     private Value made(Element constructor, List<VariableElement> parameters, Environment env) {
         Map<String, Value> parts = new LinkedHashMap<>();
-        parameters.forEach(parameter -> parts.put(parameter.getSimpleName().toString(), env.get(parameter)));
+        // A record has no caption to say what its bare numbers measure.
+        parameters.forEach(parameter -> {
+            Value value = env.get(parameter);
+            parts.put(parameter.getSimpleName().toString(), value.equals(Quantity.LITERAL) ? Quantity.UNKNOWN : value);
+        });
         TypeElement type = (TypeElement) constructor.getEnclosingElement();
         List<String> components = type.getRecordComponents().stream()
                 .map(component -> component.getSimpleName().toString())

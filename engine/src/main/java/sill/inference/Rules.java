@@ -89,7 +89,7 @@ final class Rules {
                 tree.start(argument.tree()),
                 pair(quantity, Quantity.LITERAL),
                 function + " expects a pure number, found " + quantity.said() + ": " + wording.said(argument),
-                "divide by a reference value in " + quantity.said() + " first"));
+                "Divide by a reference value in " + quantity.said() + " first."));
         return Quantity.UNKNOWN;
     }
 
@@ -102,7 +102,7 @@ final class Rules {
                 inner > start ? start : tree.end(step.getExpression()),
                 pair(operand.quantity(), Quantity.LITERAL),
                 words + operand.quantity().said() + ": " + wording.said(operand),
-                "add a given with the unit " + operand.quantity().said() + " instead"));
+                "Add a given with the unit " + operand.quantity().said() + " instead."));
     }
 
     /** A check whose limits measure something else than its expression. */
@@ -110,7 +110,7 @@ final class Rules {
         Quantity limits = Quantity.of(limit);
         String unit = found.quantity().said();
         String hint = limits.isPure()
-                ? "give the limit its unit, such as '1 " + unit + "'"
+                ? "Give the limit its unit, such as '1 " + unit + "'."
                 : found.quantity().isPure() ? wording.mend(found, limits.said()) : "";
         log.add(new Slip(
                 "",

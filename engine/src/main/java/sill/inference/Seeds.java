@@ -2,7 +2,6 @@ package sill.inference;
 
 import java.util.Map;
 import java.util.Optional;
-import java.util.function.IntUnaryOperator;
 import sill.units.Dimension;
 import sill.units.Unit;
 
@@ -10,17 +9,28 @@ import sill.units.Unit;
  * What is known before the inference starts.
  *
  * @param source the compilation unit's text
+ * @param slots start offsets of the statements that give fields their first values, to the fields
  * @param givens the fields that givens fill, by name
  * @param stated units that captions state, by field
  * @param limits dimensions of the limits of checks, by the check's method; without those whose limits are bare zeros
- * @param line the worksheet's line for an offset of the compilation unit
+ * @param places the way back to the worksheet
  */
 public record Seeds(
         String source,
+        Map<Integer, String> slots,
         Map<String, GivenValue> givens,
         Map<String, Unit> stated,
         Map<String, Dimension> limits,
-        IntUnaryOperator line) {
+        Places places) {
+    /** The way back to the worksheet. */
+    public interface Places {
+        /** The worksheet's line for an offset of the compilation unit. */
+        int line(int offset);
+
+        /** A stretch of the compilation unit as the worksheet has it. */
+        String text(int start, int end);
+    }
+
     /**
      * A given.
      *

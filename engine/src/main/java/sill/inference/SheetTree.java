@@ -88,17 +88,6 @@ final class SheetTree {
         return (int) positions.getEndPosition(unit, tree);
     }
 
-    /** The source, its white space narrowed, cut when it is long. */
-    String text(Tree tree, int longest) {
-        int start = start(tree);
-        int end = end(tree);
-        if (start < 0 || end < start) {
-            return tree.toString();
-        }
-        String text = source.substring(start, end).strip().replaceAll("\\s+", " ");
-        return text.length() <= longest ? text : text.substring(0, longest - 1) + "…";
-    }
-
     /** Where the operator stands between two operands. */
     int between(Tree left, Tree right) {
         int from = end(left);

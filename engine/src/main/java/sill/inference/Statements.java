@@ -1,6 +1,7 @@
 package sill.inference;
 
 import com.sun.source.tree.AssertTree;
+import com.sun.source.tree.AssignmentTree;
 import com.sun.source.tree.BlockTree;
 import com.sun.source.tree.CaseTree;
 import com.sun.source.tree.CatchTree;
@@ -68,13 +69,19 @@ final class Statements extends SimpleTreeVisitor<Boolean, Environment> {
         Operand given = variable.getInitializer() == null
                 ? new Operand(Quantity.ANY, null)
                 : walker.operand(variable.getInitializer(), env);
-        tree.element(variable).ifPresent(element -> targets.set(element, given, tree.start(variable), env));
+        int start = tree.start(variable);
+        fields.slot(start).ifPresent(field -> targets.show(field, given, start));
+        tree.element(variable).ifPresent(element -> targets.set(element, given, start, env));
         return false;
     }
 
     @Override
     public Boolean visitExpressionStatement(ExpressionStatementTree statement, Environment env) {
-        walker.value(statement.getExpression(), env);
+        Operand shown = walker.operand(statement.getExpression(), env);
+        int start = tree.start(statement);
+        if (!(shown.tree() instanceof AssignmentTree)) {
+            fields.slot(start).ifPresent(field -> targets.show(field, shown, start));
+        }
         return false;
     }
 

@@ -54,8 +54,8 @@ final class Targets {
         Value value = given.value() instanceof Quantity quantity ? quantity.named() : given.value();
         if (tree.isField(variable)) {
             boolean first = !fields.isSet(variable);
-            Value stated = fields.stated(variable)
-                    .map(unit -> asStated(variable, unit, given, offset, first))
+            Value stated = fields.stated(Fields.name(variable))
+                    .map(unit -> asStated(Fields.name(variable), unit, given, offset, first))
                     .orElse(value);
             boolean surely = first || env.isOutermost();
             fields.set(variable, surely ? stated : Value.join(fields.get(variable), stated));
@@ -63,6 +63,16 @@ final class Targets {
             env.set(variable, value);
         }
         wording.set(variable, offset);
+    }
+
+    /** A statement whose value the sheet shows, though no variable holds it. */
+    void show(String field, Operand shown, int offset) {
+        Value value = shown.value() instanceof Quantity quantity ? quantity.named() : shown.value();
+        fields.show(
+                field,
+                fields.stated(field)
+                        .map(unit -> asStated(field, unit, shown, offset, true))
+                        .orElse(value));
     }
 
     /** Adds what an element may be to a container, however deep inside another. */
@@ -104,13 +114,13 @@ final class Targets {
     /** An element that is made of bare numbers measures what the caption of its container states. */
     private Value stated(Element field, Value value) {
         boolean bare = value instanceof Quantity quantity && quantity.isMadeOfNumbers();
-        return fields.stated(field)
+        return fields.stated(Fields.name(field))
                 .filter(unit -> bare)
                 .<Value>map(unit -> Quantity.of(unit.dimension()))
                 .orElse(value);
     }
 
-    private Value asStated(Element field, Unit unit, Operand given, int offset, boolean first) {
+    private Value asStated(String name, Unit unit, Operand given, int offset, boolean first) {
         if (!(given.value() instanceof Quantity quantity)) {
             return given.value();
         }
@@ -118,7 +128,6 @@ final class Targets {
         if (quantity.fits(stated) || quantity.isMadeOfNumbers()) {
             return stated;
         }
-        String name = field.getSimpleName().toString();
         if (first) {
             log.add(new Slip(
                     name,
@@ -127,7 +136,7 @@ final class Targets {
                     "the caption states [" + unit.symbol() + "], found "
                             + (quantity.isPure() ? "a pure number" : "a value in " + quantity.said()) + ": "
                             + wording.said(given),
-                    quantity.isPure() ? "" : "correct the formula, or state [" + quantity.said() + "]"));
+                    quantity.isPure() ? "" : "Correct the formula, or state [" + quantity.said() + "]."));
         } else {
             log.add(new Slip(
                     "",

@@ -34,7 +34,7 @@ final class Wording {
     /** Such as {@code vSupply (V, given on line 9)}; a bare number stands for itself. */
     String said(Operand operand) {
         ExpressionTree expression = SheetTree.bare(operand.tree());
-        String text = tree.text(expression, LONGEST);
+        String text = text(expression);
         if (operand.quantity().kind() == Quantity.Kind.LITERAL && !(expression instanceof IdentifierTree)) {
             return text;
         }
@@ -45,7 +45,7 @@ final class Wording {
     String measure(Operand operand) {
         ExpressionTree expression = SheetTree.bare(operand.tree());
         if (operand.quantity().kind() == Quantity.Kind.LITERAL && !(expression instanceof IdentifierTree)) {
-            return "a bare " + tree.text(expression, LONGEST);
+            return "a bare " + text(expression);
         }
         return operand.quantity().said();
     }
@@ -53,21 +53,27 @@ final class Wording {
     /** How to mend that a pure number stands where a unit is wanted; empty when that is not evident. */
     String mend(Operand pure, String unit) {
         ExpressionTree expression = SheetTree.bare(pure.tree());
-        if (!pure.quantity().isMadeOfNumbers()) {
+        boolean named = expression instanceof IdentifierTree;
+        if (named && pure.quantity().isMadeOfNumbers()) {
+            boolean result = tree.element(expression).filter(tree::isField).isPresent();
+            return result ? "State the unit of " + text(expression) + " in its caption: // [" + unit + "]." : "";
+        } else if (named || pure.quantity().kind() != Quantity.Kind.LITERAL) {
             return "";
+        } else if (unit.equals("K") && text(expression).equals("273.15")) {
+            return "A temperature is shown in °C by its caption: // [°C].";
         }
-        if (!(expression instanceof IdentifierTree name)) {
-            return pure.quantity().kind() == Quantity.Kind.LITERAL
-                    ? "make " + tree.text(expression, LONGEST)
-                            + " a given, or state its unit in the caption of a variable"
-                    : "";
-        }
-        boolean result = tree.element(name).filter(tree::isField).isPresent();
-        return result ? "state the unit of " + name.getName() + " in its caption: // [" + unit + "]" : "";
+        return "Make " + text(expression) + " a given, or state its unit in the caption of a variable.";
     }
 
-    String text(ExpressionTree expression) {
-        return tree.text(SheetTree.bare(expression), LONGEST);
+    /** An expression's source, its white space narrowed, cut when it is long. */
+    private String text(ExpressionTree expression) {
+        int start = tree.start(expression);
+        int end = tree.end(expression);
+        String text = start < 0 || end < start
+                ? expression.toString()
+                : seeds.places().text(start, end);
+        String line = text.strip().replaceAll("\\s+", " ");
+        return line.length() <= LONGEST ? line : line.substring(0, LONGEST - 1) + "…";
     }
 
     private String origin(ExpressionTree expression) {
@@ -92,6 +98,6 @@ final class Wording {
     }
 
     private int line(int offset) {
-        return seeds.line().applyAsInt(offset);
+        return seeds.places().line(offset);
     }
 }

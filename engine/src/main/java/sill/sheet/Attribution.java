@@ -6,10 +6,8 @@ import java.io.IOException;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
-import java.util.function.Function;
 import sill.inference.Inference;
 import sill.inference.Inferred;
-import sill.inference.Seeds;
 
 /**
  * The sheet's class, attributed: what the compiler complains of, and what its one tree tells the readers.
@@ -30,7 +28,7 @@ record Attribution(
         Map<String, String> types,
         Inferred inferred,
         KnownNames known) {
-    static Attribution of(ClassText classText, Compiler compiler, Function<MappedText, Seeds> seeds) {
+    static Attribution of(ClassText classText, Compiler compiler, SheetUnits units) {
         MappedText text = classText.unit();
         Compiler.Task task = compiler.task(List.of(text.toString()));
         try {
@@ -40,7 +38,7 @@ record Attribution(
             UsageScanner scanner = new UsageScanner(trees, unit, text);
             List<Usage> usages = scanner.usages();
             FieldFacts facts = FieldFacts.of(trees, unit, classText.slots());
-            Inferred inferred = Inference.of(trees, unit, seeds.apply(text));
+            Inferred inferred = Inference.of(trees, unit, units.seeds(text, classText.slots()));
             List<Compiler.Complaint> errors = task.errors();
             KnownNames known = errors.isEmpty()
                     ? KnownNames.NONE

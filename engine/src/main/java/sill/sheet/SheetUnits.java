@@ -23,7 +23,7 @@ final class SheetUnits {
     }
 
     /** What is known before the inference starts, for the class's text. */
-    Seeds seeds(MappedText text) {
+    Seeds seeds(MappedText text, Map<Integer, String> slots) {
         Map<String, Seeds.GivenValue> givens = new HashMap<>();
         for (SheetSource.GivenField given : program.presentGivens()) {
             Map<String, Dimension> columns = new HashMap<>();
@@ -46,12 +46,26 @@ final class SheetUnits {
                         dimension(check.line().unit()));
             }
         }
-        return new Seeds(
-                text.toString(),
-                givens,
-                stated,
-                limits,
-                offset -> text.origin(offset).place().line());
+        return new Seeds(text.toString(), slots, givens, stated, limits, places(text));
+    }
+
+    private static Seeds.Places places(MappedText text) {
+        return new Seeds.Places() {
+            @Override
+            public int line(int offset) {
+                return text.origin(offset).place().line();
+            }
+
+            @Override
+            public String text(int start, int end) {
+                MappedText.Origin from = text.origin(start);
+                MappedText.Origin to = text.origin(end - 1);
+                boolean copied = from.piece() == to.piece() && to.offset() >= from.offset();
+                return copied
+                        ? from.piece().text().substring(from.offset(), to.offset() + 1)
+                        : text.toString().substring(start, end);
+            }
+        };
     }
 
     /** The slips, where the worksheet's author finds them. */

@@ -49,7 +49,7 @@ public final class Translation {
         names.problems().forEach(this::add);
         types = new TypeFinder(compiler).find(program);
         findUnavailable();
-        attribution = Attribution.of(ClassText.whole(program, types, names.again()), compiler, units::seeds);
+        attribution = Attribution.of(ClassText.whole(program, types, names.again()), compiler, units);
         attribution.types().forEach(types::putIfAbsent);
         dependencies = new Dependencies(program, names, attribution.usages(), snippets);
         attribution.errors().forEach(error -> complain(attribution.text(), error));
