@@ -6,6 +6,8 @@ import java.io.IOException;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import sill.inference.Inference;
+import sill.inference.Inferred;
 
 /**
  * The sheet's class, attributed: what the compiler complains of, and what its one tree tells the readers.
@@ -15,7 +17,7 @@ import java.util.Set;
  * @param usages uses of the sheet's own names
  * @param imports the imports on demand that the text rests on
  * @param types types of the bare expressions, by field; {@link ClassText#NO_VALUE} for a call that gives none
- * @param units unit symbols that helpers state, by field
+ * @param inferred dimensions, and where they don't go together
  * @param known names that every worksheet may use, where there is an error that may be about a misspelt one
  * @param formulas what the values mean as mathematics, by field, as far as they do
  */
@@ -25,10 +27,10 @@ record Attribution(
         List<Usage> usages,
         Set<String> imports,
         Map<String, String> types,
-        Map<String, String> units,
+        Inferred inferred,
         KnownNames known,
         Map<String, FormulaReader.Formula> formulas) {
-    static Attribution of(ClassText classText, Compiler compiler) {
+    static Attribution of(ClassText classText, Compiler compiler, SheetUnits units) {
         MappedText text = classText.unit();
         Compiler.Task task = compiler.task(List.of(text.toString()));
         try {
@@ -38,6 +40,7 @@ record Attribution(
             UsageScanner scanner = new UsageScanner(trees, unit, text);
             List<Usage> usages = scanner.usages();
             FieldFacts facts = FieldFacts.of(trees, unit, classText.slots());
+            Inferred inferred = Inference.of(trees, unit, units.seeds(text, classText.slots()));
             List<Compiler.Complaint> errors = task.errors();
             KnownNames known = errors.isEmpty()
                     ? KnownNames.NONE
@@ -48,7 +51,7 @@ record Attribution(
                     usages,
                     scanner.imports(),
                     facts.types(),
-                    facts.units(),
+                    inferred,
                     known,
                     Formulas.of(trees, unit, text.toString(), classText.slots()));
         } catch (IOException e) {

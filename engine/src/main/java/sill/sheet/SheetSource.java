@@ -1,6 +1,7 @@
 package sill.sheet;
 
 import java.util.List;
+import java.util.Map;
 
 /**
  * What the translation starts from: the parts of a worksheet that hold or name Java.
@@ -41,8 +42,20 @@ public record SheetSource(List<GivenField> givens, List<CodeCell> cells, List<Ch
      * A given.
      *
      * @param unit coherent SI unit symbol; empty for a text or a table
+     * @param columns of a table: coherent unit symbols of its number columns
      */
-    public record GivenField(String name, GivenType type, int cell, int line, String unit) {}
+    public record GivenField(
+            String name, GivenType type, int cell, int line, String unit, Map<String, String> columns) {
+        /** A given that is no table. */
+        public GivenField(String name, GivenType type, int cell, int line, String unit) {
+            this(name, type, cell, line, unit, Map.of());
+        }
+
+        /** The same, with what its file's header tells. */
+        public GivenField withColumns(Map<String, String> units) {
+            return new GivenField(name, type, cell, line, unit, units);
+        }
+    }
 
     /**
      * A calculation cell.
@@ -56,8 +69,9 @@ public record SheetSource(List<GivenField> givens, List<CodeCell> cells, List<Ch
      *
      * @param column column of its first character; with the line it names the check
      * @param condition whether it must be a boolean, else a number
+     * @param unit coherent SI unit symbol of its limits; empty when nothing is demanded
      */
-    public record CheckLine(int cell, int line, int column, String expression, boolean condition) {
+    public record CheckLine(int cell, int line, int column, String expression, boolean condition, String unit) {
         Place place() {
             return new Place(line, column);
         }

@@ -103,6 +103,7 @@ public record TranslatedSheet(
      * @param formula the Java it comes from, on one line
      * @param type its type, without packages
      * @param unit coherent SI unit symbol; empty when unknown
+     * @param componentUnits those of a record's components, as far as they are known
      * @param shownIn the unit its caption asks for; empty when none
      * @param meaning what the Java means as mathematics; empty when it has none
      */
@@ -114,6 +115,7 @@ public record TranslatedSheet(
             String formula,
             String type,
             String unit,
+            Map<String, String> componentUnits,
             String shownIn,
             String caption,
             List<String> uses,

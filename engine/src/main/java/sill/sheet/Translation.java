@@ -21,6 +21,7 @@ import sill.worksheet.Problem;
 public final class Translation {
     private final Program program;
     private final Names names;
+    private final SheetUnits units;
     private final Map<String, String> types;
     private final Attribution attribution;
     private final Dependencies dependencies;
@@ -40,6 +41,7 @@ public final class Translation {
         names = Names.of(program);
         snippets = new SnippetFinder(program);
         source.checks().forEach(check -> checkPlaces.put(check.place(), check.place()));
+        units = new SheetUnits(program);
         source.givens().stream()
                 .filter(given -> given.type() == SheetSource.GivenType.MISSING)
                 .forEach(given -> missingGivens.add(given.name()));
@@ -48,7 +50,7 @@ public final class Translation {
         names.problems().forEach(this::add);
         types = new TypeFinder(compiler).find(program);
         findUnavailable();
-        attribution = Attribution.of(ClassText.whole(program, types, names.again()), compiler);
+        attribution = Attribution.of(ClassText.whole(program, types, names.again()), compiler, units);
         attribution.types().forEach(types::putIfAbsent);
         dependencies = new Dependencies(program, names, attribution.usages(), snippets);
         steadiness = new Steadiness(program, types, attribution.usages());
@@ -56,6 +58,7 @@ public final class Translation {
         OrderRules.problems(names, attribution.usages()).forEach(this::add);
         findOpenTypes();
         captionFaults();
+        problems.addAll(units.problems(attribution.inferred(), attribution.text()));
     }
 
     /** Translates a sheet. */
@@ -269,9 +272,8 @@ public final class Translation {
                 snippet.piece().place(field.typeSpan().start()).line(),
                 CodeText.oneLine(formula.of(snippet.piece().text())),
                 TypeNames.withoutPackages(type),
-                caption.unit()
-                        .map(unit -> unit.coherent().symbol())
-                        .orElse(attribution.units().getOrDefault(field.field(), "")),
+                SheetUnits.unit(field, attribution.inferred()),
+                SheetUnits.components(field, attribution.inferred()),
                 caption.unit().map(unit -> unit.symbol()).orElse(""),
                 caption.text(),
                 uses,

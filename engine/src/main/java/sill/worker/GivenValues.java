@@ -24,10 +24,17 @@ record GivenValues(SheetSource source, Map<String, Object> values, List<Problem>
         List<Problem> problems = new ArrayList<>();
         for (GivenField given : job.source().givens()) {
             try {
-                if (given.type() != GivenType.MISSING) {
-                    values.put(given.name(), value(job.values().get(given.name())));
+                if (given.type() == GivenType.TABLE
+                        && job.values().get(given.name()) instanceof Job.GivenValue.File file) {
+                    TableReader.Read read = TableReader.read(file.bytes());
+                    values.put(given.name(), read.table());
+                    givens.add(given.withColumns(read.units()));
+                } else {
+                    if (given.type() != GivenType.MISSING) {
+                        values.put(given.name(), value(job.values().get(given.name())));
+                    }
+                    givens.add(given);
                 }
-                givens.add(given);
             } catch (TableReader.NoTable e) {
                 givens.add(new GivenField(given.name(), GivenType.MISSING, given.cell(), given.line(), ""));
                 problems.add(Problem.error(
@@ -43,15 +50,13 @@ record GivenValues(SheetSource source, Map<String, Object> values, List<Problem>
         return new GivenValues(source, values, problems);
     }
 
-    private static Object value(Job.GivenValue value) throws TableReader.NoTable {
+    private static Object value(Job.GivenValue value) {
         if (value instanceof Job.GivenValue.Number number) {
             return number.value();
         } else if (value instanceof Job.GivenValue.Numbers numbers) {
             return numbers.values();
         } else if (value instanceof Job.GivenValue.Text text) {
             return text.value();
-        } else if (value instanceof Job.GivenValue.File file) {
-            return TableReader.read(file.bytes());
         }
         throw new IllegalArgumentException("given has no value: " + value);
     }

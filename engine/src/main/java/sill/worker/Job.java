@@ -48,7 +48,8 @@ record Job(SheetSource source, Map<String, GivenValue> values, Set<Place> leftOu
                         .number(check.line())
                         .number(check.column())
                         .text(check.expression())
-                        .flag(check.condition()));
+                        .flag(check.condition())
+                        .text(check.unit()));
         out.map(values, Job::value);
         out.list(leftOut, (o, place) -> o.number(place.line()).number(place.column()));
         return out.bytes();
@@ -60,8 +61,8 @@ record Job(SheetSource source, Map<String, GivenValue> values, Set<Place> leftOu
                 i.text(), i.constant(SheetSource.GivenType.values()), i.number(), i.number(), i.text()));
         List<SheetSource.CodeCell> cells =
                 in.list(i -> new SheetSource.CodeCell(i.number(), i.text(), i.number(), i.text()));
-        List<SheetSource.CheckLine> checks =
-                in.list(i -> new SheetSource.CheckLine(i.number(), i.number(), i.number(), i.text(), i.flag()));
+        List<SheetSource.CheckLine> checks = in.list(
+                i -> new SheetSource.CheckLine(i.number(), i.number(), i.number(), i.text(), i.flag(), i.text()));
         Job job = new Job(
                 new SheetSource(givens, cells, checks),
                 in.map(Job::value),

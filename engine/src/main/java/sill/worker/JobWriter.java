@@ -12,6 +12,7 @@ import sill.sheet.SheetSource.CheckLine;
 import sill.sheet.SheetSource.CodeCell;
 import sill.sheet.SheetSource.GivenField;
 import sill.sheet.SheetSource.GivenType;
+import sill.units.Unit;
 import sill.worksheet.Cell;
 import sill.worksheet.Check;
 import sill.worksheet.Given;
@@ -46,17 +47,41 @@ final class JobWriter {
             } else if (cell instanceof Cell.Tolerance tolerance) {
                 for (ToleranceStudy.Target target : tolerance.study().of()) {
                     writer.checks.add(
-                            new CheckLine(cell.number(), target.line(), target.column(), target.text(), false));
+                            new CheckLine(cell.number(), target.line(), target.column(), target.text(), false, ""));
                 }
             } else if (cell instanceof Cell.Checks checks) {
                 for (Check check : checks.checks()) {
                     boolean condition = check.requirement() instanceof Check.Requirement.Holds;
-                    writer.checks.add(
-                            new CheckLine(cell.number(), check.line(), check.column(), check.expression(), condition));
+                    writer.checks.add(new CheckLine(
+                            cell.number(),
+                            check.line(),
+                            check.column(),
+                            check.expression(),
+                            condition,
+                            unit(check.requirement())));
                 }
             }
         }
         return new Job(new SheetSource(writer.givens, writer.cells, writer.checks), writer.values, leftOut);
+    }
+
+    /** The limits' coherent unit; none when they are bare zeros, which fit anything, or when there are no limits. */
+    private static String unit(Check.Requirement requirement) {
+        List<Check.Limit> limits = List.of();
+        if (requirement instanceof Check.Requirement.Within within) {
+            limits = List.of(within.low(), within.high());
+        } else if (requirement instanceof Check.Requirement.AtLeast least) {
+            limits = List.of(least.low());
+        } else if (requirement instanceof Check.Requirement.AtMost most) {
+            limits = List.of(most.high());
+        } else if (requirement instanceof Check.Requirement.EqualTo equal) {
+            limits = List.of(equal.value());
+        }
+        return limits.stream()
+                .filter(limit -> limit.value() != 0 || !limit.unit().equals(Unit.ONE))
+                .map(limit -> limit.unit().coherent().symbol())
+                .findFirst()
+                .orElse("");
     }
 
     private void add(Cell.Givens cell) {

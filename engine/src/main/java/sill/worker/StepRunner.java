@@ -133,7 +133,7 @@ final class StepRunner {
         if (!field.name().isEmpty()) {
             snapshots.keep(field.name(), step.cell(), field.line(), value, datum);
         }
-        Map<String, String> componentUnits = componentUnits(value);
+        Map<String, String> componentUnits = componentUnits(value, field);
         boolean alike = !componentUnits.isEmpty()
                 && componentUnits.size() == ((Datum.Fields) datum).fields().size()
                 && Set.copyOf(componentUnits.values()).size() == 1;
@@ -156,14 +156,15 @@ final class StepRunner {
                 field.meaning());
     }
 
-    /** The units that a helper's record states for its components. */
-    private static Map<String, String> componentUnits(Object value) {
+    /** The units of a record's components: as its type states them, else as its value was inferred. */
+    private static Map<String, String> componentUnits(Object value, TranslatedSheet.ResultField field) {
         Map<String, String> units = new LinkedHashMap<>();
         if (value instanceof Record && !(value instanceof Plot)) {
             for (RecordComponent component : value.getClass().getRecordComponents()) {
                 Unit unit = component.getAnnotation(Unit.class);
-                if (unit != null) {
-                    units.put(component.getName(), unit.value());
+                String inferred = field.componentUnits().get(component.getName());
+                if (unit != null || inferred != null) {
+                    units.put(component.getName(), unit != null ? unit.value() : inferred);
                 }
             }
         }

@@ -39,7 +39,14 @@ final class TableReader {
         }
     }
 
-    static Table read(byte[] bytes) throws NoTable {
+    /**
+     * A table as read.
+     *
+     * @param units coherent unit symbols of the columns whose header names a unit
+     */
+    record Read(Table table, Map<String, String> units) {}
+
+    static Read read(byte[] bytes) throws NoTable {
         quotesArePaired(bytes);
         List<List<String>> rows = new ArrayList<>();
         List<Long> lines = new ArrayList<>();
@@ -88,7 +95,7 @@ final class TableReader {
         return marked ? java.util.Arrays.copyOfRange(bytes, 3, bytes.length) : bytes;
     }
 
-    private static Table table(List<List<String>> rows, List<Long> lines) throws NoTable {
+    private static Read table(List<List<String>> rows, List<Long> lines) throws NoTable {
         List<String> header = rows.get(0);
         otherSeparator(header);
         for (int row = 1; row < rows.size(); row++) {
@@ -99,6 +106,7 @@ final class TableReader {
             }
         }
         Map<String, Object> columns = new LinkedHashMap<>();
+        Map<String, String> units = new LinkedHashMap<>();
         for (int i = 0; i < header.size(); i++) {
             int column = i;
             List<String> fields =
@@ -110,11 +118,14 @@ final class TableReader {
                 throw new NoTable("line 1: found no name for column " + (i + 1));
             }
             Unit unit = bracket < 0 ? Unit.ONE : unit(title.substring(bracket + 1, title.length() - 1));
+            if (bracket >= 0) {
+                units.put(name, unit.coherent().symbol());
+            }
             if (columns.put(name, values(fields, unit)) != null) {
                 throw new NoTable("line 1: found the column " + Quoted.of(name) + " twice, expected each name once");
             }
         }
-        return new Table(columns);
+        return new Read(new Table(columns), units);
     }
 
     /** One column whose name holds what other programs put between fields is more likely several. */

@@ -33,7 +33,8 @@ final class RunNotation {
 
     private void result(Result result, boolean withTrace) {
         String name = result.name().isEmpty() ? "" : result.name() + " ";
-        String unit = result.unit().isEmpty() ? "" : " in " + result.unit();
+        // A pure number needs no word.
+        String unit = result.unit().isEmpty() || result.unit().equals("1") ? "" : " in " + result.unit();
         String shown = result.shownIn().isEmpty() ? "" : ", shown in " + result.shownIn();
         String caption = result.caption().isEmpty() ? "" : " | " + result.caption();
         lines.add(result.address() + " " + name + ": " + result.type() + " = " + datum(result.value()) + unit + shown

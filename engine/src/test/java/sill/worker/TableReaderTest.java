@@ -94,6 +94,6 @@ class TableReaderTest {
     }
 
     private static Table read(String text) throws TableReader.NoTable {
-        return TableReader.read(text.getBytes(StandardCharsets.UTF_8));
+        return TableReader.read(text.getBytes(StandardCharsets.UTF_8)).table();
     }
 }

@@ -53,10 +53,10 @@ class PackageRulesTest {
     }
 
     @Test
-    void theCompilersTreeStaysInTheSheet() {
+    void theCompilersTreeStaysInTheSheetAndTheInference() {
         noClasses()
                 .that()
-                .resideOutsideOfPackage("sill.sheet")
+                .resideOutsideOfPackages("sill.sheet", "sill.inference")
                 .should()
                 .dependOnClassesThat()
                 .resideInAnyPackage(
@@ -102,6 +102,17 @@ class PackageRulesTest {
                 .accessField(java.io.FileDescriptor.class, "out")
                 .orShould()
                 .accessField(java.io.FileDescriptor.class, "err")
+                .check(HOUSE);
+    }
+
+    @Test
+    void theInferenceKnowsUnitsAlone() {
+        classes()
+                .that()
+                .resideInAPackage("sill.inference")
+                .should()
+                .onlyDependOnClassesThat()
+                .resideInAnyPackage("sill.inference", "sill.units", "com.sun.source..", "javax.lang.model..", "java..")
                 .check(HOUSE);
     }
 

@@ -27,7 +27,7 @@ class RunCommandTest {
 
                 :: check Limits
                 half within 2 V .. 4 V | REQ-1
-                half > 1 holds
+                half > 0 holds
                 """);
 
         Cli.Ran ran = Cli.run("run", sheet);
@@ -36,7 +36,7 @@ class RunCommandTest {
         assertThat(ran.out()).isEqualTo("""
                         gate.sill "Gate": 1 of 1 calculation cells ran, 1 value
                           3.1  holds       half within 2 V .. 4 V  2.500 V, limit 2 V .. 4 V, margin +500.0 mV (50 %)
-                          3.2  holds       half > 1 holds          true
+                          3.2  holds       half > 0 holds          true
                         holds: 2 of 2 checks hold
                         record: "FOLDER/gate.html"
                         """.replace(

@@ -1,0 +1,25 @@
+package sill.inference;
+
+import java.util.List;
+import java.util.function.Function;
+
+/**
+ * Runs a body for its arguments. Bare numbers are pure numbers there, unless the body then slips: in that case they are
+ * unknown, so that a bare number passed straight to a method takes the unit that the method wants, as it does with a helper.
+ */
+final class Trial {
+    private Trial() {}
+
+    /** A body's value and the slips in it. */
+    record Outcome(Value value, List<Slip> slips) {}
+
+    static Outcome run(List<Value> arguments, Function<List<Value>, Outcome> body) {
+        Outcome outcome = body.apply(arguments);
+        if (outcome.slips().isEmpty() || !arguments.contains(Quantity.LITERAL)) {
+            return outcome;
+        }
+        return body.apply(arguments.stream()
+                .map(value -> value.equals(Quantity.LITERAL) ? Quantity.UNKNOWN : value)
+                .toList());
+    }
+}
