@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertTimeoutPreemptively;
 
 import java.time.Duration;
 import java.util.List;
+import java.util.stream.IntStream;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.DynamicTest;
 import org.junit.jupiter.api.Test;
@@ -14,7 +15,7 @@ import sill.words.Quoted;
 /** Long and repeated text is read in one pass; the time limit only tells a hang from an end. */
 class HostileTextTest {
     private static final Duration HANG = Duration.ofMinutes(5);
-    private static final int REPEATS = 100_000;
+    private static final int REPEATS = 50_000;
     private static final int TEN_MEGABYTES = 10_000_000;
 
     private static final List<String> TOKENS = List.of(
@@ -115,12 +116,13 @@ class HostileTextTest {
             "sill 1\ntitle: T\n:: tolerance S\nmethod: ",
             "sill 1\ntitle: T\n:: tolerance S\nvary: ");
 
+    /** Neighbours in the list take turns with the beginnings: all pairs would take minutes of a build server. */
     @TestFactory
-    Stream<DynamicTest> everyTokenAHundredThousandTimes() {
-        return TOKENS.stream()
-                .map(token -> DynamicTest.dynamicTest(Quoted.of(token), () -> {
-                    for (String beginning : BEGINNINGS) {
-                        reads(beginning + token.repeat(REPEATS));
+    Stream<DynamicTest> everyTokenFiftyThousandTimes() {
+        return IntStream.range(0, TOKENS.size())
+                .mapToObj(i -> DynamicTest.dynamicTest(Quoted.of(TOKENS.get(i)), () -> {
+                    for (int j = i % 2; j < BEGINNINGS.size(); j += 2) {
+                        reads(BEGINNINGS.get(j) + TOKENS.get(i).repeat(REPEATS));
                     }
                 }));
     }
