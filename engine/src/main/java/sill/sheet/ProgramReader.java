@@ -87,11 +87,8 @@ final class ProgramReader {
     }
 
     private static Problem problem(Piece piece, SnippetParser.Fault fault) {
-        return Wording.problem(
-                piece,
-                fault.offset(),
-                new Compiler.Complaint(fault.offset(), fault.code(), fault.message()),
-                List.of());
+        Compiler.Complaint complaint = new Compiler.Complaint(fault.offset(), fault.code(), fault.message());
+        return Wording.problem(piece, fault.offset(), complaint, Wording.hint(complaint));
     }
 
     /** The comment behind a snippet, on the line it ends on. */

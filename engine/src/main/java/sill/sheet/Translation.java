@@ -2,6 +2,7 @@ package sill.sheet;
 
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.HashMap;
 import java.util.HashSet;
 import java.util.IdentityHashMap;
 import java.util.LinkedHashMap;
@@ -34,6 +35,7 @@ public final class Translation {
     private final Set<String> missingGivens = new HashSet<>();
     private final Set<String> unavailable = new HashSet<>();
     private final Map<Snippet, Set<String>> waits = new IdentityHashMap<>();
+    private final Map<String, String> hints = new HashMap<>();
     private final SnippetFinder snippets;
 
     private Translation(SheetSource source, Compiler compiler, Splitter splitter) {
@@ -150,14 +152,15 @@ public final class Translation {
             return;
         }
         snippet.filter(each -> each.kind() == Snippet.Kind.IMPORT).ifPresent(brokenImports::add);
-        add(Wording.problem(origin.piece(), origin.offset(), complaint, knownWords(complaint)));
+        // The same slip may stand on many lines, and a search among many names takes its time.
+        String hint = unknown.isEmpty()
+                ? Wording.hint(complaint)
+                : hints.computeIfAbsent(unknown, name -> Wording.meant(name, knownWords(complaint)));
+        add(Wording.problem(origin.piece(), origin.offset(), complaint, hint));
     }
 
     /** What a misspelt name may have been meant to be, the worksheet's own names first. */
     private List<String> knownWords(Compiler.Complaint complaint) {
-        if (Wording.unknownName(complaint).isEmpty()) {
-            return List.of();
-        }
         boolean type = Wording.isAboutType(complaint);
         List<String> words = new ArrayList<>();
         for (Names.Declaration declaration : names.declarations().values()) {
@@ -189,7 +192,7 @@ public final class Translation {
                         snippet.piece(),
                         field.typeSpan().start(),
                         Compiler.Complaint.ours("found no type for " + Quoted.of(name)),
-                        List.of()));
+                        "Write it in place of 'var'."));
             }
         });
     }

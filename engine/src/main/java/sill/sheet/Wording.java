@@ -1,6 +1,7 @@
 package sill.sheet;
 
 import java.util.Collection;
+import java.util.List;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
@@ -47,22 +48,18 @@ final class Wording {
         return symbol.find() && symbol.group(1).equals("class");
     }
 
-    /**
-     * A complaint as a problem.
-     *
-     * @param offset its place in the piece
-     * @param known names to suggest when one is misspelt
-     */
-    static Problem problem(Piece piece, int offset, Compiler.Complaint complaint, Collection<String> known) {
+    /** A complaint as a problem of a piece, at an offset of it. */
+    static Problem problem(Piece piece, int offset, Compiler.Complaint complaint, String hint) {
         Place place = piece.place(offset);
-        String unknown = unknownName(complaint);
-        String said = unknown.isEmpty() ? said(complaint) : unknown(complaint.message());
-        String hint = unknown.isEmpty() ? hint(complaint) : NearestWord.hint(unknown, without(unknown, known), "");
+        String said = unknownName(complaint).isEmpty() ? said(complaint) : unknown(complaint.message());
         return Problem.error(place.line(), place.column(), piece.cell(), piece.where() + ": " + said, hint);
     }
 
-    private static Collection<String> without(String word, Collection<String> words) {
-        return words.stream().filter(each -> !each.equals(word)).toList();
+    /** What an unknown name may have been meant to be; empty when no known word is near. */
+    static String meant(String unknown, Collection<String> known) {
+        List<String> others =
+                known.stream().filter(word -> !word.equals(unknown)).toList();
+        return NearestWord.hint(unknown, others, "");
     }
 
     private static String unknown(String message) {
@@ -124,7 +121,8 @@ final class Wording {
                 .strip();
     }
 
-    private static String hint(Compiler.Complaint complaint) {
+    /** How to mend what is not about an unknown name; empty when nothing sensible can be said. */
+    static String hint(Compiler.Complaint complaint) {
         return switch (complaint.code()) {
             case "compiler.err.expected",
                     "compiler.err.expected2",

@@ -25,6 +25,11 @@ final class PromptSplitter implements Splitter {
     private static final Pattern GOES_ON =
             Pattern.compile("\\.(?!\\d)|[?:*/%=&|^,]|!=|->|[<>]=?\\s|>>|(?:else|catch|finally|instanceof)\\b");
 
+    private static final String OPENING = "([{";
+    private static final String CLOSING = ")]}";
+
+    private static final Pattern NAME_OR_CALL = Pattern.compile("(?!(?:static|final|public|private|protected|new|throw|return)\\b)[A-Za-z_][\\w.]*(?:\\(.*\\))?");
+
     private static final Pattern SIGN = Pattern.compile("[+-](?![+-])");
 
     private final SourceCodeAnalysis analysis;
@@ -48,8 +53,11 @@ final class PromptSplitter implements Splitter {
 
     private int snippetEnd(String source, String code, int start) {
         int lineEnd = lineEnd(code, start);
-        if (isPlainStatement(code.substring(start, lineEnd).strip())) {
-            return CodeText.endOfCode(code, start, lineEnd);
+        if (isPlain(code.substring(start, lineEnd).strip())) {
+            int end = CodeText.endOfCode(code, start, lineEnd);
+            if (!goesOn(code, start, end, skipBlank(code, end))) {
+                return end;
+            }
         }
         while (true) {
             // Lines with open brackets can't be complete: no need to ask.
@@ -88,23 +96,34 @@ final class PromptSplitter implements Splitter {
         return at - (code.lastIndexOf('\n', at - 1) + 1);
     }
 
-    private static boolean isPlainStatement(String line) {
-        return line.endsWith(";")
-                && line.indexOf(';') == line.length() - 1
-                && line.indexOf('{') < 0
-                && line.indexOf('}') < 0
-                && line.indexOf('@') < 0
-                && !openBrackets(line, 0, line.length())
-                && !MAY_GO_ON.matcher(line).matches();
+    /** Whether a line is for sure one snippet and no more: a statement, a method on one line, a name or a call. */
+    private static boolean isPlain(String line) {
+        if (line.isEmpty() || line.indexOf('@') >= 0 || MAY_GO_ON.matcher(line).matches()) {
+            return false;
+        }
+        char last = line.charAt(line.length() - 1);
+        int depth = 0;
+        for (int i = 0; i < line.length(); i++) {
+            char c = line.charAt(i);
+            if (OPENING.indexOf(c) >= 0) {
+                depth++;
+            } else if (CLOSING.indexOf(c) >= 0) {
+                depth--;
+            }
+            boolean ends = depth == 0 && (c == ';' || c == '}');
+            if (depth < 0 || (ends && i < line.length() - 1)) {
+                return false;
+            }
+        }
+        return depth == 0 && (last == ';' || last == '}' || NAME_OR_CALL.matcher(line).matches());
     }
 
     private static boolean openBrackets(String code, int start, int end) {
         int open = 0;
         for (int i = start; i < end; i++) {
-            char c = code.charAt(i);
-            if (c == '(' || c == '{' || c == '[') {
+            if (OPENING.indexOf(code.charAt(i)) >= 0) {
                 open++;
-            } else if (c == ')' || c == '}' || c == ']') {
+            } else if (CLOSING.indexOf(code.charAt(i)) >= 0) {
                 open--;
             }
         }

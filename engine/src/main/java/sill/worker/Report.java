@@ -26,8 +26,20 @@ sealed interface Report {
     /** All is done; these problems show only at the end. */
     record Finished(List<Problem> problems) implements Report {}
 
-    /** The worker itself went wrong. */
-    record Failed(String what) implements Report {}
+    /** The worker could not do its work; the hint says what may help. */
+    record Failed(String what, String hint) implements Report {
+        static Failed of(Throwable thrown) {
+            for (Throwable cause = thrown; cause != null; cause = cause.getCause()) {
+                if (cause instanceof StackOverflowError) {
+                    return new Failed(
+                            "it is nested too deeply for the compiler", "Give parts of long expressions a name.");
+                }
+            }
+            StackTraceElement[] frames = thrown.getStackTrace();
+            String where = frames.length == 0 ? "" : " at " + frames[0];
+            return new Failed("a fault of Sill itself, " + thrown + where, "Please report it with the worksheet.");
+        }
+    }
 
     /** The message's bytes. */
     default byte[] bytes() {
@@ -50,7 +62,7 @@ sealed interface Report {
         } else if (this instanceof Finished finished) {
             out.number(4).list(finished.problems(), ValueWire::problem);
         } else if (this instanceof Failed failed) {
-            out.number(5).text(failed.what());
+            out.number(5).text(failed.what()).text(failed.hint());
         }
         return out.bytes();
     }
@@ -85,7 +97,7 @@ sealed interface Report {
                         in.text(),
                         in.list(ValueWire::problem));
             case 4 -> new Finished(in.list(ValueWire::problem));
-            case 5 -> new Failed(in.text());
+            case 5 -> new Failed(in.text(), in.text());
             default -> throw new WireIn.BadMessage("there is no kind of report " + kind);
         };
     }

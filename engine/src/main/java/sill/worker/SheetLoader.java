@@ -6,7 +6,8 @@ import jdk.jshell.execution.LoaderDelegate;
 import jdk.jshell.spi.ExecutionControl.ClassBytecodes;
 
 /**
- * Defines the classes of a sheet. They see the JDK, the stdlib and Commons Math, and nothing of the engine.
+ * Defines the classes of a sheet. They see the JDK, the stdlib and Commons Math, and nothing of the engine; their functions
+ * are those of {@code StrictMath}.
  */
 final class SheetLoader implements LoaderDelegate {
     private final Loader loader = new Loader();
@@ -14,7 +15,7 @@ final class SheetLoader implements LoaderDelegate {
     @Override
     public void load(ClassBytecodes[] classes) {
         for (ClassBytecodes bytecodes : classes) {
-            loader.pending.put(bytecodes.name(), bytecodes.bytecodes());
+            loader.known.put(bytecodes.name(), StrictFunctions.in(bytecodes.bytecodes()));
         }
     }
 
@@ -44,8 +45,7 @@ final class SheetLoader implements LoaderDelegate {
     }
 
     private static final class Loader extends ClassLoader {
-        final Map<String, byte[]> pending = new HashMap<>();
-        final Map<String, byte[]> known = pending;
+        final Map<String, byte[]> known = new HashMap<>();
 
         Loader() {
             super(SheetLoader.class.getClassLoader());
@@ -61,7 +61,7 @@ final class SheetLoader implements LoaderDelegate {
 
         @Override
         protected Class<?> findClass(String name) throws ClassNotFoundException {
-            byte[] bytes = pending.get(name);
+            byte[] bytes = known.get(name);
             if (bytes == null) {
                 throw new ClassNotFoundException(name);
             }

@@ -86,14 +86,16 @@ public final class SheetRun implements AutoCloseable {
             }
             if (heard.end().isPresent()) {
                 WorkerProcess.End end = heard.end().get();
-                return Optional.of(Gathered.Stop.at(at, end.words(), end.hint()));
+                // While it translates no cell of the worksheet has run.
+                boolean ours = at.cell() == 0 && end.fault();
+                return Optional.of(Gathered.Stop.at(at, end.words(), ours ? REPORT : end.hint()));
             }
             Report report = heard.report().orElseThrow();
             if (report instanceof Report.Begun begun) {
                 at = begun;
                 progress.begins(begun.cell());
             } else if (report instanceof Report.Failed failed) {
-                return Optional.of(Gathered.Stop.at(at, "a fault of Sill itself, " + failed.what(), REPORT));
+                return Optional.of(Gathered.Stop.at(at, failed.what(), failed.hint()));
             } else {
                 gathered.take(report);
                 if (report instanceof Report.Finished) {

@@ -48,8 +48,9 @@ public final class WorkerMain {
         System.setIn(InputStream.nullInputStream());
         try {
             new JobRun(worker.compiler, output, worker::report).run(Job.of(job), worker.evaluator);
-        } catch (ReflectiveOperationException | RuntimeException | StackOverflowError e) {
-            worker.report(new Report.Failed(e + " at " + Arrays.toString(Arrays.copyOf(e.getStackTrace(), 5))));
+        } catch (Throwable thrown) {
+            // Errors of the compiler among them: whatever it was, the parent is to know.
+            worker.report(Report.Failed.of(thrown));
         }
         reports.flush();
         // Threads that worksheet code left behind must not keep the process.

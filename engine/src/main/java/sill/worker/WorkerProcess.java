@@ -16,6 +16,8 @@ import java.util.Optional;
 import java.util.concurrent.BlockingQueue;
 import java.util.concurrent.LinkedBlockingQueue;
 import java.util.concurrent.TimeUnit;
+import java.util.regex.Pattern;
+import java.util.stream.Collectors;
 import java.util.stream.Stream;
 
 /** A running worker, seen from the parent. What it says is data; a worker that talks nonsense is a dead one. */
@@ -33,8 +35,14 @@ final class WorkerProcess implements AutoCloseable {
     private final Path folder;
     private final BlockingQueue<Heard> events = new LinkedBlockingQueue<>(1024);
 
-    /** How a worker ended, and what its author may do about it. */
-    record End(String words, String hint) {}
+    /**
+     * How a worker ended.
+     *
+     * @param words how, as in {@code it ran out of memory}
+     * @param hint how the worksheet's author may mend it
+     * @param fault whether it is a fault of Sill unless a cell caused it
+     */
+    record End(String words, String hint, boolean fault) {}
 
     /** A report, the worker's end, or neither within the time. */
     record Heard(Optional<Report> report, Optional<End> end) {
@@ -89,10 +97,18 @@ final class WorkerProcess implements AutoCloseable {
                 "-Djava.awt.headless=true",
                 "-Djava.io.tmpdir=" + folder,
                 "-cp",
-                System.getProperty("java.class.path"),
+                absolute(System.getProperty("java.class.path")),
                 WorkerMain.class.getName(),
                 WorksheetClassPath.text()));
         return command;
+    }
+
+    /** The worker runs in a folder of its own. */
+    private static String absolute(String classPath) {
+        return Pattern.compile(File.pathSeparator, Pattern.LITERAL)
+                .splitAsStream(classPath)
+                .map(entry -> Path.of(entry).toAbsolutePath().toString())
+                .collect(Collectors.joining(File.pathSeparator));
     }
 
     void send(Job job) throws IOException {
@@ -139,7 +155,7 @@ final class WorkerProcess implements AutoCloseable {
             // The stream ends when the process does; its exit status tells more.
         } catch (WireIn.BadMessage e) {
             end = Optional.of(new End(
-                    "its worker sent what is no report: " + e.getMessage(), "Leave the process's own output alone."));
+                    "its worker sent what is no report: " + e.getMessage(), "Leave the process's own output alone.", true));
             process.destroyForcibly();
         } catch (InterruptedException e) {
             Thread.currentThread().interrupt();
@@ -155,14 +171,12 @@ final class WorkerProcess implements AutoCloseable {
 
     private static End end(int exit, byte[] lastErrors) {
         if (new String(lastErrors, StandardCharsets.UTF_8).contains("OutOfMemoryError")) {
-            return new End("it ran out of memory", "Keep fewer values, or allow more with --memory.");
+            return new End("it ran out of memory", "Keep fewer values, or allow more with --memory.", false);
         }
-        boolean own = exit < 128;
-        return new End(
-                "its worker ended with status " + exit,
-                own
-                        ? "Leave out what ends the process, such as System.exit."
-                        : "Something outside ended the process. Run again.");
+        String ended = "its worker ended with status " + exit;
+        return exit < 128
+                ? new End(ended, "Leave out what ends the process, such as System.exit.", true)
+                : new End(ended, "Something outside ended the process. Run again.", false);
     }
 
     private static byte[] drain(InputStream errors) {
