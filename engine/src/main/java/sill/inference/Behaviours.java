@@ -16,6 +16,7 @@ final class Behaviours {
     private static final int DEEPEST = 24;
 
     private final SheetTree tree;
+    private final Wording wording;
     private final SlipLog log;
     private final Walker walker;
     private final Calls calls;
@@ -23,8 +24,9 @@ final class Behaviours {
     private final Map<Tree, Boolean> used = new java.util.IdentityHashMap<>();
     private int depth;
 
-    Behaviours(SheetTree tree, SlipLog log, Walker walker, Calls calls) {
+    Behaviours(SheetTree tree, Wording wording, SlipLog log, Walker walker, Calls calls) {
         this.tree = tree;
+        this.wording = wording;
         this.log = log;
         this.walker = walker;
         this.calls = calls;
@@ -56,7 +58,7 @@ final class Behaviours {
             used.put(lambda, true);
             unused.remove(lambda);
             List<Value> values = arguments.stream().map(Operand::value).toList();
-            Trial.Outcome outcome = Trial.run(values, given -> body(lambda, behaviour.captured(), given));
+            Trial.Outcome outcome = Trial.run(values, given -> body(lambda, behaviour.captured(), given, call));
             log.addAll(outcome.slips());
             return outcome.value();
         } finally {
@@ -75,13 +77,16 @@ final class Behaviours {
         }
     }
 
-    private Trial.Outcome body(LambdaExpressionTree lambda, Environment captured, List<Value> arguments) {
+    private Trial.Outcome body(LambdaExpressionTree lambda, Environment captured, List<Value> arguments, Tree call) {
         log.open();
         Environment env = captured.ofLambda(new Environment.Frame(captured.frame().self, captured.frame().calledAt));
         for (int i = 0; i < lambda.getParameters().size(); i++) {
             VariableTree parameter = lambda.getParameters().get(i);
             Value value = i < arguments.size() ? arguments.get(i) : Quantity.UNKNOWN;
-            tree.element(parameter).ifPresent(element -> env.set(element, value));
+            tree.element(parameter).ifPresent(element -> {
+                env.set(element, value);
+                wording.called(element, tree.start(call));
+            });
         }
         Value value;
         if (lambda.getBody() instanceof BlockTree block) {

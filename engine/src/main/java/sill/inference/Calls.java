@@ -36,7 +36,7 @@ final class Calls {
         this.walker = walker;
         Rules rules = new Rules(tree, wording, log);
         math = new MathRules(rules, new Constants(tree));
-        behaviours = new Behaviours(tree, log, walker, this);
+        behaviours = new Behaviours(tree, wording, log, walker, this);
         helpers = new HelperUnits(rules, wording, behaviours);
         bodies = new MethodBodies(tree, fields, wording, log, walker, helpers);
         library = new Library(tree, rules, behaviours, targets);

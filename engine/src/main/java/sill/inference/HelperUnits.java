@@ -80,6 +80,7 @@ final class HelperUnits {
     /** Arguments as the worksheet's own method states them, where it does. */
     List<Value> asStated(ExecutableElement method, List<Operand> arguments) {
         List<Value> values = new ArrayList<>();
+        boolean swapped = false;
         for (int i = 0; i < arguments.size(); i++) {
             Operand argument = arguments.get(i);
             Quantity stated = method.getParameters().isEmpty() ? Quantity.UNKNOWN : unitOf(method, i);
@@ -87,8 +88,11 @@ final class HelperUnits {
                 values.add(argument.value());
                 continue;
             }
-            if (argument.quantity().kind() != Quantity.Kind.LITERAL && !stated.fits(argument.quantity())) {
-                slip(method, i, -1, argument, stated, arguments);
+            boolean fits = argument.quantity().kind() == Quantity.Kind.LITERAL || stated.fits(argument.quantity());
+            if (!fits && !swapped) {
+                int other = swappedWith(method, arguments, i, argument.quantity());
+                swapped = other > i;
+                slip(method, i, other, argument, stated, arguments);
             }
             values.add(stated);
         }
@@ -145,7 +149,7 @@ final class HelperUnits {
                 rules.unfit(
                         result,
                         to.dimension(),
-                        name(method) + " expects a function that gives " + to.said() + ", found one that gives "
+                        name(method) + " expects a function that gives " + to.said() + ", found "
                                 + wording.said(result),
                         "");
             }
@@ -194,7 +198,11 @@ final class HelperUnits {
 
     private static String name(ExecutableElement method) {
         String type = method.getEnclosingElement().getSimpleName().toString();
-        return method.getKind() == ElementKind.CONSTRUCTOR ? "new " + type : type + "." + method.getSimpleName();
+        if (method.getKind() == ElementKind.CONSTRUCTOR) {
+            return "new " + type;
+        }
+        // The sheet's own class has a name that no worksheet says.
+        return (type.startsWith("$") ? "" : type + ".") + method.getSimpleName();
     }
 
     /** A variable that one argument settled stays; bare numbers and unknown ones settle nothing. */

@@ -108,8 +108,7 @@ final class MathRules {
         rules.unfit(
                 added,
                 product.quantity().dimension(),
-                "fma adds " + added.quantity().said() + " to a product in "
-                        + product.quantity().said(),
+                "fma expects " + product.quantity().said() + " as argument 3, found " + rules.said(added),
                 "");
         return Quantity.UNKNOWN;
     }

@@ -171,10 +171,10 @@ final class MethodBodies {
     /** The record that its canonical constructor makes of its parameters. */
     private Value made(Element constructor, List<VariableElement> parameters, Environment env) {
         Map<String, Value> parts = new LinkedHashMap<>();
-        // A record has no caption to say what its bare numbers measure.
+        // No caption says what the bare numbers of a record measure: they fit anything.
         parameters.forEach(parameter -> {
             Value value = env.get(parameter);
-            parts.put(parameter.getSimpleName().toString(), value.equals(Quantity.LITERAL) ? Quantity.UNKNOWN : value);
+            parts.put(parameter.getSimpleName().toString(), value.equals(Quantity.LITERAL) ? Quantity.ANY : value);
         });
         TypeElement type = (TypeElement) constructor.getEnclosingElement();
         List<String> components = type.getRecordComponents().stream()

@@ -111,7 +111,8 @@ final class Rules {
         String unit = found.quantity().said();
         String hint = limits.isPure()
                 ? "Give the limit its unit, such as '1 " + unit + "'."
-                : found.quantity().isPure() ? wording.mend(found, limits.said()) : "";
+                : "Correct the expression, or give the limit "
+                        + (found.quantity().isPure() ? "without a unit." : "in " + unit + ".");
         log.add(new Slip(
                 "",
                 tree.start(found.tree()),
@@ -119,6 +120,11 @@ final class Rules {
                 "the limit is " + (limits.isPure() ? "a pure number" : "in " + limits.said()) + ", found "
                         + wording.said(found),
                 hint));
+    }
+
+    /** An operand in words. */
+    String said(Operand operand) {
+        return wording.said(operand);
     }
 
     /** Logs a slip of two operands at an offset. */

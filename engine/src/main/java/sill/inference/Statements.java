@@ -177,7 +177,8 @@ final class Statements extends SimpleTreeVisitor<Boolean, Environment> {
     public Boolean visitEnhancedForLoop(EnhancedForLoopTree loop, Environment env) {
         Value element = walker.value(loop.getExpression(), env);
         repeat(env, round -> {
-            tree.element(loop.getVariable()).ifPresent(variable -> round.set(variable, element));
+            tree.element(loop.getVariable())
+                    .ifPresent(variable -> targets.step(variable, element, tree.start(loop.getVariable()), round));
             run(loop.getStatement(), round);
         });
         return false;

@@ -65,6 +65,12 @@ final class Targets {
         wording.set(variable, offset);
     }
 
+    /** A loop's variable, which stands for the elements themselves. */
+    void step(Element variable, Value element, int offset, Environment env) {
+        env.set(variable, element);
+        wording.set(variable, offset);
+    }
+
     /** A statement whose value the sheet shows, though no variable holds it. */
     void show(String field, Operand shown, int offset) {
         Value value = shown.value() instanceof Quantity quantity ? quantity.named() : shown.value();

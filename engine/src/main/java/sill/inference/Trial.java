@@ -4,8 +4,8 @@ import java.util.List;
 import java.util.function.Function;
 
 /**
- * Runs a body for its arguments. Bare numbers are pure numbers there, unless the body then slips: in that case they are
- * unknown, so that a bare number passed straight to a method takes the unit that the method wants, as it does with a helper.
+ * Runs a body for its arguments. Bare numbers are pure numbers there, unless the body then slips: in that case they fit
+ * anything, so that a bare number passed straight to a method takes the unit that the method wants, as it does with a helper.
  */
 final class Trial {
     private Trial() {}
@@ -19,7 +19,7 @@ final class Trial {
             return outcome;
         }
         return body.apply(arguments.stream()
-                .map(value -> value.equals(Quantity.LITERAL) ? Quantity.UNKNOWN : value)
+                .map(value -> value.equals(Quantity.LITERAL) ? Quantity.ANY : value)
                 .toList());
     }
 }

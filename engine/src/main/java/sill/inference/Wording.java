@@ -62,6 +62,10 @@ final class Wording {
         } else if (unit.equals("K") && text(expression).equals("273.15")) {
             return "A temperature is shown in °C by its caption: // [°C].";
         }
+        if (text(expression).equals("1")) {
+            return "What is added to 1 must be a pure number: divide it by a value in " + unit
+                    + ", or give its factors their units.";
+        }
         return "Make " + text(expression) + " a given, or state its unit in the caption of a variable.";
     }
 
@@ -91,7 +95,8 @@ final class Wording {
         }
         if (element.getKind() == ElementKind.PARAMETER) {
             Integer call = calledAt.get(element);
-            return call == null ? "" : ", from the call on line " + line(call);
+            boolean far = call != null && line(call) != line(tree.start(expression));
+            return far ? ", from the call on line " + line(call) : "";
         }
         Integer offset = setAt.get(element);
         return offset == null ? "" : ", set on line " + line(offset);

@@ -60,10 +60,13 @@ final class SheetUnits {
             public String text(int start, int end) {
                 MappedText.Origin from = text.origin(start);
                 MappedText.Origin to = text.origin(end - 1);
-                boolean copied = from.piece() == to.piece() && to.offset() >= from.offset();
-                return copied
-                        ? from.piece().text().substring(from.offset(), to.offset() + 1)
-                        : text.toString().substring(start, end);
+                String made = text.toString().substring(start, end);
+                if (from.piece() != to.piece() || to.offset() < from.offset()) {
+                    return made;
+                }
+                String written = from.piece().text().substring(from.offset(), to.offset() + 1);
+                // They differ by the line breaks that tell calls apart, or else by what was made up.
+                return written.replace("\n", "").equals(made.replace("\n", "")) ? written : made;
             }
         };
     }

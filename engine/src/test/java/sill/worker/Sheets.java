@@ -27,6 +27,10 @@ final class Sheets {
 
     private Sheets() {}
 
+    static Compiler compiler() {
+        return COMPILER;
+    }
+
     /** A worksheet of one calculation cell, which is cell 1 and starts on line 4. */
     static String calculation(String java) {
         return "sill 1\ntitle: T\n:: calc C\n" + java;

@@ -30,10 +30,10 @@ public final class Plots {
     public static Plot line(
             String title,
             String xLabel,
-            String xUnit,
+            @Unit("?x") String xUnit,
             @Unit("?x") double[] xs,
             String yLabel,
-            String yUnit,
+            @Unit("?y") String yUnit,
             @Unit("?y") double[] ys) {
         return Plot.described(
                 title,
@@ -60,12 +60,12 @@ public final class Plots {
     public static Plot line(
             String title,
             String xLabel,
-            String xUnit,
+            @Unit("?x") String xUnit,
             @Unit("?x") double low,
             @Unit("?x") double high,
             String yLabel,
-            String yUnit,
-            DoubleUnaryOperator function) {
+            @Unit("?y") String yUnit,
+            @Unit("?x -> ?y") DoubleUnaryOperator function) {
         Arguments.below("low", low, "high", high, "");
         double[] xs = sampled(i -> low + (high - low) * (i / STEPS));
         xs[STEPS] = high;
@@ -89,8 +89,8 @@ public final class Plots {
             @Unit("Hz") double low,
             @Unit("Hz") double high,
             String yLabel,
-            String yUnit,
-            DoubleUnaryOperator function) {
+            @Unit("?y") String yUnit,
+            @Unit("Hz -> ?y") DoubleUnaryOperator function) {
         Arguments.positive("low", low, "Hz");
         Arguments.below("low", low, "high", high, "Hz");
         double[] xs = sampled(i -> low * StrictMath.pow(high / low, i / STEPS));
@@ -148,7 +148,7 @@ public final class Plots {
      * @throws IllegalArgumentException when the unit is not coherent, or the values are none or not as many
      */
     public static Plot signals(
-            String title, @Unit("s") double[] times, String label, String unit, @Unit("?") double[] values) {
+            String title, @Unit("s") double[] times, String label, @Unit("?") String unit, @Unit("?") double[] values) {
         return line(title, "time", "s", times, label, unit, values);
     }
 
