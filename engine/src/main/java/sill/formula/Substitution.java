@@ -18,8 +18,8 @@ import sill.formula.Expression.Name;
  * alike, so that what comes out can be evaluated as it stands.
  */
 final class Substitution {
-    /** Larger expressions are no reading matter; forms within forms multiply. */
-    static final int MOST_NODES = 600;
+    /** Forms within forms multiply; far more than any line that is read has. */
+    static final int MOST_NODES = 5000;
 
     private final Values values;
     private final int digits;
@@ -87,6 +87,17 @@ final class Substitution {
         return expression;
     }
 
+    /** Counts an argument wherever it is put in: shared parts cost memory once and time each time. */
+    private void count(Expression expression) {
+        if (++nodes[0] > MOST_NODES) {
+            throw new TooLarge();
+        }
+        Parts.of(expression).forEach(this::count);
+        if (expression instanceof Defined call) {
+            call.forms().forEach(form -> count(form.body()));
+        }
+    }
+
     List<Expression> all(List<Expression> expressions) {
         List<Expression> done = new ArrayList<>();
         for (Expression expression : expressions) {
@@ -98,6 +109,7 @@ final class Substitution {
     private Expression name(Name name) {
         List<Expression> argument = parameters.get(name.name());
         if (argument != null) {
+            argument.forEach(this::count);
             return argument.size() == 1 ? argument.get(0) : name;
         }
         return values.inPlaceOf(name.name(), List.of(), digits).orElse(name);

@@ -27,6 +27,9 @@ public final class WorkingOut {
 
     private static final int MOST_LINES = 12;
 
+    /** Larger formulas are no reading matter. */
+    private static final int MOST_PARTS = 150;
+
     private final String name;
     private final Expression expression;
     private final Values values;
@@ -95,6 +98,10 @@ public final class WorkingOut {
         }
 
         private void line(Expression left, Expression formula, Expression closed, String shown) {
+            if (Math.max(size(formula), size(closed)) > MOST_PARTS) {
+                agrees &= !lines.isEmpty();
+                return;
+            }
             boolean bare = formula instanceof Expression.Literal;
             lines.add(new Working.Line(
                     Optional.ofNullable(left),
@@ -171,16 +178,16 @@ public final class WorkingOut {
         }
 
         private Expression left(Defined call, Expression.Form form, boolean named) {
-            if (!form.component().isEmpty()) {
+            if (call.kind() == Kind.OF_RECORD) {
+                return call;
+            } else if (call.kind() == Kind.RECORD) {
                 Name component = new Name(form.component());
                 return named && !name.isEmpty() ? new Component(new Name(name), form.component()) : component;
             }
-            if (call.kind() == Kind.OF_RECORD) {
-                return call;
-            }
             List<Expression> names = new ArrayList<>();
             call.parameters().forEach(parameter -> names.add(new Name(parameter.name())));
-            return new Defined(call.kind(), call.name(), call.parameters(), names, List.of());
+            Defined head = new Defined(call.kind(), call.name(), call.parameters(), names, List.of());
+            return form.component().isEmpty() ? head : new Component(head, form.component());
         }
 
         /** Arguments as numbers with the units of the parameters they are passed to. */
@@ -203,6 +210,14 @@ public final class WorkingOut {
             OptionalDouble value = Evaluation.of(argument, values);
             return value.isEmpty() ? argument : new Shown(values.quantity(value.getAsDouble(), unit, digits));
         }
+    }
+
+    private static int size(Expression expression) {
+        int size = 1;
+        for (Expression part : Parts.of(expression)) {
+            size += size(part);
+        }
+        return size;
     }
 
     /** Whether a helper states this very unit: a question mark stands for any. */
