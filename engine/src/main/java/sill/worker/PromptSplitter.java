@@ -28,7 +28,8 @@ final class PromptSplitter implements Splitter {
     private static final String OPENING = "([{";
     private static final String CLOSING = ")]}";
 
-    private static final Pattern NAME_OR_CALL = Pattern.compile("(?!(?:static|final|public|private|protected|new|throw|return)\\b)[A-Za-z_][\\w.]*(?:\\(.*\\))?");
+    private static final Pattern NAME_OR_CALL = Pattern.compile(
+            "(?!(?:static|final|public|private|protected|new|throw|return)\\b)[A-Za-z_][\\w.]*(?:\\(.*\\))?");
 
     private static final Pattern SIGN = Pattern.compile("[+-](?![+-])");
 
@@ -115,7 +116,8 @@ final class PromptSplitter implements Splitter {
                 return false;
             }
         }
-        return depth == 0 && (last == ';' || last == '}' || NAME_OR_CALL.matcher(line).matches());
+        return depth == 0
+                && (last == ';' || last == '}' || NAME_OR_CALL.matcher(line).matches());
     }
 
     private static boolean openBrackets(String code, int start, int end) {

@@ -15,8 +15,8 @@ import java.util.Set;
 final class StrictFunctions {
     /** Those whose documentation in {@code Math} allows an error, other than in {@code StrictMath}. */
     private static final Set<String> FUNCTIONS = Set.of(
-            "sin", "cos", "tan", "asin", "acos", "atan", "atan2", "sinh", "cosh", "tanh", "exp", "expm1", "log", "log10",
-            "log1p", "pow", "cbrt", "hypot");
+            "sin", "cos", "tan", "asin", "acos", "atan", "atan2", "sinh", "cosh", "tanh", "exp", "expm1", "log",
+            "log10", "log1p", "pow", "cbrt", "hypot");
 
     private static final int COUNT_AT = 8;
     private static final int POOL_AT = 10;

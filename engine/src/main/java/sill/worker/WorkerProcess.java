@@ -155,7 +155,9 @@ final class WorkerProcess implements AutoCloseable {
             // The stream ends when the process does; its exit status tells more.
         } catch (WireIn.BadMessage e) {
             end = Optional.of(new End(
-                    "its worker sent what is no report: " + e.getMessage(), "Leave the process's own output alone.", true));
+                    "its worker sent what is no report: " + e.getMessage(),
+                    "Leave the process's own output alone.",
+                    true));
             process.destroyForcibly();
         } catch (InterruptedException e) {
             Thread.currentThread().interrupt();

@@ -21,10 +21,30 @@ class StrictFunctionsTest {
             DoubleBinaryOperator two = Math::pow;
             long wide = 1L << 40;
             return new double[] {
-                Math.sin(x), Math.cos(x), Math.tan(x), Math.asin(x), Math.acos(x), Math.atan(x), Math.atan2(x, y),
-                Math.sinh(x), Math.cosh(x), Math.tanh(x), Math.exp(x), Math.expm1(x), Math.log(y), Math.log10(y),
-                Math.log1p(y), Math.pow(y, x), Math.cbrt(x), Math.hypot(x, y), reference.applyAsDouble(x),
-                two.applyAsDouble(y, x), Math.sqrt(y), Math.abs(x), Math.fma(x, y, 2.5e3), wide
+                Math.sin(x),
+                Math.cos(x),
+                Math.tan(x),
+                Math.asin(x),
+                Math.acos(x),
+                Math.atan(x),
+                Math.atan2(x, y),
+                Math.sinh(x),
+                Math.cosh(x),
+                Math.tanh(x),
+                Math.exp(x),
+                Math.expm1(x),
+                Math.log(y),
+                Math.log10(y),
+                Math.log1p(y),
+                Math.pow(y, x),
+                Math.cbrt(x),
+                Math.hypot(x, y),
+                reference.applyAsDouble(x),
+                two.applyAsDouble(y, x),
+                Math.sqrt(y),
+                Math.abs(x),
+                Math.fma(x, y, 2.5e3),
+                wide
             };
         }
     }
@@ -52,7 +72,8 @@ class StrictFunctionsTest {
 
     @Test
     void aSheetsFunctionsAreStrict() {
-        String sheet = Sheets.calculation("double x = 0; for (int i = 1; i < 500; i++) { x += pow(i, 0.37) * sin(i) + exp(-i); }");
+        String sheet = Sheets.calculation(
+                "double x = 0; for (int i = 1; i < 500; i++) { x += pow(i, 0.37) * sin(i) + exp(-i); }");
         double expected = 0;
         for (int i = 1; i < 500; i++) {
             expected += StrictMath.pow(i, 0.37) * StrictMath.sin(i) + StrictMath.exp(-i);

@@ -107,17 +107,18 @@ final class SheetScope implements MathReader.Scope {
         int index = function.indexOf('_');
         if (definition == null && index > 0 && definitions.containsKey(function.substring(0, index))) {
             PageLine.Equation whole = definitions.get(function.substring(0, index));
-            return within(whole.name(), arguments, texts, () -> MathReader.component(
-                    whole.formula(), function.substring(index + 1), this));
+            return within(
+                    whole.name(),
+                    arguments,
+                    texts,
+                    () -> MathReader.component(whole.formula(), function.substring(index + 1), this));
         } else if (definition == null) {
             throw new MathReader.Unknown("the function " + function);
         }
-        return within(
-                definition.name(), arguments, texts, () -> MathReader.value(definition.formula(), this));
+        return within(definition.name(), arguments, texts, () -> MathReader.value(definition.formula(), this));
     }
 
-    private double within(
-            List<Element> head, List<Double> arguments, List<String> texts, DoubleSupplier body) {
+    private double within(List<Element> head, List<Double> arguments, List<String> texts, DoubleSupplier body) {
         Matcher call = CALL.matcher(Linear.text(head));
         if (!call.matches()) {
             throw new IllegalArgumentException("a definition must start with a call: " + Linear.text(head));
