@@ -1,10 +1,11 @@
 package sill.plot;
 
 /** Lengths of a drawing in its own units, which a browser shows as CSS pixels; one decimal is finer than the eye. */
-final class Px {
+public final class Px {
     private Px() {}
 
-    static String text(double length) {
+    /** A length as SVG writes it, as {@code 40.5}. */
+    public static String text(double length) {
         return write(new StringBuilder(8), length).toString();
     }
 
@@ -14,7 +15,7 @@ final class Px {
     }
 
     /** Appends a path command at a point. */
-    static StringBuilder write(StringBuilder path, char command, double x, double y) {
+    public static StringBuilder write(StringBuilder path, char command, double x, double y) {
         write(path.append(command), x).append(' ');
         return write(path, y);
     }

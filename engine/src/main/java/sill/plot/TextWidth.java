@@ -6,18 +6,19 @@ import sill.markup.VisibleText;
  * How wide a text will be, about. A drawing must not depend on the fonts of the machine that makes it, so widths are those
  * of a common sans-serif face, rounded up.
  */
-final class TextWidth {
+public final class TextWidth {
     /** Font size of all text in a drawing. */
-    static final int FONT_SIZE = 13;
+    public static final int FONT_SIZE = 13;
 
     private TextWidth() {}
 
-    static double of(String text) {
+    /** The width of a text on one line. */
+    public static double of(String text) {
         return text.codePoints().mapToDouble(TextWidth::share).sum() * FONT_SIZE;
     }
 
     /** The text as it will be seen, or as much of its start as fits, with an ellipsis. */
-    static String fit(String raw, double width) {
+    public static String fit(String raw, double width) {
         String text = VisibleText.of(raw).replace('\n', ' ');
         if (of(text) <= width) {
             return text;

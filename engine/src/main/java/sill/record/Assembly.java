@@ -155,8 +155,11 @@ public final class Assembly {
                 .filter(result -> !result.name().isEmpty() || !named.contains(result.formula()))
                 .map(result -> new PlotEntry(
                         result.address(),
+                        result.name(),
                         result.caption().isEmpty() ? result.plot().orElseThrow().title() : result.caption(),
-                        result.plot().orElseThrow()))
+                        result.plot().orElseThrow(),
+                        result.uses(),
+                        result.dependsOn()))
                 .toList();
     }
 }

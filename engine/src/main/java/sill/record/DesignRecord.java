@@ -210,6 +210,8 @@ public record DesignRecord(
      * @param shownLimit the requirement with units, as in {@code 4.9 V .. 5.5 V}, {@code ≥ 600 mV}
      * @param shownMargin margin with sign and unit; empty when there is none
      * @param reason why it was not judged; empty when it was
+     * @param uses names in its expression
+     * @param dependsOn all names it rests on, down to the givens
      */
     public record CheckEntry(
             String text,
@@ -227,8 +229,18 @@ public record DesignRecord(
             String reason,
             String remark,
             String at,
-            int line) {}
+            int line,
+            List<String> uses,
+            List<String> dependsOn) {}
 
-    /** A plot: address, caption, what it shows. The SVG is drawn when the record is written. */
-    public record PlotEntry(String at, String caption, Plot plot) {}
+    /**
+     * A plot. The SVG is drawn when the record is written.
+     *
+     * @param name its variable's name; empty for a bare expression
+     * @param plot what it shows
+     * @param uses names it is made from directly
+     * @param dependsOn all names it rests on, down to the givens
+     */
+    public record PlotEntry(
+            String at, String name, String caption, Plot plot, List<String> uses, List<String> dependsOn) {}
 }

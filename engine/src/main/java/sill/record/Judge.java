@@ -30,8 +30,7 @@ final class Judge {
                 int index = 0;
                 for (Check check : checks.checks()) {
                     index++;
-                    Optional<Datum> value =
-                            Optional.ofNullable(values.get(check.line())).map(CheckValue::value);
+                    Optional<CheckValue> value = Optional.ofNullable(values.get(check.line()));
                     entries.add(judge(check, value, cell.number() + "." + index));
                 }
             }
@@ -39,7 +38,7 @@ final class Judge {
         return entries;
     }
 
-    private static CheckEntry judge(Check check, Optional<Datum> value, String at) {
+    private static CheckEntry judge(Check check, Optional<CheckValue> value, String at) {
         Window window = Window.of(check.requirement());
         if (value.isEmpty()) {
             return entry(check, window, value, Optional.empty(), Verdict.NOT_JUDGED, NO_VALUE, at);
@@ -47,10 +46,10 @@ final class Judge {
         if (!(check.basis() instanceof Basis.Nominal)) {
             return entry(check, window, value, Optional.empty(), Verdict.NOT_JUDGED, Assembly.NO_TOLERANCE_RUNS, at);
         }
-        if (value.get() instanceof Datum.Truth truth) {
+        if (value.get().value() instanceof Datum.Truth truth) {
             return entry(check, window, value, Optional.empty(), truth.value() ? Verdict.HOLDS : Verdict.FAILS, "", at);
         }
-        double number = ((Datum.Real) value.get()).value();
+        double number = ((Datum.Real) value.get().value()).value();
         Verdict verdict = window.holds(number) ? Verdict.HOLDS : Verdict.FAILS;
         return entry(check, window, value, Optional.of(window.margin(number)), verdict, "", at);
     }
@@ -58,7 +57,7 @@ final class Judge {
     private static CheckEntry entry(
             Check check,
             Window window,
-            Optional<Datum> value,
+            Optional<CheckValue> value,
             Optional<Double> margin,
             Verdict verdict,
             String reason,
@@ -67,20 +66,22 @@ final class Judge {
         return new CheckEntry(
                 check.text(),
                 basis(check.basis()),
-                value,
+                value.map(CheckValue::value),
                 condition ? "" : window.unit().coherent().symbol(),
                 window.low(),
                 window.high(),
                 margin,
                 margin.flatMap(window::share),
-                value.map(datum -> ShownValue.of(datum, window.unit())).orElse(""),
+                value.map(found -> ShownValue.of(found.value(), window.unit())).orElse(""),
                 window.shown(),
                 margin.map(window::shownMargin).orElse(""),
                 verdict,
                 reason,
                 check.remark(),
                 at,
-                check.line());
+                check.line(),
+                value.map(CheckValue::uses).orElse(List.of()),
+                value.map(CheckValue::dependsOn).orElse(List.of()));
     }
 
     private static String basis(Basis basis) {

@@ -145,12 +145,17 @@ public final class RecordJson {
         textIfAny(json, "reason", check.reason());
         text(json, "remark", check.remark());
         place(json, check.at(), check.line());
+        names(json, "uses", check.uses());
+        names(json, "dependsOn", check.dependsOn());
     }
 
     private static void plot(JsonGenerator json, DesignRecord.PlotEntry plot) throws IOException {
         text(json, "at", plot.at());
+        textIfAny(json, "name", plot.name());
         text(json, "caption", plot.caption());
         json.writeStringField("svg", PlotDrawing.svg(plot.plot(), plotId(plot.at())));
+        names(json, "uses", plot.uses());
+        names(json, "dependsOn", plot.dependsOn());
     }
 
     private static void problem(JsonGenerator json, Problem problem) throws IOException {

@@ -55,7 +55,7 @@ public final class Records {
                 givens,
                 values,
                 checks,
-                List.of(new DesignRecord.PlotEntry("1.9", "Ramp", plot())),
+                List.of(new DesignRecord.PlotEntry("1.9", "", "Ramp", plot(), List.of("v"), List.of("v", "vIn"))),
                 problems);
     }
 
@@ -111,7 +111,9 @@ public final class Records {
                 verdict == DesignRecord.Verdict.NOT_JUDGED ? "no tolerance runs" : "",
                 "REQ-01",
                 "1.1",
-                5);
+                5,
+                List.of("v"),
+                List.of("v", "vIn"));
     }
 
     static Plot plot() {

@@ -1,6 +1,5 @@
 package sill.record.html;
 
-import java.util.List;
 import java.util.Map;
 import java.util.SortedMap;
 import java.util.TreeMap;
@@ -9,6 +8,7 @@ import sill.plot.PlotDrawing;
 import sill.record.DesignRecord.PlotEntry;
 import sill.record.DesignRecord.ValueEntry;
 import sill.record.RecordJson;
+import sill.trace.TraceKind;
 import sill.values.Datum;
 
 /** A calculation cell: its results as lines <i>name = formula = value</i>, and its plots. */
@@ -20,13 +20,15 @@ final class Calculations {
 
     static void write(Markup page, int cell, CellContent content) {
         SortedMap<Integer, Runnable> inOrder = new TreeMap<>();
-        content.values(cell).forEach(value -> inOrder.put(Addresses.index(value.at()), () -> line(page, value)));
+        content.values(cell)
+                .forEach(value -> inOrder.put(Addresses.index(value.at()), () -> line(page, value, content.trace())));
         // A plot that also has a value of its own stands in its place.
-        content.plots(cell).forEach(plot -> inOrder.put(Addresses.index(plot.at()), () -> figure(page, plot)));
+        content.plots(cell)
+                .forEach(plot -> inOrder.put(Addresses.index(plot.at()), () -> figure(page, plot, content.trace())));
         inOrder.values().forEach(Runnable::run);
     }
 
-    private static void line(Markup page, ValueEntry value) {
+    private static void line(Markup page, ValueEntry value, RecordTrace trace) {
         page.open("div", "class", "line");
         Addresses.write(page, value.at(), true);
         page.open("div", "class", "equation");
@@ -37,7 +39,7 @@ final class Calculations {
         } else {
             source(page, value, shown);
         }
-        result(page, value, shown);
+        result(page, value, shown, trace);
         value.working().ifPresent(working -> Workings.beneath(page, working));
         page.close();
         if (!value.caption().isEmpty()) {
@@ -57,7 +59,7 @@ final class Calculations {
     }
 
     /** The value in brief, and on demand in full with its type and what it rests on; needs no script. */
-    private static void result(Markup page, ValueEntry value, String shown) {
+    private static void result(Markup page, ValueEntry value, String shown, RecordTrace trace) {
         boolean table = Values.isTable(value.value());
         boolean components = !table && !value.shownComponents().isEmpty();
         boolean shortTable = table && Values.rows(value.value()) <= SHORT_TABLE;
@@ -79,18 +81,12 @@ final class Calculations {
         page.open("div", "class", "full");
         Values.full(page, value.value(), value.unit(), value.componentUnits(), value.shownFull());
         page.open("p", "class", "rests").text("Type ").leaf("code", value.type());
-        if (!value.dependsOn().isEmpty()) {
-            page.text(", rests on " + names(value.dependsOn()));
-        }
         page.text(", worksheet line " + value.line() + ".").close();
+        TracePanel.write(page, trace, trace.place(TraceKind.RESULT, value.at()));
         page.close().close();
     }
 
-    private static String names(List<String> names) {
-        return String.join(", ", names);
-    }
-
-    private static void figure(Markup page, PlotEntry plot) {
+    private static void figure(Markup page, PlotEntry plot, RecordTrace trace) {
         page.open("figure", "class", "line");
         Addresses.write(page, plot.at(), true);
         Tables.openScrolling(page, "Plot " + plot.at());
@@ -102,6 +98,9 @@ final class Calculations {
         if (!title.isEmpty() && !title.equals(caption)) {
             page.text(" – " + title);
         }
+        page.open("details", "class", "traced").leaf("summary", "What it shows rests on");
+        TracePanel.write(page, trace, trace.place(TraceKind.PLOT, plot.at()));
+        page.close();
         page.close().close().line();
     }
 }

@@ -7,19 +7,21 @@ import java.util.Map;
 import java.util.function.Function;
 import sill.record.DesignRecord;
 
-/** A record's entries by the number of their cell. */
+/** A record's entries by the number of their cell, and their trace. */
 record CellContent(
         Map<Integer, List<DesignRecord.GivenEntry>> givensByCell,
         Map<Integer, List<DesignRecord.ValueEntry>> valuesByCell,
         Map<Integer, List<DesignRecord.CheckEntry>> checksByCell,
-        Map<Integer, List<DesignRecord.PlotEntry>> plotsByCell) {
+        Map<Integer, List<DesignRecord.PlotEntry>> plotsByCell,
+        RecordTrace trace) {
 
-    static CellContent of(DesignRecord record) {
+    static CellContent of(DesignRecord record, RecordTrace trace) {
         return new CellContent(
                 byCell(record.givens(), DesignRecord.GivenEntry::at),
                 byCell(record.values(), DesignRecord.ValueEntry::at),
                 byCell(record.checks(), DesignRecord.CheckEntry::at),
-                byCell(record.plots(), DesignRecord.PlotEntry::at));
+                byCell(record.plots(), DesignRecord.PlotEntry::at),
+                trace);
     }
 
     List<DesignRecord.GivenEntry> givens(int cell) {

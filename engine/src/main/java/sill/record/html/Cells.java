@@ -10,10 +10,10 @@ import sill.values.CellState;
 final class Cells {
     private Cells() {}
 
-    static void write(Markup page, DesignRecord record) {
+    static void write(Markup page, DesignRecord record, RecordTrace trace) {
         page.open("section", "class", "working", "aria-labelledby", "working").line();
         page.leaf("h2", "Working", "id", "working").line();
-        CellContent content = CellContent.of(record);
+        CellContent content = CellContent.of(record, trace);
         for (CellEntry cell : record.cells()) {
             write(page, cell, content);
         }
@@ -31,12 +31,12 @@ final class Cells {
         state(page, cell);
         switch (kindWord(cell)) {
             case "note" -> Notes.write(page, cell.source());
-            case "given" -> Givens.write(page, cell, content.givens(cell.number()));
+            case "given" -> Givens.write(page, cell, content);
             case "calc" -> Calculations.write(page, cell.number(), content);
             case "check" -> {
                 if (!content.checks(cell.number()).isEmpty()) {
                     String caption = "Checks of cell " + cell.number();
-                    Checks.table(page, content.checks(cell.number()), caption, Checks.Place.IN_CELL);
+                    Checks.table(page, content.checks(cell.number()), content.trace(), caption, Checks.Place.IN_CELL);
                 }
             }
             default -> {}

@@ -5,19 +5,20 @@ import sill.markup.Markup;
 import sill.record.DesignRecord;
 import sill.record.DesignRecord.CheckEntry;
 import sill.record.DesignRecord.Verdict;
+import sill.trace.TraceKind;
 
 /** Requirements and how the design meets them. */
 final class Checks {
     private Checks() {}
 
     /** All checks of the record, at its head. */
-    static void write(Markup page, DesignRecord record) {
+    static void write(Markup page, DesignRecord record, RecordTrace trace) {
         page.open("section", "class", "checks", "aria-labelledby", "checks").line();
         page.leaf("h2", "Checks", "id", "checks").line();
         if (record.checks().isEmpty()) {
             page.leaf("p", "The worksheet states no checks.").line();
         } else {
-            table(page, record.checks(), "All checks, with value, limit and margin", Place.AT_HEAD);
+            table(page, record.checks(), trace, "All checks, with value, limit and margin", Place.AT_HEAD);
         }
         page.close().line();
     }
@@ -29,23 +30,27 @@ final class Checks {
     }
 
     /** A table of checks; on a narrow screen each becomes a card. */
-    static void table(Markup page, List<CheckEntry> checks, String caption, Place place) {
+    static void table(Markup page, List<CheckEntry> checks, RecordTrace trace, String caption, Place place) {
         page.open("table", "class", "stacking");
         page.leaf("caption", caption, "class", "unseen").line();
         Tables.head(page, "At", "Requirement", "Value", "Limit", "Margin", "Verdict", "Remark");
         page.open("tbody").line();
         for (CheckEntry check : checks) {
-            row(page, check, place);
+            row(page, check, trace, place);
         }
         page.close().close().line();
     }
 
-    private static void row(Markup page, CheckEntry check, Place place) {
+    private static void row(Markup page, CheckEntry check, RecordTrace trace, Place place) {
         page.open("tr", "class", "verdict-" + verdictClass(check.verdict()));
         page.open("th", "scope", "row", "class", "at");
         Addresses.write(page, check.at(), place == Place.IN_CELL);
         page.close();
-        page.open("td", "data-label", "Requirement").leaf("code", check.text()).text(" ");
+        page.open("td", "data-label", "Requirement");
+        page.open("details", "class", "traced").open("summary");
+        page.leaf("code", check.text()).close();
+        TracePanel.write(page, trace, trace.place(TraceKind.CHECK, check.at()));
+        page.close().text(" ");
         page.leaf("span", basis(check), "class", "basis").close();
         Tables.cell(page, "Value", "number", check.shownValue());
         Tables.cell(page, "Limit", "number", check.shownLimit());

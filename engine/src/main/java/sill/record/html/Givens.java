@@ -4,13 +4,15 @@ import java.util.List;
 import sill.markup.Markup;
 import sill.record.DesignRecord.CellEntry;
 import sill.record.DesignRecord.GivenEntry;
+import sill.trace.TraceKind;
 import sill.values.Datum;
 
 /** A given cell: its input values as a table. */
 final class Givens {
     private Givens() {}
 
-    static void write(Markup page, CellEntry cell, List<GivenEntry> givens) {
+    static void write(Markup page, CellEntry cell, CellContent content) {
+        List<GivenEntry> givens = content.givens(cell.number());
         if (givens.isEmpty()) {
             return;
         }
@@ -24,19 +26,37 @@ final class Givens {
             page.open("td", "class", "at");
             Addresses.write(page, given.at(), true);
             page.close();
-            page.open("th", "scope", "row", "class", "name")
-                    .leaf("var", given.name())
-                    .close();
+            int place = content.trace().place(TraceKind.GIVEN, given.at());
+            name(page, given, content.trace(), place);
             String brief = given.shown().isEmpty() ? Values.brief(given.value(), given.unit()) : given.shown();
             page.open("td", "class", "number" + Tables.length(brief), "data-label", "Value");
             value(page, given, brief);
             page.close();
             Tables.cell(page, "Limits", "number", given.shownLimits());
             Tables.cell(page, "Distribution", "word", given.distribution());
-            Tables.cell(page, "Remark", "remark", given.remark());
+            remark(page, given, content.trace().isUnused(place));
             page.close().line();
         }
         page.close().close().line();
+    }
+
+    /** The name, and on demand what uses it. */
+    private static void name(Markup page, GivenEntry given, RecordTrace trace, int place) {
+        page.open("th", "scope", "row", "class", "name");
+        page.open("details", "class", "traced").open("summary");
+        page.leaf("var", given.name()).close();
+        TracePanel.write(page, trace, place);
+        page.close().close();
+    }
+
+    private static void remark(Markup page, GivenEntry given, boolean unused) {
+        if (!unused) {
+            Tables.cell(page, "Remark", "remark", given.remark());
+            return;
+        }
+        page.open("td", "class", "remark", "data-label", "Remark").open("span");
+        page.text(given.remark().isEmpty() ? "" : given.remark() + " ");
+        page.leaf("span", TracePanel.UNUSED, "class", "unused").close().close();
     }
 
     private static void value(Markup page, GivenEntry given, String brief) {

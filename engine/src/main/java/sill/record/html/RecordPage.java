@@ -10,7 +10,7 @@ import sill.record.RecordJson;
 
 /**
  * A record as one HTML file, laid out as a calculation sheet: verdict, checks and problems first, then the cells in order,
- * the title block and digests at the foot. The record's JSON lies inside it, in the element {@code sill-record}.
+ * the trace, and the title block and digests at the foot. The record's JSON lies inside it, in the element {@code sill-record}.
  */
 public final class RecordPage {
     /** The id of the element that holds the JSON. */
@@ -27,9 +27,11 @@ public final class RecordPage {
         page.open("body").line();
         Heading.write(page, record);
         page.open("main").line();
-        Checks.write(page, record);
+        RecordTrace trace = RecordTrace.of(record);
+        Checks.write(page, record, trace);
         Problems.write(page, record);
-        Cells.write(page, record);
+        Cells.write(page, record, trace);
+        TraceSection.write(page, trace);
         page.close().line();
         Foot.write(page, record);
         page.open("script", "type", "application/json", "id", JSON_ELEMENT);

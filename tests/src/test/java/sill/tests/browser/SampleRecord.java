@@ -261,7 +261,7 @@ final class SampleRecord {
         real(cell, 2, 2, "band", "trip.band()", rising() - falling(), "V", "1.487 V", "hysteresis");
         real(cell, 3, 3, "startLevel", "level(trip.rising())", level(rising()), "m", "1.567 m", "pump starts");
         real(cell, 4, 4, "stopLevel", "level(trip.falling())", level(falling()), "m", "637.5 mm", "pump stops");
-        plots.add(new PlotEntry(cell + ".5", "Transfer loop", transferLoop()));
+        plots.add(new PlotEntry(cell + ".5", "", "Transfer loop", transferLoop(), List.of("trip"), List.of("trip", "vRef", "rIn", "rFb")));
         value(
                 cell,
                 5,
@@ -351,7 +351,7 @@ final class SampleRecord {
                         new Plot.Mark(Plot.Side.Y, level(rising()), "start", Plot.Role.TRIP_POINT),
                         new Plot.Mark(Plot.Side.Y, level(falling()), "stop", Plot.Role.TRIP_POINT),
                         new Plot.Mark(Plot.Side.Y, 0.6, "suction limit", Plot.Role.LIMIT)));
-        plots.add(new PlotEntry(cell + ".2", "Level over a wet night, invented inflow", plot));
+        plots.add(new PlotEntry(cell + ".2", "", "Level over a wet night, invented inflow", plot, List.of("startLevel", "stopLevel"), List.of("startLevel", "stopLevel", "trip", "vRef", "rIn", "rFb")));
         CellEntry entry = cells.get(cell - 1);
         cells.set(
                 cell - 1,
@@ -490,7 +490,9 @@ final class SampleRecord {
                 "",
                 "REQ-12 energy",
                 cell + ".2",
-                cells.get(cell - 1).line() + 2));
+                cells.get(cell - 1).line() + 2,
+                List.of("stopLevel"),
+                List.of("stopLevel", "trip", "vRef", "rIn", "rFb")));
         checks.add(new CheckEntry(
                 "band at least 1 V in 99.7 %",
                 "share",
@@ -507,7 +509,9 @@ final class SampleRecord {
                 "this Sill has no tolerance runs yet",
                 "REQ-13 no chatter",
                 cell + ".3",
-                cells.get(cell - 1).line() + 3));
+                cells.get(cell - 1).line() + 3,
+                List.of("band"),
+                List.of("band", "trip", "vRef", "rIn", "rFb")));
         checks.add(new CheckEntry(
                 "starts < 10 holds",
                 "nominal",
@@ -524,7 +528,9 @@ final class SampleRecord {
                 "",
                 "REQ-14 motor",
                 cell + ".4",
-                cells.get(cell - 1).line() + 4));
+                cells.get(cell - 1).line() + 4,
+                List.of("starts"),
+                List.of("starts")));
     }
 
     private void startLevelCheck(int cell, int index) {
@@ -545,7 +551,9 @@ final class SampleRecord {
                 "",
                 "REQ-11 before the cable tray",
                 cell + "." + index,
-                cells.get(cell - 1).line() + index));
+                cells.get(cell - 1).line() + index,
+                List.of("startLevel"),
+                List.of("startLevel", "trip", "vRef", "rIn", "rFb")));
     }
 
     /** Every text of a record, as an attacker would write it. */
@@ -599,7 +607,7 @@ final class SampleRecord {
                 List.of(new Plot.Curve(
                         HOSTILE, Plot.Style.LINE, false, new double[] {1, 10, 100}, new double[] {1, 2, 3})),
                 List.of(new Plot.Mark(Plot.Side.Y, 2, HOSTILE, Plot.Role.LIMIT)));
-        plots.add(new PlotEntry(calc + ".2", HOSTILE, plot));
+        plots.add(new PlotEntry(calc + ".2", HOSTILE, HOSTILE, plot, List.of(HOSTILE), List.of(HOSTILE)));
         int check = cell("check", HOSTILE, CellState.DONE, "", HOSTILE);
         checks.add(new CheckEntry(
                 HOSTILE,
@@ -617,7 +625,9 @@ final class SampleRecord {
                 HOSTILE,
                 HOSTILE,
                 check + ".1",
-                1));
+                1,
+                List.of(HOSTILE),
+                List.of(HOSTILE)));
         int line = cells.get(check - 1).line() + 1;
         problems.add(Problem.error(line, 40, check, HOSTILE, HOSTILE));
     }
