@@ -9,6 +9,9 @@ import sill.plot.TextWidth;
  * differ without colour. Colours are for white paper; a page overrides them by class. Each box is a link to its address.
  */
 public final class TraceDrawing {
+    /** A wider drawing is marked {@code wide}, so that a page can print it across; A4 has 660 pixels between margins. */
+    private static final double UPRIGHT = 800;
+
     private static final String INK = "#26302c";
     private static final String PAPER = "#ffffff";
 
@@ -25,9 +28,8 @@ public final class TraceDrawing {
         Markup svg = new Markup();
         svg.open("svg")
                 .with("xmlns", "http://www.w3.org/2000/svg")
-                .with("class", "trace-drawing")
-                // Not role img: what is inside an image can't be reached, and these boxes are links.
-                .with("role", "group")
+                .with("class", layout.width() > UPRIGHT ? "trace-drawing wide" : "trace-drawing")
+                // No role img: what is inside an image can't be reached, and these boxes are links.
                 .with("aria-labelledby", idPrefix + "-title")
                 .with("aria-describedby", idPrefix + "-desc")
                 .with("viewBox", "0 0 " + Px.text(layout.width()) + " " + Px.text(layout.height()))
@@ -49,11 +51,6 @@ public final class TraceDrawing {
             box(svg, trace, box, linkPrefix);
         }
         return svg.close().toString();
-    }
-
-    /** The second line of text in a node's box. */
-    static String below(TraceNode node) {
-        return node.shown().isEmpty() ? node.at() : node.at() + " · " + node.shown();
     }
 
     private static String description(Trace trace, TraceLayout layout) {
@@ -90,10 +87,10 @@ public final class TraceDrawing {
         boolean alone = trace.users(box.node()).isEmpty() && node.kind() == TraceKind.GIVEN;
         svg.open("a", "href", "#" + linkPrefix + node.at());
         svg.with("class", "node node-" + node.kind().word() + (alone ? " alone" : ""));
-        double room = box.width() - TraceLayout.PADDING + 2;
-        String below = below(node);
-        if (TextWidth.of(node.label()) > room || TextWidth.of(below) > room) {
-            svg.leaf("title", node.label() + ", " + below);
+        double room = box.width() - TraceLayout.PADDING;
+        String below = TraceLayout.secondLine(node);
+        if (TextWidth.of(node.label()) > room || !below.endsWith(node.shown())) {
+            svg.leaf("title", node.label() + ", " + node.at() + (node.shown().isEmpty() ? "" : ", " + node.shown()));
         }
         shape(svg, node.kind(), box);
         if (alone) {
@@ -103,7 +100,7 @@ public final class TraceDrawing {
         svg.open("text", "x", x, "y", Px.text(box.y() + 17), "fill", INK, "class", "label");
         svg.text(TextWidth.fit(node.label(), room)).close();
         svg.open("text", "x", x, "y", Px.text(box.y() + 34), "fill", INK, "class", "label below");
-        svg.text(TextWidth.fit(below, room)).close();
+        svg.text(below).close();
         svg.close().line();
     }
 

@@ -18,9 +18,10 @@ public record TraceLayout(double width, double height, List<Box> boxes, List<Lin
     private static final double BOX_HEIGHT = 42;
     private static final double GAP = 10;
     private static final double LINE_HEIGHT = 2;
-    private static final double BETWEEN_LAYERS = 52;
-    private static final double NARROWEST = 72;
-    private static final double WIDEST = 200;
+    private static final double BETWEEN_LAYERS = 40;
+    private static final double NARROWEST = 64;
+    private static final double WIDEST = 150;
+    private static final double WIDEST_CHECK = 210;
 
     /** What stands free beside the text of a box, both sides together; a check's point needs as much. */
     static final double PADDING = 24;
@@ -112,14 +113,21 @@ public record TraceLayout(double width, double height, List<Box> boxes, List<Lin
     }
 
     private static double width(Trace trace, List<Integer> layer) {
-        double widest = NARROWEST;
+        double width = NARROWEST;
         for (int place : layer) {
             if (place < trace.nodes().size()) {
                 TraceNode node = trace.nodes().get(place);
-                widest = Math.max(widest, TextWidth.of(node.label()) + PADDING);
-                widest = Math.max(widest, TextWidth.of(TraceDrawing.below(node)) + PADDING);
+                double widest = node.kind() == TraceKind.CHECK ? WIDEST_CHECK : WIDEST;
+                double wanted = PADDING + Math.max(TextWidth.of(node.label()), TextWidth.of(secondLine(node)));
+                width = Math.max(width, Math.min(widest, wanted));
             }
         }
-        return Math.min(widest, WIDEST);
+        return width;
+    }
+
+    /** The second line of text in a node's box: its address, and its value where that fits. */
+    static String secondLine(TraceNode node) {
+        String text = node.at() + " · " + node.shown();
+        return node.shown().isEmpty() || TextWidth.of(text) > WIDEST - PADDING ? node.at() : text;
     }
 }

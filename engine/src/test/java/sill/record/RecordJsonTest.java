@@ -41,8 +41,8 @@ class RecordJsonTest {
         "/cells/0, number kind caption line state source",
         "/givens/0, name value unit low high distribution remark at line",
         "/values/0, name type value unit shown caption at line uses dependsOn",
-        "/checks/0, text basis value low high margin verdict remark at line",
-        "/plots/0, at caption svg",
+        "/checks/0, text basis value low high margin verdict remark at line uses dependsOn",
+        "/plots/0, at caption svg uses dependsOn",
         "/problems/0, line column cell severity message hint"
     })
     void theFormatsFields(String place, String names) throws Exception {
@@ -65,6 +65,8 @@ class RecordJsonTest {
         assertThat(json.at("/problems/0/severity").asText()).isEqualTo("warning");
         assertThat(json.at("/plots/0/svg").asText()).isEqualTo(PlotDrawing.svg(Records.plot(), "plot-1-9"));
         assertThat(json.at("/values/0/uses/0").asText()).isEqualTo("vIn");
+        assertThat(json.at("/checks/0/uses")).hasToString("[\"v\"]");
+        assertThat(json.at("/checks/0/dependsOn")).hasToString("[\"v\",\"vIn\"]");
     }
 
     @Property

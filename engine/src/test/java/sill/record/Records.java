@@ -93,6 +93,45 @@ public final class Records {
                 List.of("vIn"));
     }
 
+    /** A value in cell 1 at an address. */
+    public static DesignRecord.ValueEntry valueAt(String name, String at) {
+        return new DesignRecord.ValueEntry(
+                name,
+                "vIn / 12",
+                "double",
+                new Datum.Real(2),
+                "V",
+                Map.of(),
+                "2.000 V",
+                "",
+                Map.of(),
+                "half",
+                at,
+                5,
+                List.of("vIn"),
+                List.of("vIn"));
+    }
+
+    /** A record of one given cell with one given, and a calculation cell without results. */
+    public static DesignRecord ofGivens(String source, CellState state) {
+        DesignRecord all = ofValues();
+        return new DesignRecord(
+                all.outcome(),
+                all.titleBlock(),
+                all.made(),
+                all.trial(),
+                all.worksheet(),
+                List.of(),
+                List.of(
+                        new DesignRecord.CellEntry(1, "given", "A", 4, CellState.DONE, "", "", "vIn = 24 V"),
+                        new DesignRecord.CellEntry(2, "calc", "B", 6, state, "", "", source)),
+                List.of(given()),
+                List.of(),
+                List.of(),
+                List.of(),
+                List.of());
+    }
+
     /** A check at address 1.1. */
     public static DesignRecord.CheckEntry check(DesignRecord.Verdict verdict) {
         return new DesignRecord.CheckEntry(

@@ -66,10 +66,10 @@ final class RecordTrace {
     }
 
     private static String shown(ValueEntry value) {
-        boolean inOwnWords = value.shown().isEmpty() || Values.isTable(value.value());
-        if (inOwnWords && value.value() instanceof Datum.Items items) {
-            return Heading.counted(items.size(), Values.isTable(items) ? "row" : "value");
+        if (value.value() instanceof Datum.Items items && !Values.isTable(items)) {
+            return Heading.counted(items.size(), "value");
         }
+        boolean inOwnWords = value.shown().isEmpty() || Values.isTable(value.value());
         return inOwnWords ? Values.brief(value.value(), value.unit()) : value.shown();
     }
 

@@ -96,7 +96,7 @@ class RecordPageTest {
         assertThat(page.selectFirst(".equation > code").text()).isEqualTo("vIn / 12");
         assertThat(page.selectFirst(".equation summary").text()).isEqualTo("2.000 V");
         assertThat(page.selectFirst(".full").text())
-                .isEqualTo("2.00000001 V Type double, worksheet line 5. Made from vIn");
+                .isEqualTo("2.00000001 V Type double, worksheet line 5. Made from vIn Used by plot Ramp");
         assertThat(page.getElementById("at-1.1").text()).isEqualTo("1.1");
     }
 
@@ -238,5 +238,58 @@ class RecordPageTest {
     @Test
     void theSameRecordIsTheSamePage() {
         assertThat(RecordPage.write(Records.ofEverything())).isEqualTo(RecordPage.write(Records.ofEverything()));
+    }
+
+    @Test
+    void aGivenThatNothingUsesIsPointedOut() {
+        Document page = page(Records.ofGivens("double a = vOther;", CellState.DONE));
+        assertThat(page.select(".givens .unused").eachText()).containsExactly(TracePanel.UNUSED);
+        assertThat(page.selectFirst(".unused-givens").text())
+                .isEqualTo("One given that no result, check or plot uses: vIn (1.1).");
+        assertThat(page.selectFirst(".unused-givens a").attr("href")).isEqualTo("#at-1.1");
+        assertThat(page.select(".tracing svg")).isEmpty();
+    }
+
+    /** What a cell that did not run uses is not known; its text is all there is to go by. */
+    @Test
+    void aGivenOfACellThatDidNotRunIsNotCalledUnused() {
+        assertThat(page(Records.ofGivens("double a = vIn / 2;", CellState.NOT_RUN))
+                        .select(".unused, .tracing"))
+                .isEmpty();
+        assertThat(page(Records.ofGivens("double a = vIn2 / 2;", CellState.PROBLEM))
+                        .select(".unused"))
+                .hasSize(1);
+    }
+
+    @Test
+    void moreThanADrawingCanShowIsSaid() {
+        DesignRecord.ValueEntry[] values = IntStream.range(0, TraceSection.MOST_BOXES)
+                .mapToObj(i -> Records.valueAt("v" + i, "1." + (i + 1)))
+                .toArray(DesignRecord.ValueEntry[]::new);
+        Document page = page(Records.ofValues(values));
+        assertThat(page.select(".tracing svg")).isEmpty();
+        assertThat(page.selectFirst(".tracing p").text())
+                .isEqualTo(
+                        "No drawing: the sheet's 151 givens, results, plots and checks are more than the 150 that one"
+                                + " drawing can show. Each line has its own trace, under its name or value.");
+    }
+
+    @Test
+    void aLongTraceIsCutAndSaysSo() {
+        DesignRecord.ValueEntry[] values = IntStream.range(0, 70)
+                .mapToObj(i -> i == 0
+                        ? Records.value("vIn", new Datum.Real(1), "1 V")
+                        : Records.valueAt("v" + i, "1." + (i + 1)))
+                .toArray(DesignRecord.ValueEntry[]::new);
+        Element panel = page(Records.ofValues(values)).selectFirst(".trace dt:contains(Used by) + dd");
+        assertThat(panel.select("a")).hasSize(60);
+        assertThat(panel.text()).startsWith("v1; v2; ").endsWith("; v60; and 9 more");
+    }
+
+    @Test
+    void aCheckNamesWhatItIsMadeFrom() {
+        Element panel = page(Records.ofEverything()).selectFirst(".checks .trace");
+        assertThat(panel.select("dt").eachText()).containsExactly("Made from", "and so from");
+        assertThat(panel.select("dd").eachText()).containsExactly("v = 2.000 V (1.1)", "vIn");
     }
 }

@@ -124,6 +124,7 @@ class PackageRulesTest {
                         "sill.markup..",
                         "sill.plot..",
                         "sill.record..",
+                        "sill.trace..",
                         "sill.units..",
                         "sill.values..",
                         "sill.words..",

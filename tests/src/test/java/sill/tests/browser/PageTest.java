@@ -22,6 +22,9 @@ import org.junit.jupiter.params.provider.Arguments;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.MethodSource;
 import org.junit.jupiter.params.provider.ValueSource;
+import org.openqa.selenium.By;
+import org.openqa.selenium.Keys;
+import org.openqa.selenium.WebElement;
 import sill.record.DesignRecord;
 import sill.record.html.RecordPage;
 
@@ -157,7 +160,51 @@ class PageTest {
                 .isEqualTo(true);
     }
 
-    /** A4 is 210 mm by 297 mm (ISO 216:2007), which is 595.3 by 841.9 points of 1/72 inch. */
+    /** Without a script: a summary opens by key and by tap, and the links inside lead to marked lines. */
+    @Test
+    void theTraceIsReachedByKeyAndByTap() {
+        browser.open(file("holding"), 400, "light");
+        WebElement name = browser.driver().findElement(By.cssSelector(".givens .traced > summary"));
+        assertThat(browser.driver()
+                        .findElement(By.cssSelector(".givens .trace a"))
+                        .isDisplayed())
+                .isFalse();
+        name.sendKeys(Keys.ENTER);
+        WebElement user = browser.driver().findElement(By.cssSelector(".givens .trace a"));
+        assertThat(user.isDisplayed()).isTrue();
+        name.sendKeys(Keys.TAB);
+        assertThat(browser.driver().switchTo().activeElement()).isEqualTo(user);
+        user.sendKeys(Keys.ENTER);
+        assertThat(browser.evaluate("getComputedStyle(document.querySelector(':target')).outlineStyle"))
+                .isEqualTo("solid");
+        assertThat(browser.evaluate("document.querySelector(':target').closest('.line, tr') != null"))
+                .isEqualTo(true);
+        WebElement result = browser.driver().findElement(By.cssSelector(".line .result > summary"));
+        result.click();
+        assertThat(browser.driver()
+                        .findElement(By.cssSelector(".line .result .trace"))
+                        .isDisplayed())
+                .isTrue();
+    }
+
+    /** At 100 % the text of a box is at least 11 pixels high, however wide the drawing is. */
+    @ParameterizedTest
+    @ValueSource(ints = {1200, 400})
+    void theDrawingIsReadable(int width) {
+        browser.open(file("everything"), width, "light");
+        assertThat(browser.evaluate("Math.min(...[...document.querySelectorAll('.trace-drawing text')].map(text =>"
+                        + " parseFloat(getComputedStyle(text).fontSize) * text.getScreenCTM().a)) >= 11"))
+                .isEqualTo(true);
+        // No text runs out of its box: 1 pixel for the difference between fonts.
+        assertThat(
+                        browser.evaluate(
+                                "[...document.querySelectorAll('.trace-drawing .node')].filter(node =>"
+                                        + " [...node.querySelectorAll('text')].some(text => text.getBBox().x + text.getBBox().width >"
+                                        + " node.getBBox().x + node.querySelector('.box').getBBox().width + 1)).map(node => node.textContent)"))
+                .isEqualTo(List.of());
+    }
+
+    /** A4 is 210 mm by 297 mm (ISO 216:2007), which is 595.3 by 841.9 points of 1/72 inch; a wide trace lies across. */
     @Test
     void itPrintsOnA4() {
         browser.open(file("everything"), 1200, "dark");
@@ -165,12 +212,17 @@ class PageTest {
         Matcher box =
                 Pattern.compile("/MediaBox \\[\\s*0 0 ([0-9.]+) ([0-9.]+)\\s*]").matcher(pdf);
         int pages = 0;
+        int across = 0;
         while (box.find()) {
             pages++;
-            assertThat(Double.parseDouble(box.group(1))).isBetween(594.0, 597.0);
-            assertThat(Double.parseDouble(box.group(2))).isBetween(840.0, 843.0);
+            double width = Double.parseDouble(box.group(1));
+            double height = Double.parseDouble(box.group(2));
+            assertThat(Math.min(width, height)).isBetween(594.0, 597.0);
+            assertThat(Math.max(width, height)).isBetween(840.0, 843.0);
+            across += width > height ? 1 : 0;
         }
         assertThat(pages).isBetween(3, 20);
+        assertThat(across).isLessThanOrEqualTo(1);
     }
 
     /** What sticks out over the paper's edge would be cut off; 175 mm are left between the margins. */

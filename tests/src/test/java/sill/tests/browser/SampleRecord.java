@@ -261,7 +261,13 @@ final class SampleRecord {
         real(cell, 2, 2, "band", "trip.band()", rising() - falling(), "V", "1.487 V", "hysteresis");
         real(cell, 3, 3, "startLevel", "level(trip.rising())", level(rising()), "m", "1.567 m", "pump starts");
         real(cell, 4, 4, "stopLevel", "level(trip.falling())", level(falling()), "m", "637.5 mm", "pump stops");
-        plots.add(new PlotEntry(cell + ".5", "", "Transfer loop", transferLoop(), List.of("trip"), List.of("trip", "vRef", "rIn", "rFb")));
+        plots.add(new PlotEntry(
+                cell + ".5",
+                "",
+                "Transfer loop",
+                transferLoop(),
+                List.of("trip"),
+                List.of("trip", "vRef", "rIn", "rFb")));
         value(
                 cell,
                 5,
@@ -351,7 +357,13 @@ final class SampleRecord {
                         new Plot.Mark(Plot.Side.Y, level(rising()), "start", Plot.Role.TRIP_POINT),
                         new Plot.Mark(Plot.Side.Y, level(falling()), "stop", Plot.Role.TRIP_POINT),
                         new Plot.Mark(Plot.Side.Y, 0.6, "suction limit", Plot.Role.LIMIT)));
-        plots.add(new PlotEntry(cell + ".2", "", "Level over a wet night, invented inflow", plot, List.of("startLevel", "stopLevel"), List.of("startLevel", "stopLevel", "trip", "vRef", "rIn", "rFb")));
+        plots.add(new PlotEntry(
+                cell + ".2",
+                "",
+                "Level over a wet night, invented inflow",
+                plot,
+                List.of("startLevel", "stopLevel"),
+                List.of("startLevel", "stopLevel", "trip", "vRef", "rIn", "rFb")));
         CellEntry entry = cells.get(cell - 1);
         cells.set(
                 cell - 1,
@@ -673,8 +685,8 @@ final class SampleRecord {
                 caption,
                 cell + "." + index,
                 cells.get(cell - 1).line() + line,
-                List.of("trip"),
-                List.of("trip", "vRef", "rIn", "rFb")));
+                name.equals("trip") ? List.of("vRef", "rIn", "rFb") : List.of("trip"),
+                name.equals("trip") ? List.of("vRef", "rIn", "rFb") : List.of("trip", "vRef", "rIn", "rFb")));
     }
 
     private static Datum.Items reals(double... numbers) {

@@ -7,7 +7,11 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Arrays;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Set;
+import java.util.regex.Pattern;
+import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
@@ -107,6 +111,50 @@ class WorksheetsTest {
     @EnumSource(mode = EnumSource.Mode.EXCLUDE, names = "WORKED_EXAMPLE")
     void whatSwitchesDangerSaysSo(Design design) {
         assertThat(runs.of(design).page()).contains("Cautions", "local", "licensed");
+    }
+
+    @ParameterizedTest
+    @EnumSource
+    void everyLineIsAPlaceAndNoLinkIsDead(Design design) {
+        Runs.Run run = runs.of(design);
+        Set<String> ids = found("\\bid=\"([^\"]*)\"", run.page());
+
+        for (String list : List.of("givens", "values", "plots", "checks")) {
+            for (JsonNode entry : run.record().at("/" + list)) {
+                assertThat(ids).contains("at-" + entry.at("/at").asText());
+            }
+        }
+        assertThat(found("href=\"#([^\"]*)\"", run.page()))
+                .hasSizeGreaterThan(10)
+                .isSubsetOf(ids);
+    }
+
+    /** In these designs every given serves; each line of the page that uses a name links to it. */
+    @ParameterizedTest
+    @EnumSource
+    void theTraceReachesTheGivens(Design design) {
+        JsonNode record = runs.of(design).record();
+        Set<String> givens = new HashSet<>(record.at("/givens").findValuesAsText("name"));
+        Set<String> used = new HashSet<>();
+
+        for (JsonNode check : record.at("/checks")) {
+            Set<String> below = new HashSet<>();
+            check.at("/dependsOn").forEach(name -> below.add(name.asText()));
+            assertThat(below).as(check.toString()).containsAnyElementsOf(givens);
+            check.at("/uses").forEach(name -> assertThat(below).contains(name.asText()));
+            used.addAll(below);
+        }
+        record.at("/plots").forEach(plot -> plot.at("/dependsOn").forEach(name -> used.add(name.asText())));
+        assertThat(used).containsAll(givens);
+        assertThat(runs.of(design).page()).doesNotContain("class=\"unused\"").contains("class=\"trace-drawing");
+    }
+
+    private static Set<String> found(String pattern, String text) {
+        return Pattern.compile(pattern)
+                .matcher(text)
+                .results()
+                .map(match -> match.group(1))
+                .collect(Collectors.toSet());
     }
 
     /** A figure holds to half a unit of its last digit. */
