@@ -76,6 +76,15 @@ public final class Records {
 
     /** A value in cell 1 at address 1.1. */
     public static DesignRecord.ValueEntry value(String name, Datum value, String shown) {
+        return value(name, value, shown, "1.1");
+    }
+
+    /** A value in cell 1 at an address. */
+    public static DesignRecord.ValueEntry valueAt(String name, String at) {
+        return value(name, new Datum.Real(2), "2.000 V", at);
+    }
+
+    private static DesignRecord.ValueEntry value(String name, Datum value, String shown, String at) {
         return new DesignRecord.ValueEntry(
                 name,
                 "vIn / 12",
@@ -84,25 +93,6 @@ public final class Records {
                 "V",
                 Map.of(),
                 shown,
-                "",
-                Map.of(),
-                "half",
-                "1.1",
-                5,
-                List.of("vIn"),
-                List.of("vIn"));
-    }
-
-    /** A value in cell 1 at an address. */
-    public static DesignRecord.ValueEntry valueAt(String name, String at) {
-        return new DesignRecord.ValueEntry(
-                name,
-                "vIn / 12",
-                "double",
-                new Datum.Real(2),
-                "V",
-                Map.of(),
-                "2.000 V",
                 "",
                 Map.of(),
                 "half",
