@@ -70,7 +70,7 @@ class RunCommandTest {
         Cli.Ran ran = Cli.run("run", sheet);
 
         assertThat(ran.out())
-                .contains("problem at line 5, column 19: cell 1 \"C\"")
+                .contains("problem at line 5, column 19: Cell 1 'C': found String - int, which has no meaning")
                 .contains("  5 | double y = x + \"\" - 1;\n    |                   ^\n")
                 .contains("incomplete: 1 problem, there are no checks");
         assertThat(ran.code()).isEqualTo(2);
@@ -114,7 +114,7 @@ class RunCommandTest {
         assertThat(ran.code()).isEqualTo(2);
         assertThat(ran.out())
                 .contains("2 of 4 calculation cells ran")
-                .contains("was stopped: took longer than 1500 ms");
+                .contains("Cell 2 'Endless': stopped, it took longer than 1500 ms");
         String json = Files.readString(folder.resolve("a.json"));
         assertThat(json)
                 .contains("\"state\": \"stopped\"")
