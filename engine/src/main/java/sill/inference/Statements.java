@@ -106,7 +106,10 @@ final class Statements extends SimpleTreeVisitor<Boolean, Environment> {
     }
 
     private void give(Value value) {
-        yielded.push(Value.join(yielded.pop(), value));
+        // A yield outside a switch is a problem that the compiler tells; here it gives nothing to anyone.
+        if (!yielded.isEmpty()) {
+            yielded.push(Value.join(yielded.pop(), value));
+        }
     }
 
     @Override

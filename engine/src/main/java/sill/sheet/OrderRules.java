@@ -16,7 +16,9 @@ final class OrderRules {
         List<Problem> problems = new ArrayList<>();
         for (Usage usage : usages) {
             Names.Declaration declared = declarations.get(usage.name());
-            if (declared == null || usage.name().startsWith("$")) {
+            if (declared == null
+                    || declared.kind() == Names.Kind.LOST
+                    || usage.name().startsWith("$")) {
                 continue;
             }
             int cell = usage.piece().cell();

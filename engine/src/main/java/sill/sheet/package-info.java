@@ -1,5 +1,5 @@
 /**
- * Cells to one Java class. {@link sill.sheet.Translator} is the way in: it parses the snippets of every cell, finds the
+ * Cells to one Java class. {@link sill.sheet.Translation} is the way in: it parses the snippets of every cell, finds the
  * types that {@code var} leaves open, attributes the one class of the sheet and answers with a {@link
  * sill.sheet.TranslatedSheet}: the class's text, which cells can run, what every name rests on, and where each generated
  * line comes from.
