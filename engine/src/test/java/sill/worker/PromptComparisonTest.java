@@ -16,7 +16,6 @@ import jdk.jshell.SnippetEvent;
 import jdk.jshell.SourceCodeAnalysis.CompletionInfo;
 import jdk.jshell.VarSnippet;
 import org.junit.jupiter.api.AfterAll;
-import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.DynamicTest;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.TestFactory;
@@ -40,21 +39,16 @@ class PromptComparisonTest {
     /** Where both sides leave a value's text: the prompt's engine shares this process. */
     private static final String SHOWN = "sill.test.shown";
 
-    private static JShell shell;
+    private JShell shell;
 
-    @BeforeAll
-    static void open() {
-        // With --release instead each line would cost a second.
-        shell = JShell.builder()
-                .executionEngine("local")
-                .compilerOptions("-source", "17", "-target", "17", "-Xlint:-options")
-                .build();
+    /** A fresh prompt for each piece: what an earlier one declared would change how newer prompts type a later one. */
+    private void open() {
+        shell = JShell.builder().executionEngine("local").build();
         IMPORTS.forEach(shell::eval);
     }
 
     @AfterAll
-    static void close() {
-        shell.close();
+    static void forget() {
         System.clearProperty(SHOWN);
     }
 
@@ -85,7 +79,16 @@ class PromptComparisonTest {
     }
 
     /** Variables to type and value, from typing the lines one by one. */
-    private static Map<String, String> atThePrompt(String piece) {
+    private Map<String, String> atThePrompt(String piece) {
+        open();
+        try {
+            return typed(piece);
+        } finally {
+            shell.close();
+        }
+    }
+
+    private Map<String, String> typed(String piece) {
         String typed = "";
         for (String line : piece.split("\n")) {
             typed = type(typed + line + "\n");
@@ -99,21 +102,11 @@ class PromptComparisonTest {
                         variable.name(), readable(variable.typeName()) + " = " + shown(System.getProperty(SHOWN)));
             }
         }
-        forgetDeclarations();
         return variables;
     }
 
-    private static void forgetDeclarations() {
-        shell.snippets()
-                .filter(snippet ->
-                        snippet.kind() != Snippet.Kind.IMPORT && snippet.kind().isPersistent())
-                .filter(snippet -> shell.status(snippet).isActive())
-                .toList()
-                .forEach(shell::drop);
-    }
-
     /** Evaluates what is complete and gives back the rest. */
-    private static String type(String source) {
+    private String type(String source) {
         CompletionInfo info = shell.sourceCodeAnalysis().analyzeCompletion(source);
         if (!info.completeness().isComplete()) {
             return source;
@@ -122,7 +115,7 @@ class PromptComparisonTest {
         return info.remaining().isBlank() ? "" : type(info.remaining());
     }
 
-    private static void evaluate(String source) {
+    private void evaluate(String source) {
         for (SnippetEvent event : shell.eval(source)) {
             if (event.causeSnippet() == null) {
                 assertThat(event.exception()).as(source).isNull();
