@@ -2,6 +2,7 @@ package sill.tests.formulas;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -12,6 +13,7 @@ import net.jqwik.api.Combinators;
 import net.jqwik.api.ForAll;
 import net.jqwik.api.Property;
 import net.jqwik.api.Provide;
+import net.jqwik.api.lifecycle.AfterProperty;
 import org.jsoup.Jsoup;
 import org.jsoup.nodes.Element;
 import sill.formula.Expression;
@@ -29,6 +31,9 @@ import sill.units.Unit;
 /** Random expressions: what their MathML says, by the usual order of operations, is what they are. */
 class RandomFormulasTest {
     private static final Map<String, Double> NUMBERS = Map.of("a", 3.5, "b", -0.25, "c", 1200.0, "d", 7e-5);
+
+    private static final List<String> DIFFERENT = new ArrayList<>();
+    private static int checked;
 
     @Provide
     Arbitrary<Expression> expressions() {
@@ -92,16 +97,19 @@ class RandomFormulasTest {
         boolean same = Double.isNaN(expected)
                 ? Double.isNaN(value)
                 : value == expected || Math.abs(value - expected) <= 1e-6 * Math.abs(expected);
-        // Where the formula is written with other operations, as a quotient of quotients, a last digit may decide on a
-        // step.
-        assertThat(same || !Double.isFinite(expected) || !Double.isFinite(value) || isStep(expression))
-                .as("%s is %s, evaluated: %s", Linear.text(maths), expected, value)
-                .isTrue();
+        checked++;
+        // Written with other operations, as a quotient of quotients is, the last digit of a number may differ, and a
+        // floor,
+        // a comparison or a difference of equals then decides otherwise. That is rare; a wrong bracket is not.
+        if (!same) {
+            DIFFERENT.add(Linear.text(maths) + " is " + expected + ", evaluated: " + value);
+        }
     }
 
-    private static boolean isStep(Expression expression) {
-        String text = expression.toString();
-        return text.contains("FLOOR") || text.contains("Comparison") || text.contains("MINUS") || text.contains("SIN");
+    @AfterProperty
+    void hardlyAnyDiffers() {
+        assertThat(checked).isGreaterThan(1500);
+        assertThat(DIFFERENT).as("of %s", checked).hasSizeLessThan(checked / 200);
     }
 
     /** All numbers are printed with every digit, and any result will do: its value is noted. */
