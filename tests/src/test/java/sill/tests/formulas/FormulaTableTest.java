@@ -30,6 +30,9 @@ class FormulaTableTest {
             cFilter = 47 nF
             tDelay = 2 ms
             n = 3
+            vMin = 3 V
+            vTop = 30 V
+            vTiny = 0.000123 V
             tWarm = 25 °C
             tCold = -20 °C
             temps = [-10, 25] °C
