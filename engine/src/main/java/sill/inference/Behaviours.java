@@ -7,6 +7,7 @@ import com.sun.source.tree.MemberReferenceTree;
 import com.sun.source.tree.Tree;
 import com.sun.source.tree.VariableTree;
 import java.util.ArrayList;
+import java.util.IdentityHashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -21,7 +22,7 @@ final class Behaviours {
     private final Walker walker;
     private final Calls calls;
     private final Map<Tree, Behaviour> unused = new LinkedHashMap<>();
-    private final Map<Tree, Boolean> used = new java.util.IdentityHashMap<>();
+    private final Map<Tree, Boolean> used = new IdentityHashMap<>();
     private int depth;
 
     Behaviours(SheetTree tree, Wording wording, SlipLog log, Walker walker, Calls calls) {

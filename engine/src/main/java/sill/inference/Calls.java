@@ -38,7 +38,7 @@ final class Calls {
         math = new MathRules(rules, new Constants(tree));
         behaviours = new Behaviours(tree, wording, log, walker, this);
         helpers = new HelperUnits(rules, wording, behaviours);
-        bodies = new MethodBodies(tree, fields, wording, log, walker, helpers);
+        bodies = new MethodBodies(tree, fields, wording, log, targets, walker, helpers);
         library = new Library(tree, rules, behaviours, targets);
     }
 
@@ -77,7 +77,7 @@ final class Calls {
         if (made.getClassBody() != null || !(tree.element(made).orElse(null) instanceof ExecutableElement method)) {
             return Quantity.UNKNOWN;
         } else if (bodies.own(method)) {
-            return bodies.call(method, Quantity.UNKNOWN, arguments, made);
+            return bodies.call(method, Quantity.UNKNOWN, arguments, made, env);
         } else if (HelperUnits.own(method)) {
             return helpers.call(method, arguments, made);
         }
@@ -90,7 +90,7 @@ final class Calls {
             return Quantity.UNKNOWN;
         } else if (method.getKind() == ElementKind.CONSTRUCTOR) {
             return bodies.own(method)
-                    ? bodies.call(method, Quantity.UNKNOWN, arguments, call)
+                    ? bodies.call(method, Quantity.UNKNOWN, arguments, call, behaviour.captured())
                     : HelperUnits.own(method) ? helpers.call(method, arguments, call) : Quantity.UNKNOWN;
         }
         boolean isStatic = method.getModifiers().contains(Modifier.STATIC);
@@ -112,7 +112,7 @@ final class Calls {
         if (MathRules.own(owner(method))) {
             return math.call(method.getSimpleName().toString(), arguments, call);
         } else if (bodies.own(method)) {
-            return bodies.call(method, receiver, arguments, call);
+            return bodies.call(method, receiver, arguments, call, env);
         } else if (isAccessor(method)) {
             Value part = receiver instanceof Components record
                     ? record.part(method.getSimpleName().toString())
@@ -121,7 +121,7 @@ final class Calls {
         } else if (HelperUnits.own(method)) {
             return helpers.call(method, arguments, call);
         }
-        return library.call(new Library.Call(
+        return library.call(new LibraryCall(
                 owner(method), method.getSimpleName().toString(), target, receiver, arguments, call, env));
     }
 

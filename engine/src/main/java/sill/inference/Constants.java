@@ -7,6 +7,7 @@ import com.sun.source.tree.TypeCastTree;
 import com.sun.source.tree.UnaryTree;
 import java.util.Optional;
 import javax.lang.model.element.VariableElement;
+import javax.lang.model.type.TypeKind;
 import sill.units.Rational;
 
 /** Numbers that the source alone tells. */
@@ -60,9 +61,8 @@ final class Constants {
     private double value(BinaryTree binary) {
         double left = value(binary.getLeftOperand());
         double right = value(binary.getRightOperand());
-        boolean whole = tree.type(binary)
-                .filter(type -> type.getKind() == javax.lang.model.type.TypeKind.INT)
-                .isPresent();
+        boolean whole =
+                tree.type(binary).filter(type -> type.getKind() == TypeKind.INT).isPresent();
         return switch (binary.getKind()) {
             case PLUS -> left + right;
             case MINUS -> left - right;

@@ -11,6 +11,7 @@ import javax.lang.model.element.Element;
 final class Environment {
     private final Environment parent;
     private final Frame frame;
+    private final boolean lambda;
     private final Map<Element, Value> own = new HashMap<>();
 
     /** The call that code runs in: its receiver, the offset it was called at (-1 for none), what it has returned so far. */
@@ -33,23 +34,24 @@ final class Environment {
         }
     }
 
-    private Environment(Environment parent, Frame frame) {
+    private Environment(Environment parent, Frame frame, boolean lambda) {
         this.parent = parent;
         this.frame = frame;
+        this.lambda = lambda;
     }
 
     /** That of a method's body. */
     static Environment ofBody(Frame frame) {
-        return new Environment(null, frame);
+        return new Environment(null, frame, false);
     }
 
     /** That of a lambda's body, which sees the variables around it. */
     Environment ofLambda(Frame inner) {
-        return new Environment(this, inner);
+        return new Environment(this, inner, true);
     }
 
     Environment branch() {
-        return new Environment(this, frame);
+        return new Environment(this, frame, false);
     }
 
     Frame frame() {
@@ -73,6 +75,17 @@ final class Environment {
 
     void set(Element variable, Value value) {
         own.put(variable, value);
+    }
+
+    /** Something inside what a variable holds is changed: for a lambda's captured variable, outside the lambda too. */
+    void alter(Element variable, Value value) {
+        Environment at = this;
+        for (Environment up = this; up != null && !up.own.containsKey(variable); up = up.parent) {
+            if (up.lambda) {
+                at = up.parent;
+            }
+        }
+        at.set(variable, value);
     }
 
     /** Goes on as the branch ended. */

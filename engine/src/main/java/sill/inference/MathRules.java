@@ -3,6 +3,7 @@ package sill.inference;
 import com.sun.source.tree.Tree;
 import java.util.List;
 import java.util.Set;
+import sill.units.Dimension;
 import sill.units.Rational;
 
 /** The functions of {@code Math}, {@code StrictMath} and Commons Math's {@code FastMath}, by their mathematics. */
@@ -99,8 +100,7 @@ final class MathRules {
 
     private Quantity fma(List<Operand> arguments, Tree call) {
         Operand factor = arguments.get(0);
-        Operand product = new Operand(
-                factor.quantity().times(arguments.get(1).quantity()), (com.sun.source.tree.ExpressionTree) call);
+        Operand product = new Operand(factor.quantity().times(arguments.get(1).quantity()), factor.tree());
         Operand added = arguments.get(2);
         if (product.quantity().fits(added.quantity())) {
             return rules.alike(product, added, Rules.Pairing.ADD, 0);
@@ -118,6 +118,6 @@ final class MathRules {
         if (x.kind() == Quantity.Kind.UNKNOWN || x.kind() == Quantity.Kind.ANY || x.isMadeOfNumbers()) {
             return x;
         }
-        return Quantity.of(sill.units.Dimension.NONE);
+        return Quantity.of(Dimension.NONE);
     }
 }

@@ -33,6 +33,7 @@ final class MethodBodies {
     private final Fields fields;
     private final Wording wording;
     private final SlipLog log;
+    private final Targets targets;
     private final Walker walker;
     private final HelperUnits units;
     private final Map<Variant, Outcome> outcomes = new HashMap<>();
@@ -43,11 +44,19 @@ final class MethodBodies {
     private final Set<Element> called = new HashSet<>();
     private int changesSeen;
 
-    MethodBodies(SheetTree tree, Fields fields, Wording wording, SlipLog log, Walker walker, HelperUnits units) {
+    MethodBodies(
+            SheetTree tree,
+            Fields fields,
+            Wording wording,
+            SlipLog log,
+            Targets targets,
+            Walker walker,
+            HelperUnits units) {
         this.tree = tree;
         this.fields = fields;
         this.wording = wording;
         this.log = log;
+        this.targets = targets;
         this.walker = walker;
         this.units = units;
     }
@@ -61,10 +70,15 @@ final class MethodBodies {
     }
 
     /** The value of a call; for a constructor, the record it makes. */
-    Value call(ExecutableElement method, Value self, List<Operand> arguments, Tree call) {
+    Value call(ExecutableElement method, Value self, List<Operand> arguments, Tree call, Environment env) {
         List<Value> values = units.asStated(method, arguments(method, arguments));
         Outcome outcome = Trial.run(values, given -> outcome(new Variant(method, self, given), call));
         log.addAll(outcome.slips());
+        outcome.altered().forEach((i, value) -> {
+            if (i < arguments.size()) {
+                targets.add(arguments.get(i).tree(), value, env);
+            }
+        });
         return units.result(method).orElse(outcome.value());
     }
 
@@ -73,9 +87,11 @@ final class MethodBodies {
         for (MethodTree method : methods) {
             Element element = tree.element(method).orElse(null);
             if (element instanceof ExecutableElement executable && own(element) && !called.contains(element)) {
-                List<Operand> unknown = new ArrayList<>();
-                executable.getParameters().forEach(parameter -> unknown.add(new Operand(Quantity.UNKNOWN, null)));
-                call(executable, Quantity.UNKNOWN, unknown, method);
+                List<Value> unknown = new ArrayList<>();
+                executable.getParameters().forEach(parameter -> unknown.add(Quantity.UNKNOWN));
+                outcome(new Variant(executable, Quantity.UNKNOWN, unknown), method)
+                        .slips()
+                        .forEach(log::add);
             }
         }
     }
@@ -131,7 +147,7 @@ final class MethodBodies {
             Outcome now = run(variant, call);
             slips.addAll(now.slips());
             Value value = Value.join(assumed, now.value());
-            Outcome outcome = new Outcome(value, List.copyOf(slips));
+            Outcome outcome = new Outcome(value, List.copyOf(slips), now.altered());
             if (!recursive.contains(variant) || value.equals(assumed)) {
                 outcomes.put(variant, outcome);
                 return outcome;
@@ -165,7 +181,15 @@ final class MethodBodies {
         walker.run(method.getBody(), env);
         boolean makes = variant.method().getKind() == ElementKind.CONSTRUCTOR;
         Value value = makes ? made(variant.method(), parameters, env) : frame.returned();
-        return new Outcome(isVoid(variant.method()) && !makes ? Quantity.UNKNOWN : value, log.close());
+        Map<Integer, Value> altered = new HashMap<>();
+        for (int i = 0; i < parameters.size(); i++) {
+            Value before = i < variant.arguments().size() ? variant.arguments().get(i) : Quantity.UNKNOWN;
+            Value after = env.get(parameters.get(i));
+            if (!parameters.get(i).asType().getKind().isPrimitive() && !after.equals(before)) {
+                altered.put(i, after);
+            }
+        }
+        return new Outcome(isVoid(variant.method()) && !makes ? Quantity.UNKNOWN : value, log.close(), altered);
     }
 
     /** The record that its canonical constructor makes of its parameters. */

@@ -113,7 +113,7 @@ final class Targets {
         if (tree.isField(variable)) {
             fields.set(variable, stated(variable, after));
         } else if (variable.getKind() != ElementKind.FIELD) {
-            env.set(variable, after);
+            env.alter(variable, after);
         }
     }
 

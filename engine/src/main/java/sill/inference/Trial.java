@@ -1,6 +1,7 @@
 package sill.inference;
 
 import java.util.List;
+import java.util.Map;
 import java.util.function.Function;
 
 /**
@@ -10,8 +11,17 @@ import java.util.function.Function;
 final class Trial {
     private Trial() {}
 
-    /** A body's value and the slips in it. */
-    record Outcome(Value value, List<Slip> slips) {}
+    /**
+     * What a body leaves.
+     *
+     * @param slips those in it
+     * @param altered what the containers among its parameters hold at its end
+     */
+    record Outcome(Value value, List<Slip> slips, Map<Integer, Value> altered) {
+        Outcome(Value value, List<Slip> slips) {
+            this(value, slips, Map.of());
+        }
+    }
 
     static Outcome run(List<Value> arguments, Function<List<Value>, Outcome> body) {
         Outcome outcome = body.apply(arguments);

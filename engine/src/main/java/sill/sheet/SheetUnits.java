@@ -50,6 +50,7 @@ final class SheetUnits {
     }
 
     private static Seeds.Places places(MappedText text) {
+        String whole = text.toString();
         return new Seeds.Places() {
             @Override
             public int line(int offset) {
@@ -60,7 +61,7 @@ final class SheetUnits {
             public String text(int start, int end) {
                 MappedText.Origin from = text.origin(start);
                 MappedText.Origin to = text.origin(end - 1);
-                String made = text.toString().substring(start, end);
+                String made = whole.substring(start, end);
                 if (from.piece() != to.piece() || to.offset() < from.offset()) {
                     return made;
                 }
