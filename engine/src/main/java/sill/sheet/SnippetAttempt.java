@@ -16,7 +16,6 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 
-/** One snippet in one form. */
 /** One snippet's text, tried in one form. */
 final class SnippetAttempt {
     /** Another form may fit better. */
