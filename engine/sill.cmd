@@ -187,13 +187,12 @@ popd
 if "%ENDED%"=="badly" rd /s /q "%TARGET%\built-from"
 exit /b 0
 
-rem Runs a small worksheet and keeps the classes it loaded: those of this process in parent.jsa and, by sill.cds.train,
+rem Runs a worksheet that holds something of everything and keeps the classes it loaded: those of this process in parent.jsa and, by sill.cds.train,
 rem those of the worker in worker.jsa. One process makes them, beside, then renames. What goes wrong costs time, no more.
 :make_archives
 md "%CDS%.making" 2>nul
 if errorlevel 1 exit /b 0
-"%JDK%\bin\java.exe" %OPTIONS% -cp "%JAR%;%TARGET%\lib\*" sill.cli.Main new "%CDS%.making\training.sill" >nul 2>nul <nul
-"%JDK%\bin\java.exe" %OPTIONS% "-XX:ArchiveClassesAtExit=%CDS%.making\parent.jsa" "-Dsill.cds.train=%CDS%.making" -cp "%JAR%;%TARGET%\lib\*" sill.cli.Main run "%CDS%.making\training.sill" >nul 2>nul <nul
+"%JDK%\bin\java.exe" %OPTIONS% "-XX:ArchiveClassesAtExit=%CDS%.making\parent.jsa" "-Dsill.cds.train=%CDS%.making" -cp "%JAR%;%TARGET%\lib\*" sill.cli.Main run "%HERE%\training.sill" --out "%CDS%.making" >nul 2>nul <nul
 echo made>"%CDS%.making\made"
 move "%CDS%.making" "%CDS%" >nul 2>nul
 exit /b 0

@@ -5,7 +5,6 @@ import com.sun.source.util.Trees;
 import java.io.IOException;
 import java.util.List;
 import java.util.Map;
-import java.util.Set;
 import sill.inference.Inference;
 import sill.inference.Inferred;
 
@@ -15,7 +14,6 @@ import sill.inference.Inferred;
  * @param text the compilation unit
  * @param errors what the compiler complains of, offsets in {@code text}
  * @param usages uses of the sheet's own names
- * @param imports the imports on demand that the text rests on
  * @param types types of the bare expressions, by field; {@link ClassText#NO_VALUE} for a call that gives none
  * @param inferred dimensions, and where they don't go together
  * @param known names that every worksheet may use, where there is an error that may be about a misspelt one
@@ -25,7 +23,6 @@ record Attribution(
         MappedText text,
         List<Compiler.Complaint> errors,
         List<Usage> usages,
-        Set<String> imports,
         Map<String, String> types,
         Inferred inferred,
         KnownNames known,
@@ -49,7 +46,6 @@ record Attribution(
                     text,
                     errors,
                     usages,
-                    scanner.imports(),
                     facts.types(),
                     inferred,
                     known,

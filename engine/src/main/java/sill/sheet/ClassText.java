@@ -69,7 +69,7 @@ final class ClassText {
 
     /** The imports, one a line, then the class: a compilation unit. */
     MappedText unit() {
-        Program.IMPORTS.forEach(name -> text.add("import " + name + ";\n"));
+        Translation.IMPORTS.forEach(name -> text.add("import " + name + ";\n"));
         program.imports()
                 .forEach(snippet ->
                         text.copy(snippet.piece(), snippet.span()).add(snippet.hasSemicolon() ? "\n" : ";\n"));

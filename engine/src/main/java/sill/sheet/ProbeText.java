@@ -32,7 +32,7 @@ final class ProbeText {
 
     /** The compilation unit. */
     String unit() {
-        Program.IMPORTS.forEach(name -> text.add("import " + name + ";\n"));
+        Translation.IMPORTS.forEach(name -> text.add("import " + name + ";\n"));
         each(Snippet.Kind.IMPORT).forEach(s -> text.copy(s.piece(), s.span()).add(s.hasSemicolon() ? "\n" : ";\n"));
         text.add("class " + ClassText.NAME + " {\n");
         Set<String> names = new HashSet<>();

@@ -15,16 +15,6 @@ import sill.worksheet.Problem;
  * @param checks check lines, in order
  */
 record Program(List<SheetSource.GivenField> givens, List<CellCode> cells, List<CheckCode> checks) {
-
-    /** Imported in every worksheet without asking. */
-    static final List<String> IMPORTS = List.of(
-            "sill.stdlib.*",
-            "java.util.*",
-            "java.util.function.*",
-            "java.util.stream.*",
-            "java.math.*",
-            "static java.lang.Math.*");
-
     /**
      * A parsed calculation cell.
      *

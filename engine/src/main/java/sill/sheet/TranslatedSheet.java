@@ -12,7 +12,7 @@ import sill.worksheet.Problem;
  *
  * @param className simple name of the class
  * @param firstLineMethod a static method of the class that returns the line number of the class text's first line
- * @param imports import declarations, one each
+ * @param imports the sheet's own import declarations, one each; {@link Translation#IMPORTS} come before
  * @param code the class
  * @param steps what to call, in order
  * @param missingGivens names of givens without a value

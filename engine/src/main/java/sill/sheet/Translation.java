@@ -20,6 +20,15 @@ import sill.worksheet.Problem;
  * them, are left out of that class, so that all others run.
  */
 public final class Translation {
+    /** Imported in every worksheet without asking. */
+    public static final List<String> IMPORTS = List.of(
+            "sill.stdlib.*",
+            "java.util.*",
+            "java.util.function.*",
+            "java.util.stream.*",
+            "java.math.*",
+            "static java.lang.Math.*");
+
     private final Program program;
     private final Names names;
     private final SheetUnits units;
@@ -105,10 +114,6 @@ public final class Translation {
         steps.sort(Comparator.comparing(TranslatedSheet.Step::place));
         ClassText text = ClassText.running(program, types, cells, checks);
         List<String> imports = new ArrayList<>();
-        // Each import that the evaluator is given costs it as much as some lines of Java.
-        Program.IMPORTS.stream()
-                .filter(attribution.imports()::contains)
-                .forEach(name -> imports.add("import " + name + ";"));
         program.imports().stream()
                 .filter(snippet -> !brokenImports.contains(snippet))
                 .forEach(snippet -> imports.add(

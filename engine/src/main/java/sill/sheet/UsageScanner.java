@@ -20,15 +20,11 @@ import com.sun.source.util.TreePath;
 import com.sun.source.util.TreePathScanner;
 import com.sun.source.util.Trees;
 import java.util.ArrayList;
-import java.util.HashSet;
 import java.util.IdentityHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Set;
 import javax.lang.model.element.Element;
 import javax.lang.model.element.ElementKind;
-import javax.lang.model.element.Modifier;
-import javax.lang.model.element.PackageElement;
 import javax.lang.model.element.TypeElement;
 import javax.lang.model.type.DeclaredType;
 import javax.lang.model.type.TypeKind;
@@ -42,7 +38,6 @@ final class UsageScanner extends TreePathScanner<Void, Boolean> {
     private final MappedText text;
     private final Map<Tree, Usage.How> targets = new IdentityHashMap<>();
     private final List<Usage> usages = new ArrayList<>();
-    private final Set<String> imports = new HashSet<>();
 
     UsageScanner(Trees trees, CompilationUnitTree unit, MappedText text) {
         this.trees = trees;
@@ -54,11 +49,6 @@ final class UsageScanner extends TreePathScanner<Void, Boolean> {
     List<Usage> usages() {
         scan(unit, false);
         return List.copyOf(usages);
-    }
-
-    /** The imports on demand that names of the sheet rest on, as an import names them; known after {@link #usages}. */
-    Set<String> imports() {
-        return imports;
     }
 
     @Override
@@ -76,10 +66,6 @@ final class UsageScanner extends TreePathScanner<Void, Boolean> {
             }
             usages.add(new Usage(
                     element.getSimpleName().toString(), kind(element), how, origin.piece(), origin.offset(), deferred));
-        } else if (owner instanceof PackageElement from) {
-            imports.add(from.getQualifiedName() + ".*");
-        } else if (owner instanceof TypeElement from && element.getModifiers().contains(Modifier.STATIC)) {
-            imports.add("static " + from.getQualifiedName() + ".*");
         }
         return null;
     }

@@ -70,6 +70,18 @@ public record Rational(int numerator, int denominator) {
         return (double) numerator / denominator;
     }
 
+    // Written out: a record's own are put together at run time, which each start would wait for.
+
+    @Override
+    public boolean equals(Object other) {
+        return other instanceof Rational that && numerator == that.numerator && denominator == that.denominator;
+    }
+
+    @Override
+    public int hashCode() {
+        return 31 * numerator + denominator;
+    }
+
     /** Such as {@code 2} or {@code -1/2}. */
     @Override
     public String toString() {

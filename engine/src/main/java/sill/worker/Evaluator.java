@@ -1,9 +1,12 @@
 package sill.worker;
 
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.concurrent.ExecutionException;
+import java.util.concurrent.FutureTask;
 import jdk.jshell.Diag;
 import jdk.jshell.JShell;
 import jdk.jshell.Snippet;
@@ -15,29 +18,44 @@ import jdk.jshell.spi.ExecutionEnv;
 import sill.sheet.Compiler;
 import sill.sheet.Splitter;
 import sill.sheet.TranslatedSheet;
+import sill.sheet.Translation;
 
-/** Evaluates a sheet's class, once, in this process. */
+/**
+ * Evaluates a sheet's class, once, in this process. It gets ready on a thread of its own, with files of its own: a sheet is
+ * translated in the meantime.
+ */
 final class Evaluator implements AutoCloseable {
     private final SheetLoader loader = new SheetLoader();
-    private final JShell shell;
+    private final FutureTask<JShell> shell;
 
-    Evaluator(Compiler compiler) {
-        shell = JShell.builder()
+    /** Starts to get ready; {@code classPath} is what worksheet code may use. */
+    Evaluator(List<Path> classPath) {
+        shell = new FutureTask<>(() -> withImports(classPath));
+        Thread start = new Thread(shell, "evaluator");
+        start.setDaemon(true);
+        start.start();
+    }
+
+    private JShell withImports(List<Path> classPath) {
+        JShell started = JShell.builder()
                 .executionEngine(new Engine(), Map.of())
-                .fileManager(standard -> compiler.files())
+                .fileManager(standard -> new Compiler(classPath).files())
                 .compilerOptions(Compiler.OPTIONS.toArray(String[]::new))
                 .build();
+        Translation.IMPORTS.forEach(name -> started.eval("import " + name + ";"));
+        return started;
     }
 
     /** The evaluated class's cells can be called, or the rejections say why not. */
     record Evaluation(Class<?> sheet, List<Compiler.Complaint> rejections) {}
 
     Splitter splitter() {
-        return new PromptSplitter(shell.sourceCodeAnalysis());
+        return new PromptSplitter(() -> shell().sourceCodeAnalysis());
     }
 
-    /** Evaluates the imports, then the class. */
+    /** Evaluates the sheet's own imports, then its class. */
     Evaluation evaluate(TranslatedSheet sheet) throws ClassNotFoundException {
+        JShell shell = shell();
         sheet.imports().forEach(shell::eval);
         List<SnippetEvent> events = shell.eval(sheet.code().text());
         List<Compiler.Complaint> rejections = new ArrayList<>();
@@ -53,9 +71,17 @@ final class Evaluator implements AutoCloseable {
         return new Evaluation(rejections.isEmpty() ? loader.withSimpleName(sheet.className()) : null, rejections);
     }
 
+    private JShell shell() {
+        try {
+            return shell.get();
+        } catch (InterruptedException | ExecutionException e) {
+            throw new IllegalStateException("the evaluator did not start", e);
+        }
+    }
+
     @Override
     public void close() {
-        shell.close();
+        shell().close();
     }
 
     /** JShell's port to whatever runs the code: here, this process with our own loader. */

@@ -23,8 +23,8 @@ public final class WorkerMain {
 
     private WorkerMain(DataOutputStream reports, List<Path> classPath) {
         this.reports = reports;
+        this.evaluator = new Evaluator(classPath);
         this.compiler = new Compiler(classPath);
-        this.evaluator = new Evaluator(compiler);
     }
 
     /**

@@ -27,6 +27,10 @@ final class Sheets {
 
     private Sheets() {}
 
+    static List<Path> classPath() {
+        return CLASS_PATH;
+    }
+
     static Compiler compiler() {
         return COMPILER;
     }
@@ -55,7 +59,7 @@ final class Sheets {
         CapturedOutput output = new CapturedOutput();
         PrintStream before = System.out;
         System.setOut(output.stream());
-        try (Evaluator evaluator = new Evaluator(COMPILER)) {
+        try (Evaluator evaluator = new Evaluator(CLASS_PATH)) {
             Job job = Job.of(JobWriter.job(worksheet, files, Set.of()).bytes());
             new JobRun(COMPILER, output, reports).run(job, evaluator);
         } catch (ReflectiveOperationException e) {

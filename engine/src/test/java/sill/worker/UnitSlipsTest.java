@@ -32,7 +32,7 @@ class UnitSlipsTest {
     @BeforeAll
     static void start() {
         compiler = Sheets.compiler();
-        evaluator = new Evaluator(compiler);
+        evaluator = new Evaluator(Sheets.classPath());
     }
 
     @AfterAll

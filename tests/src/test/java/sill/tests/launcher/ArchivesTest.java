@@ -32,10 +32,9 @@ class ArchivesTest {
             public class Main {
                 public static void main(String[] args) throws Exception {
                     String training = System.getProperty("sill.cds.train");
-                    if (args[0].equals("new")) {
-                        Files.writeString(Path.of(args[1]), "a sheet");
-                    } else if (training != null) {
+                    if (training != null) {
                         Files.writeString(Path.of(training, "worker.jsa"), Files.readString(Path.of(args[1])));
+                        Files.writeString(Path.of(args[3], "training.html"), "a record");
                     } else {
                         System.out.println("archives in " + System.getProperty("sill.cds"));
                     }
@@ -55,6 +54,7 @@ class ArchivesTest {
         house = new House(temp.resolve("house"), temp.resolve("tools"))
                 .built()
                 .with("JAVA_HOME", System.getProperty("java.home"));
+        House.write(house.script().resolveSibling("training.sill"), "a sheet");
         writeJar(house.jar());
         writeJar(house.library());
         archives = house.target().resolve("cds").resolve(System.getProperty("java.runtime.version"));
@@ -94,7 +94,7 @@ class ArchivesTest {
         house.withArchives();
         assertThat(makeArchives()).isEqualTo(new Outcome(0, "", ""));
         assertThat(archives.resolve("worker.jsa")).hasContent("a sheet");
-        assertThat(archives.resolve("training.sill")).doesNotExist();
+        assertThat(archives.resolve("training.html")).doesNotExist();
         assertThat(archives.resolveSibling(archives.getFileName() + ".making")).doesNotExist();
         Path log = temp.resolve("classes.log");
         house.with("_JAVA_OPTIONS", "-Xlog:class+load:file=" + log);
