@@ -103,8 +103,7 @@ final class RunCommand implements Callable<Integer> {
 
     /** Writes the record of a run that gave nothing: while the worker works, all that a page needs gets loaded. */
     private static void rehearse(Function<RunResult, DesignRecord> assemble) {
-        RunResult nothing = new RunResult(List.of(), List.of(), List.of(), List.of());
-        Thread rehearsal = new Thread(() -> RecordPage.write(assemble.apply(nothing)), "rehearsal");
+        Thread rehearsal = new Thread(() -> RecordPage.write(assemble.apply(RunResult.NOTHING)), "rehearsal");
         rehearsal.setDaemon(true);
         rehearsal.start();
     }

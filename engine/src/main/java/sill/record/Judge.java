@@ -17,7 +17,7 @@ import sill.worksheet.Worksheet;
 
 /** Judges the checks of a worksheet on the values that a run gave. */
 final class Judge {
-    private static final String NO_VALUE = "its expression has no value: see the problems and the cells it waits on";
+    private static final String NO_VALUE = "its expression has no value: see the problems";
 
     private Judge() {}
 
@@ -31,17 +31,18 @@ final class Judge {
                 for (Check check : checks.checks()) {
                     index++;
                     Optional<CheckValue> value = Optional.ofNullable(values.get(check.line()));
-                    entries.add(judge(check, value, cell.number() + "." + index));
+                    entries.add(judge(run, check, value, cell.number() + "." + index));
                 }
             }
         }
         return entries;
     }
 
-    private static CheckEntry judge(Check check, Optional<CheckValue> value, String at) {
+    private static CheckEntry judge(RunResult run, Check check, Optional<CheckValue> value, String at) {
         Window window = Window.of(check.requirement());
         if (value.isEmpty()) {
-            return entry(check, window, value, Optional.empty(), Verdict.NOT_JUDGED, NO_VALUE, at);
+            String reason = run.withoutValue().getOrDefault(check.line(), NO_VALUE);
+            return entry(check, window, value, Optional.empty(), Verdict.NOT_JUDGED, reason, at);
         }
         if (!(check.basis() instanceof Basis.Nominal)) {
             return entry(check, window, value, Optional.empty(), Verdict.NOT_JUDGED, Assembly.NO_TOLERANCE_RUNS, at);

@@ -42,7 +42,7 @@ record Window(Optional<Double> low, Optional<Double> high, Unit unit, String sho
                     Optional.of(value + equal.distance()),
                     unit,
                     "=" + Notation.SPACE + shown(equal.value()) + " ±" + Notation.SPACE
-                            + Notation.plain(equal.distance(), distance(unit)));
+                            + shownDistance(equal.distance(), distance(unit)));
         }
         return new Window(Optional.empty(), Optional.empty(), Unit.ONE, "holds");
     }
@@ -74,6 +74,13 @@ record Window(Optional<Double> low, Optional<Double> high, Unit unit, String sho
 
     private static Unit distance(Unit unit) {
         return unit.offset() == 0 ? unit : unit.coherent();
+    }
+
+    /** As typed, but for one so small that it would be zeros for the most part. */
+    private static String shownDistance(double distance, Unit unit) {
+        return distance == 0 || distance / unit.factor() >= 1e-3
+                ? Notation.plain(distance, unit)
+                : Notation.shown(distance, unit);
     }
 
     private static String shown(Limit limit) {

@@ -1,6 +1,7 @@
 package sill.values;
 
 import java.util.List;
+import java.util.Map;
 import sill.worksheet.Problem;
 
 /**
@@ -9,13 +10,23 @@ import sill.worksheet.Problem;
  * @param cells calculation and check cells, in order
  * @param results in order of address
  * @param checks those whose expression could be evaluated
+ * @param withoutValue why the others could not, by the check's line, as in {@code waits on trip (cell 2)}
  * @param problems found while translating and running, in the text's order
  */
-public record RunResult(List<CellRun> cells, List<Result> results, List<CheckValue> checks, List<Problem> problems) {
+public record RunResult(
+        List<CellRun> cells,
+        List<Result> results,
+        List<CheckValue> checks,
+        Map<Integer, String> withoutValue,
+        List<Problem> problems) {
+    /** What a run leaves that did nothing. */
+    public static final RunResult NOTHING = new RunResult(List.of(), List.of(), List.of(), Map.of(), List.of());
+
     public RunResult {
         cells = List.copyOf(cells);
         results = List.copyOf(results);
         checks = List.copyOf(checks);
+        withoutValue = Map.copyOf(withoutValue);
         problems = List.copyOf(problems);
     }
 }

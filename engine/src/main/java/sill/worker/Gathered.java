@@ -26,6 +26,7 @@ final class Gathered {
     private final Map<Integer, String> captions = new HashMap<>();
     private final List<Result> results = new ArrayList<>();
     private final Map<Place, CheckValue> checks = new TreeMap<>();
+    private final Map<Integer, String> withoutValue = new HashMap<>();
     private final Set<Place> endedChecks = new HashSet<>();
     private final Set<Place> stopped = new LinkedHashSet<>();
     private final Set<Problem> problems = new LinkedHashSet<>();
@@ -68,7 +69,10 @@ final class Gathered {
             }
         } else if (report instanceof Report.CheckEnded ended) {
             if (endedChecks.add(ended.place())) {
-                ended.value().ifPresent(value -> checks.put(ended.place(), value));
+                ended.value()
+                        .ifPresentOrElse(
+                                value -> checks.put(ended.place(), value),
+                                () -> withoutValue.put(ended.place().line(), ended.reason()));
                 problems.addAll(ended.problems());
             }
         } else if (report instanceof Report.Finished finished) {
@@ -90,6 +94,7 @@ final class Gathered {
         if (stop.cell() > 0) {
             stopped.add(stop.place());
             endedChecks.add(stop.place());
+            withoutValue.put(stop.place().line(), stop.reason());
             stopCell(stop.cell(), stop.reason());
         } else {
             codeCells.forEach(cell -> stopCell(cell, stop.reason()));
@@ -106,6 +111,6 @@ final class Gathered {
         results.sort(Comparator.comparingInt(Result::cell).thenComparingInt(Result::index));
         List<Problem> sorted = new ArrayList<>(problems);
         sorted.sort(Comparator.comparingInt(Problem::line).thenComparingInt(Problem::column));
-        return new RunResult(List.copyOf(cells.values()), results, List.copyOf(checks.values()), sorted);
+        return new RunResult(List.copyOf(cells.values()), results, List.copyOf(checks.values()), withoutValue, sorted);
     }
 }
