@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import org.assertj.core.data.Percentage;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -45,7 +46,7 @@ class JudgeTest {
         assertThat(entry.shownMargin().replace('\u00a0', ' ')).isEqualTo(margin);
         assertThat(entry.shownLimit().replace('\u00a0', ' ')).isEqualTo(limit);
         if (share != null) {
-            assertThat(entry.marginShare().orElseThrow()).isCloseTo(share, org.assertj.core.data.Offset.offset(1e-6));
+            assertThat(entry.marginShare().orElseThrow()).isCloseTo(share, Percentage.withPercentage(1e-6));
         }
     }
 

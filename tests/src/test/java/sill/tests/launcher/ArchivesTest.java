@@ -137,7 +137,7 @@ class ArchivesTest {
         Files.writeString(house.library(), "not a jar");
         makeArchives();
         assertThat(archives.resolve("made")).exists();
-        assertThat(archives.resolve("parent.jsa")).doesNotExist();
+        assertThat(archives.resolve("worker.jsa")).doesNotExist();
         writeJar(house.library());
         assertThat(house.start("run")).isEqualTo(new Outcome(0, "archives in null\n", ""));
     }

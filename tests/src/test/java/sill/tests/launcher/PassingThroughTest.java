@@ -117,6 +117,7 @@ class PassingThroughTest {
         assertThat(house.start("new").out()).isEqualTo("""
                 -XX:+UseSerialGC
                 -XX:TieredStopAtLevel=1
+                -XX:+UseTransparentHugePages
                 -Xmx384m
                 -Xshare:auto
                 -Xlog:disable
