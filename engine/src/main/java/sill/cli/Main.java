@@ -29,11 +29,14 @@ public final class Main {
         PrintStream out = utf8(FileDescriptor.out);
         PrintStream err = utf8(FileDescriptor.err);
         int code;
+        StopKey stopKey = new StopKey();
+        stopKey.watch();
         try (EarlyWorker early = EarlyWorker.forCommand(arguments)) {
-            code = run(new Terminal(out, err, System.console() != null), early, out, err, arguments);
+            code = run(new Terminal(out, err, System.console() != null), early, stopKey, out, err, arguments);
         }
         out.flush();
         err.flush();
+        stopKey.ended();
         System.exit(code);
     }
 
@@ -43,12 +46,17 @@ public final class Main {
      * @return its exit code
      */
     public static int run(PrintStream out, PrintStream err, String... arguments) {
-        return run(new Terminal(out, err, false), EarlyWorker.none(), out, err, arguments);
+        return run(new Terminal(out, err, false), EarlyWorker.none(), new StopKey(), out, err, arguments);
     }
 
     private static int run(
-            Terminal terminal, EarlyWorker early, PrintStream out, PrintStream err, String... arguments) {
-        CommandLine line = new CommandLine(new Main(), new Factory(terminal, early));
+            Terminal terminal,
+            EarlyWorker early,
+            StopKey stopKey,
+            PrintStream out,
+            PrintStream err,
+            String... arguments) {
+        CommandLine line = new CommandLine(new Main(), new Factory(terminal, early, stopKey));
         line.setOut(new PrintWriter(out, true));
         line.setErr(new PrintWriter(err, true));
         line.setUsageHelpWidth(110);
@@ -77,11 +85,11 @@ public final class Main {
     }
 
     /** Gives commands what they work with. */
-    private record Factory(Terminal terminal, EarlyWorker early) implements CommandLine.IFactory {
+    private record Factory(Terminal terminal, EarlyWorker early, StopKey stopKey) implements CommandLine.IFactory {
         @Override
         public <K> K create(Class<K> type) throws Exception {
             if (type == RunCommand.class) {
-                return type.cast(new RunCommand(terminal, early));
+                return type.cast(new RunCommand(terminal, early, stopKey));
             }
             if (type == NewCommand.class) {
                 return type.cast(new NewCommand(terminal));

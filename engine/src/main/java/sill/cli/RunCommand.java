@@ -22,6 +22,7 @@ import sill.record.DesignRecord.Made;
 import sill.record.DesignRecord.Source;
 import sill.record.html.RecordPage;
 import sill.values.RunResult;
+import sill.worker.Pace;
 import sill.worker.SheetRun;
 import sill.worksheet.DataFiles;
 import sill.worksheet.Worksheet;
@@ -34,6 +35,7 @@ import sill.worksheet.Worksheet;
 final class RunCommand implements Callable<Integer> {
     private final Terminal terminal;
     private final EarlyWorker early;
+    private final StopKey stopKey;
 
     @Parameters(arity = "1..*", paramLabel = "SHEET", description = "worksheet files")
     private List<Path> sheets;
@@ -50,7 +52,8 @@ final class RunCommand implements Callable<Integer> {
     @Mixin
     private LimitOptions limits;
 
-    RunCommand(Terminal terminal, EarlyWorker early) {
+    RunCommand(Terminal terminal, EarlyWorker early, StopKey stopKey) {
+        this.stopKey = stopKey;
         this.terminal = terminal;
         this.early = early;
     }
@@ -59,16 +62,18 @@ final class RunCommand implements Callable<Integer> {
     public Integer call() throws InterruptedException {
         int worst = ExitCode.HOLDS;
         for (Path sheet : sheets) {
-            worst = Math.max(worst, run(sheet));
+            if (!stopKey.isPressed()) {
+                worst = Math.max(worst, run(sheet));
+            }
         }
         return worst;
     }
 
     private int run(Path path) throws InterruptedException {
-        try (SheetRun run = early.take(limits.limits())) {
+        try {
             SheetFile file = SheetFile.read(path);
             RecordFiles files = new RecordFiles(out == null ? file.folder() : out, file.baseName());
-            DesignRecord record = record(file, run);
+            DesignRecord record = record(file);
             files.write(record);
             if (!quiet) {
                 new RunReport(terminal, record).print(files.page());
@@ -85,7 +90,7 @@ final class RunCommand implements Callable<Integer> {
         }
     }
 
-    private DesignRecord record(SheetFile file, SheetRun run) throws IOException, InterruptedException {
+    private DesignRecord record(SheetFile file) throws IOException, InterruptedException {
         Worksheet worksheet = Worksheet.parse(file.text());
         DataFiles data = DataFiles.read(worksheet, file.folder());
         List<DataFile> files = data.bytes().entrySet().stream()
@@ -96,7 +101,9 @@ final class RunCommand implements Callable<Integer> {
         Function<RunResult, DesignRecord> assemble =
                 result -> Assembly.record(worksheet, source, files, data.problems(), result, made);
         rehearse(assemble);
-        try (RunProgress progress = new RunProgress(terminal, worksheet)) {
+        try (SheetRun run = early.take(limits.limits(), Pace.of(file.text()));
+                RunProgress progress = new RunProgress(terminal, worksheet)) {
+            stopKey.running(run);
             return assemble.apply(run.run(worksheet, data.bytes(), progress));
         }
     }

@@ -16,10 +16,12 @@ import sill.record.DesignRecord.Made;
 import sill.record.DesignRecord.Outcome;
 import sill.record.DesignRecord.PlotEntry;
 import sill.record.DesignRecord.Source;
+import sill.record.DesignRecord.ToleranceEntry;
 import sill.record.DesignRecord.ValueEntry;
 import sill.record.DesignRecord.Verdict;
 import sill.values.CellRun;
 import sill.values.CellState;
+import sill.values.Finding;
 import sill.values.Result;
 import sill.values.RunResult;
 import sill.worksheet.Cell;
@@ -28,9 +30,6 @@ import sill.worksheet.Worksheet;
 
 /** Puts a record together from the worksheet and what its run gave. */
 public final class Assembly {
-    /** Why tolerance cells, and checks that rest on them, have no verdict. */
-    public static final String NO_TOLERANCE_RUNS = "this version of Sill does not run tolerance studies yet";
-
     private final Worksheet worksheet;
     private final RunResult run;
     private final List<Problem> problems;
@@ -76,6 +75,7 @@ public final class Assembly {
                 cells,
                 GivenEntries.of(worksheet),
                 values(),
+                tolerances(),
                 checks,
                 plots(),
                 problems);
@@ -97,19 +97,13 @@ public final class Assembly {
                 .filter(each -> each.number() == cell.number())
                 .findFirst()
                 .orElse(new CellRun(cell.number(), wrong ? CellState.PROBLEM : CellState.DONE, "", List.of(), ""));
-        CellState state = ran.state();
-        String reason = ran.reason();
-        if (cell instanceof Cell.Tolerance && !wrong) {
-            state = CellState.NOT_RUN;
-            reason = "not judged: " + NO_TOLERANCE_RUNS;
-        }
         return new CellEntry(
                 cell.number(),
                 cell.kind().word(),
                 cell.caption(),
                 cell.line(),
-                state,
-                reason,
+                ran.state(),
+                ran.reason(),
                 ran.output(),
                 cell.source());
     }
@@ -120,6 +114,16 @@ public final class Assembly {
                 .filter(result -> result.plot().isEmpty())
                 .map(result -> value(result, known))
                 .toList();
+    }
+
+    private List<ToleranceEntry> tolerances() {
+        StudiedChecks studied = new StudiedChecks(worksheet, run.findings());
+        List<ToleranceEntry> entries = new ArrayList<>();
+        for (Finding finding : run.findings()) {
+            String at = finding.cell() + "." + finding.index();
+            entries.add(new ToleranceEntry(finding, at, studied.target(finding).line(), studied.limits(finding)));
+        }
+        return entries;
     }
 
     private static ValueEntry value(Result result, KnownValues known) {

@@ -7,6 +7,7 @@ import sill.formula.Working;
 import sill.stdlib.Plot;
 import sill.values.CellState;
 import sill.values.Datum;
+import sill.values.Finding;
 import sill.worksheet.Problem;
 
 /**
@@ -21,6 +22,7 @@ import sill.worksheet.Problem;
  * @param cells all cells in order
  * @param givens input values
  * @param values results
+ * @param tolerances what the tolerance cells found
  * @param checks requirements
  * @param plots plots
  * @param problems what is wrong, errors and warnings, in the text's order
@@ -35,9 +37,40 @@ public record DesignRecord(
         List<CellEntry> cells,
         List<GivenEntry> givens,
         List<ValueEntry> values,
+        List<ToleranceEntry> tolerances,
         List<CheckEntry> checks,
         List<PlotEntry> plots,
         List<Problem> problems) {
+
+    /** A record without tolerance cells. */
+    public DesignRecord(
+            Outcome outcome,
+            Map<String, String> titleBlock,
+            Made made,
+            Map<String, String> trial,
+            Source worksheet,
+            List<DataFile> files,
+            List<CellEntry> cells,
+            List<GivenEntry> givens,
+            List<ValueEntry> values,
+            List<CheckEntry> checks,
+            List<PlotEntry> plots,
+            List<Problem> problems) {
+        this(
+                outcome,
+                titleBlock,
+                made,
+                trial,
+                worksheet,
+                files,
+                cells,
+                givens,
+                values,
+                List.of(),
+                checks,
+                plots,
+                problems);
+    }
 
     /** The format's name, first field of the JSON. */
     public static final String FORMAT = "sill-record/1";
@@ -196,6 +229,29 @@ public record DesignRecord(
     }
 
     /**
+     * What a tolerance cell found of one number.
+     *
+     * @param at its address; the components of a record share one
+     * @param line the line of its expression
+     * @param limits of the checks that judge the same expression
+     */
+    public record ToleranceEntry(Finding finding, String at, int line, List<Limit> limits) {}
+
+    /** A limit of a check, and what a drawing calls it. */
+    public record Limit(double value, String label) {}
+
+    /**
+     * What a check was judged on beside the nominal value.
+     *
+     * @param worst the extremes, for {@code at worst-case}
+     * @param share the share of samples inside the limits, for {@code in P %}
+     */
+    public record OverTolerance(Optional<Finding.WorstCase> worst, Optional<Finding.Share> share) {
+        /** The nominal value alone. */
+        public static final OverTolerance NONE = new OverTolerance(Optional.empty(), Optional.empty());
+    }
+
+    /**
      * A check.
      *
      * @param text the worksheet's text without the remark
@@ -206,7 +262,8 @@ public record DesignRecord(
      * @param high upper limit, inclusive
      * @param margin from the judged value to the nearer limit, negative when missed
      * @param marginShare margin over the window's half-width, or over the limit's size when one-sided
-     * @param shownValue value with unit
+     * @param overTolerance what it was judged on beside the nominal value
+     * @param shownValue the judged value with unit: nominal, both extremes, or the share
      * @param shownLimit the requirement with units, as in {@code 4.9 V .. 5.5 V}, {@code ≥ 600 mV}
      * @param shownMargin margin with sign and unit; empty when there is none
      * @param reason why it was not judged; empty when it was
@@ -222,6 +279,7 @@ public record DesignRecord(
             Optional<Double> high,
             Optional<Double> margin,
             Optional<Double> marginShare,
+            OverTolerance overTolerance,
             String shownValue,
             String shownLimit,
             String shownMargin,
@@ -231,7 +289,49 @@ public record DesignRecord(
             String at,
             int line,
             List<String> uses,
-            List<String> dependsOn) {}
+            List<String> dependsOn) {
+        /** A check judged on the nominal value alone. */
+        public CheckEntry(
+                String text,
+                String basis,
+                Optional<Datum> value,
+                String unit,
+                Optional<Double> low,
+                Optional<Double> high,
+                Optional<Double> margin,
+                Optional<Double> marginShare,
+                String shownValue,
+                String shownLimit,
+                String shownMargin,
+                Verdict verdict,
+                String reason,
+                String remark,
+                String at,
+                int line,
+                List<String> uses,
+                List<String> dependsOn) {
+            this(
+                    text,
+                    basis,
+                    value,
+                    unit,
+                    low,
+                    high,
+                    margin,
+                    marginShare,
+                    OverTolerance.NONE,
+                    shownValue,
+                    shownLimit,
+                    shownMargin,
+                    verdict,
+                    reason,
+                    remark,
+                    at,
+                    line,
+                    uses,
+                    dependsOn);
+        }
+    }
 
     /**
      * A plot. The SVG is drawn when the record is written.

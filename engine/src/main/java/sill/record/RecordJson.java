@@ -13,6 +13,7 @@ import java.util.Optional;
 import java.util.TreeMap;
 import sill.plot.PlotDrawing;
 import sill.values.Datum;
+import sill.values.Finding;
 import sill.worksheet.Problem;
 
 /**
@@ -62,9 +63,7 @@ public final class RecordJson {
         list(json, "cells", record.cells(), RecordJson::cell);
         list(json, "givens", record.givens(), RecordJson::given);
         list(json, "values", record.values(), RecordJson::value);
-        // No tolerance runs yet; a reader finds the list where it will be.
-        json.writeArrayFieldStart("tolerances");
-        json.writeEndArray();
+        list(json, "tolerances", record.tolerances(), FindingJson::write);
         list(json, "checks", record.checks(), RecordJson::check);
         list(json, "plots", record.plots(), RecordJson::plot);
         list(json, "problems", record.problems(), RecordJson::problem);
@@ -138,6 +137,16 @@ public final class RecordJson {
         number(json, "high", check.high());
         number(json, "margin", check.margin());
         number(json, "marginShare", check.marginShare());
+        if (check.overTolerance().worst().isPresent()) {
+            Finding.WorstCase worst = check.overTolerance().worst().get();
+            json.writeNumberField("worstLow", worst.low().value());
+            json.writeNumberField("worstHigh", worst.high().value());
+        }
+        if (check.overTolerance().share().isPresent()) {
+            Finding.Share share = check.overTolerance().share().get();
+            json.writeNumberField("share", share.share());
+            json.writeNumberField("shareLow", share.low());
+        }
         textIfAny(json, "shownValue", check.shownValue());
         textIfAny(json, "shownLimit", check.shownLimit());
         textIfAny(json, "shownMargin", check.shownMargin());
@@ -176,12 +185,12 @@ public final class RecordJson {
         return "plot-" + at.replace('.', '-');
     }
 
-    private static void place(JsonGenerator json, String at, int line) throws IOException {
+    static void place(JsonGenerator json, String at, int line) throws IOException {
         text(json, "at", at);
         json.writeNumberField("line", line);
     }
 
-    private static void text(JsonGenerator json, String name, String text) throws IOException {
+    static void text(JsonGenerator json, String name, String text) throws IOException {
         json.writeStringField(name, encodable(text));
     }
 
@@ -199,7 +208,7 @@ public final class RecordJson {
         json.writeEndObject();
     }
 
-    private static void names(JsonGenerator json, String name, List<String> names) throws IOException {
+    static void names(JsonGenerator json, String name, List<String> names) throws IOException {
         json.writeArrayFieldStart(name);
         for (String each : names) {
             text(json, each);
@@ -221,8 +230,7 @@ public final class RecordJson {
         DatumJson.write(json, value.orElse(new Datum.Absent()));
     }
 
-    private static <T> void list(JsonGenerator json, String name, List<T> entries, EntryWriter<T> writer)
-            throws IOException {
+    static <T> void list(JsonGenerator json, String name, List<T> entries, EntryWriter<T> writer) throws IOException {
         json.writeArrayFieldStart(name);
         for (T entry : entries) {
             json.writeStartObject();
@@ -249,7 +257,7 @@ public final class RecordJson {
         return repaired == null ? text : repaired.toString();
     }
 
-    private interface EntryWriter<T> {
+    interface EntryWriter<T> {
         void write(JsonGenerator json, T entry) throws IOException;
     }
 }

@@ -1,6 +1,7 @@
 package sill.record;
 
 import java.util.Optional;
+import java.util.regex.Pattern;
 import sill.units.Notation;
 import sill.units.Unit;
 import sill.worksheet.Check.Limit;
@@ -15,6 +16,9 @@ import sill.worksheet.Check.Requirement;
  * @param shown the requirement in words and units
  */
 record Window(Optional<Double> low, Optional<Double> high, Unit unit, String shown) {
+    private static final Pattern ZEROS_AT_END =
+            Pattern.compile("(?:\\.0+|(?<=\\.\\d{1,3})0+)(?=" + Notation.SPACE + ")");
+
     static Window of(Requirement requirement) {
         if (requirement instanceof Requirement.Within within) {
             return new Window(
@@ -76,11 +80,11 @@ record Window(Optional<Double> low, Optional<Double> high, Unit unit, String sho
         return unit.offset() == 0 ? unit : unit.coherent();
     }
 
-    /** As typed, but for one so small that it would be zeros for the most part. */
+    /** As typed, but for one so small that it would be zeros for the most part: that gets its prefix. */
     private static String shownDistance(double distance, Unit unit) {
-        return distance == 0 || distance / unit.factor() >= 1e-3
+        return distance == 0 || distance / unit.factor() >= 1e-4
                 ? Notation.plain(distance, unit)
-                : Notation.shown(distance, unit);
+                : ZEROS_AT_END.matcher(Notation.shown(distance, unit)).replaceFirst("");
     }
 
     private static String shown(Limit limit) {

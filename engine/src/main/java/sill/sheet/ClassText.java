@@ -71,8 +71,7 @@ final class ClassText {
     MappedText unit() {
         Translation.IMPORTS.forEach(name -> text.add("import " + name + ";\n"));
         program.imports()
-                .forEach(snippet ->
-                        text.copy(snippet.piece(), snippet.span()).add(snippet.hasSemicolon() ? "\n" : ";\n"));
+                .forEach(snippet -> text.copy(snippet.piece(), snippet.span()).add(snippet.isWhole() ? "\n" : ";\n"));
         return declaration();
     }
 
@@ -172,8 +171,7 @@ final class ClassText {
                 }
             }
             case CALL, EXPRESSION -> value(snippet);
-            case STATEMENT ->
-                text.copy(piece, snippet.span(), snippet.calls()).add(snippet.hasSemicolon() ? "\n" : ";\n");
+            case STATEMENT -> text.copy(piece, snippet.span(), snippet.calls()).add(snippet.isWhole() ? "\n" : ";\n");
             default -> {
                 // Imports and members stand elsewhere in the class.
             }

@@ -9,6 +9,8 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
+import java.util.Optional;
 import javax.tools.Diagnostic;
 import javax.tools.DiagnosticCollector;
 import javax.tools.JavaCompiler;
@@ -70,6 +72,19 @@ public final class Compiler {
         // A writer of its own keeps the compiler from ever printing.
         JavacTask task = (JavacTask) compiler.getTask(new StringWriter(), files, complaints, OPTIONS, null, units);
         return new Task(task, complaints);
+    }
+
+    /** The classes of a text, by name; nothing when it has an error. */
+    Optional<Map<String, byte[]>> compile(String source) {
+        ClassesInMemory classes = new ClassesInMemory(files);
+        JavacTask task = (JavacTask) compiler.getTask(
+                new StringWriter(),
+                classes,
+                new DiagnosticCollector<>(),
+                OPTIONS,
+                null,
+                List.of(new Source(0, source)));
+        return task.call() ? Optional.of(classes.bytes()) : Optional.empty();
     }
 
     /** A compiler task and its complaints. */

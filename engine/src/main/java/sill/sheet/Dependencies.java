@@ -50,7 +50,7 @@ final class Dependencies {
     /** The names of other cells that a snippet mentions: values, methods, types. */
     List<String> needs(Snippet snippet) {
         Set<String> needed = inOrder();
-        for (Usage usage : of(snippet)) {
+        for (Usage usage : usages(snippet)) {
             if (declarations.get(usage.name()).cell() != snippet.cell()) {
                 needed.add(usage.name());
             }
@@ -69,7 +69,8 @@ final class Dependencies {
         return new TreeSet<>((a, b) -> Integer.compare(order.get(a), order.get(b)));
     }
 
-    private List<Usage> of(Snippet snippet) {
+    /** Where a snippet uses the names of the sheet. */
+    List<Usage> usages(Snippet snippet) {
         return usages.getOrDefault(snippet, List.of());
     }
 
@@ -90,7 +91,7 @@ final class Dependencies {
             for (Snippet snippet : cell.snippets()) {
                 if (snippet.isMember()) {
                     Set<String> names = mentioned.computeIfAbsent(snippet.name().text(), name -> inOrder());
-                    of(snippet).forEach(usage -> names.add(usage.name()));
+                    usages(snippet).forEach(usage -> names.add(usage.name()));
                 }
             }
         }
@@ -121,7 +122,7 @@ final class Dependencies {
 
     private Set<String> reads(Snippet snippet, Span within) {
         Set<String> read = inOrder();
-        for (Usage usage : of(snippet)) {
+        for (Usage usage : usages(snippet)) {
             if (usage.offset() < within.start() || usage.offset() >= within.end()) {
                 continue;
             }

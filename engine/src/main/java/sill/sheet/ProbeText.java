@@ -33,7 +33,7 @@ final class ProbeText {
     /** The compilation unit. */
     String unit() {
         Translation.IMPORTS.forEach(name -> text.add("import " + name + ";\n"));
-        each(Snippet.Kind.IMPORT).forEach(s -> text.copy(s.piece(), s.span()).add(s.hasSemicolon() ? "\n" : ";\n"));
+        each(Snippet.Kind.IMPORT).forEach(s -> text.copy(s.piece(), s.span()).add(s.isWhole() ? "\n" : ";\n"));
         text.add("class " + ClassText.NAME + " {\n");
         Set<String> names = new HashSet<>();
         for (SheetSource.GivenField given : program.presentGivens()) {

@@ -11,18 +11,24 @@ import sill.worksheet.Problem;
  * A sheet's Java, parsed: what the class is written from. The same for every pass over it.
  *
  * @param givens fields set from outside
- * @param cells calculation cells, in order
+ * @param cells calculation and tolerance cells, in order
  * @param checks check lines, in order
  */
 record Program(List<SheetSource.GivenField> givens, List<CellCode> cells, List<CheckCode> checks) {
     /**
-     * A parsed calculation cell.
+     * A parsed calculation cell, or a tolerance cell with the expressions that it studies.
      *
+     * @param isStudy whether it is a tolerance cell
      * @param snippets those that could be parsed
      * @param faults why the others could not
      * @param lostNames names that the others probably declare, with their offsets
      */
-    record CellCode(Piece piece, List<Snippet> snippets, List<Problem> faults, Map<String, Integer> lostNames) {
+    record CellCode(
+            Piece piece,
+            boolean isStudy,
+            List<Snippet> snippets,
+            List<Problem> faults,
+            Map<String, Integer> lostNames) {
         int number() {
             return piece.cell();
         }

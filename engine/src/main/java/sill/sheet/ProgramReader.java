@@ -24,26 +24,33 @@ final class ProgramReader {
 
     private List<Program.CellCode> cells(List<SheetSource.CodeCell> cells) {
         List<SnippetParser.Raw> raws = new ArrayList<>();
-        Map<Integer, Piece> pieces = new LinkedHashMap<>();
+        List<SnippetParser.Raw> studied = new ArrayList<>();
+        Map<SheetSource.CodeCell, Piece> pieces = new LinkedHashMap<>();
         for (SheetSource.CodeCell cell : cells) {
             Piece piece = Piece.of(cell);
-            pieces.put(piece.cell(), piece);
+            pieces.put(cell, piece);
             String code = CodeText.codeOnly(piece.text());
-            for (Span span : splitter.split(piece.text())) {
+            for (Span span : cell.studied()) {
+                studied.add(new SnippetParser.Raw(piece, code, span, Caption.NONE));
+            }
+            for (Span span : cell.studied().isEmpty() ? splitter.split(piece.text()) : List.<Span>of()) {
                 raws.add(new SnippetParser.Raw(piece, code, span, caption(piece, code, span)));
             }
         }
+        List<SnippetParser.Parsed> all = new ArrayList<>(parser.parse(raws));
+        all.addAll(parser.parseExpressions(studied));
         Map<Integer, List<SnippetParser.Parsed>> byCell = new HashMap<>();
-        for (SnippetParser.Parsed parsed : parser.parse(raws)) {
+        for (SnippetParser.Parsed parsed : all) {
             byCell.computeIfAbsent(parsed.raw().piece().cell(), cell -> new ArrayList<>())
                     .add(parsed);
         }
-        return pieces.values().stream()
-                .map(piece -> cell(piece, byCell.getOrDefault(piece.cell(), List.of())))
-                .toList();
+        List<Program.CellCode> read = new ArrayList<>();
+        pieces.forEach((cell, piece) ->
+                read.add(cell(piece, !cell.studied().isEmpty(), byCell.getOrDefault(piece.cell(), List.of()))));
+        return read;
     }
 
-    private static Program.CellCode cell(Piece piece, List<SnippetParser.Parsed> parsed) {
+    private static Program.CellCode cell(Piece piece, boolean study, List<SnippetParser.Parsed> parsed) {
         List<Snippet> snippets = new ArrayList<>();
         List<Problem> faults = new ArrayList<>();
         Map<String, Integer> lost = new LinkedHashMap<>();
@@ -63,7 +70,7 @@ final class ProgramReader {
             lost.putAll(
                     LostNames.in(piece.text(), new Span(comment, piece.text().length())));
         }
-        return new Program.CellCode(piece, List.copyOf(snippets), List.copyOf(faults), lost);
+        return new Program.CellCode(piece, study, List.copyOf(snippets), List.copyOf(faults), lost);
     }
 
     private List<Program.CheckCode> checks(List<SheetSource.CheckLine> lines) {

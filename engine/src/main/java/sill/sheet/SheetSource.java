@@ -7,7 +7,7 @@ import java.util.Map;
  * What the translation starts from: the parts of a worksheet that hold or name Java.
  *
  * @param givens fields that are set before any cell runs
- * @param cells calculation cells in order
+ * @param cells calculation and tolerance cells in order
  * @param checks check expressions in order
  */
 public record SheetSource(List<GivenField> givens, List<CodeCell> cells, List<CheckLine> checks) {
@@ -58,11 +58,22 @@ public record SheetSource(List<GivenField> givens, List<CodeCell> cells, List<Ch
     }
 
     /**
-     * A calculation cell.
+     * A cell that gives values: a calculation cell, which is Java as a whole, or a tolerance cell, in which the expressions
+     * that it studies are.
      *
      * @param line line of the header; the source starts on the next
+     * @param studied where in the source of a tolerance cell the expressions stand; empty in a calculation cell
      */
-    public record CodeCell(int number, String caption, int line, String source) {}
+    public record CodeCell(int number, String caption, int line, String source, List<Span> studied) {
+        public CodeCell {
+            studied = List.copyOf(studied);
+        }
+
+        /** A calculation cell. */
+        public CodeCell(int number, String caption, int line, String source) {
+            this(number, caption, line, source, List.of());
+        }
+    }
 
     /**
      * A check's expression.

@@ -27,6 +27,8 @@ record Snippet(
         Name name,
         Caption caption) {
 
+    private static final Pattern BLOCK =
+            Pattern.compile("\\{|(?:for|while|do|if|switch|try|synchronized)\\b|\\w+\\s*:");
     private static final Pattern STATIC = Pattern.compile("\\bstatic\\b");
 
     /** What a snippet is. */
@@ -75,9 +77,10 @@ record Snippet(
         return piece.cell();
     }
 
-    /** Whether its text ends as a statement does. */
-    boolean hasSemicolon() {
-        return span.of(piece.text()).endsWith(";");
+    /** Whether it needs no semicolon more; behind an endless loop over a block that would be a statement never reached. */
+    boolean isWhole() {
+        String text = span.of(piece.text());
+        return text.endsWith(";") || (text.endsWith("}") && BLOCK.matcher(text).lookingAt());
     }
 
     /** Whether a member says {@code static} itself. */

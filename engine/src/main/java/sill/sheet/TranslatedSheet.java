@@ -67,7 +67,7 @@ public record TranslatedSheet(
     }
 
     /**
-     * A method of the class to call: a calculation cell, or one line of a check cell.
+     * A method of the class to call: a calculation cell, the expressions of a tolerance cell, or one line of a check cell.
      *
      * @param cell number of the cell
      * @param place place of the cell's header, or of the check's expression
@@ -75,6 +75,7 @@ public record TranslatedSheet(
      * @param method name of the static method; empty when a problem keeps it from running
      * @param needs names of other cells that it uses, to the cells that declare them
      * @param results what it gives; empty for a check
+     * @param study whether it is a tolerance cell, whose results are what it studies
      * @param check the check's names, for a check line
      */
     public record Step(
@@ -84,6 +85,7 @@ public record TranslatedSheet(
             Optional<String> method,
             Map<String, Integer> needs,
             List<ResultField> results,
+            boolean study,
             Optional<CheckNames> check) {
         public Step {
             results = List.copyOf(results);

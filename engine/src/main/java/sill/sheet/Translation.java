@@ -46,8 +46,10 @@ public final class Translation {
     private final Map<Snippet, Set<String>> waits = new IdentityHashMap<>();
     private final Map<String, String> hints = new HashMap<>();
     private final SnippetFinder snippets;
+    private final Compiler compiler;
 
     private Translation(SheetSource source, Compiler compiler, Splitter splitter) {
+        this.compiler = compiler;
         program = new ProgramReader(new SnippetParser(compiler), splitter).read(source);
         names = Names.of(program);
         snippets = new SnippetFinder(program);
@@ -117,8 +119,7 @@ public final class Translation {
         program.imports().stream()
                 .filter(snippet -> !brokenImports.contains(snippet))
                 .forEach(snippet -> imports.add(
-                        CodeText.oneLine(snippet.span().of(snippet.piece().text()))
-                                + (snippet.hasSemicolon() ? "" : ";")));
+                        CodeText.oneLine(snippet.span().of(snippet.piece().text())) + (snippet.isWhole() ? "" : ";")));
         List<Problem> sorted = new ArrayList<>(problems);
         sorted.sort(Comparator.comparingInt(Problem::line).thenComparingInt(Problem::column));
         return new TranslatedSheet(
@@ -129,6 +130,11 @@ public final class Translation {
                 steps,
                 missingGivens,
                 sorted);
+    }
+
+    /** What cuts slices out of the sheet as it runs. */
+    public Slicer slicer() {
+        return new Slicer(program, types, dependencies, compiler);
     }
 
     private boolean isLost(Map<String, Integer> needs, Set<Integer> lostCells) {
@@ -249,6 +255,7 @@ public final class Translation {
                 runs ? Optional.of(ClassText.cellMethod(cell.number())) : Optional.empty(),
                 needs,
                 results,
+                cell.isStudy(),
                 Optional.empty());
     }
 
@@ -261,6 +268,7 @@ public final class Translation {
                 runs ? Optional.of(ClassText.checkMethod(check.line().place())) : Optional.empty(),
                 needs,
                 List.of(),
+                false,
                 Optional.of(new TranslatedSheet.CheckNames(uses, dependencies.closure(uses))));
     }
 

@@ -13,6 +13,7 @@ import sill.sheet.Place;
 import sill.values.CellRun;
 import sill.values.CellState;
 import sill.values.CheckValue;
+import sill.values.Finding;
 import sill.values.Result;
 import sill.values.RunResult;
 import sill.words.Quoted;
@@ -25,6 +26,7 @@ final class Gathered {
     private final Map<Integer, CellRun> cells = new TreeMap<>();
     private final Map<Integer, String> captions = new HashMap<>();
     private final List<Result> results = new ArrayList<>();
+    private final List<Finding> findings = new ArrayList<>();
     private final Map<Place, CheckValue> checks = new TreeMap<>();
     private final Map<Integer, String> withoutValue = new HashMap<>();
     private final Set<Place> endedChecks = new HashSet<>();
@@ -49,7 +51,7 @@ final class Gathered {
     Gathered(Worksheet worksheet) {
         for (Cell cell : worksheet.cells()) {
             captions.put(cell.number(), cell.caption());
-            if (cell instanceof Cell.Calculation) {
+            if (cell instanceof Cell.Calculation || cell instanceof Cell.Tolerance) {
                 codeCells.add(cell.number());
             }
         }
@@ -65,6 +67,11 @@ final class Gathered {
         } else if (report instanceof Report.CellEnded ended) {
             if (cells.putIfAbsent(ended.run().number(), ended.run()) == null) {
                 results.addAll(ended.results());
+                problems.addAll(ended.problems());
+            }
+        } else if (report instanceof Report.StudyEnded ended) {
+            if (cells.putIfAbsent(ended.run().number(), ended.run()) == null) {
+                findings.addAll(ended.findings());
                 problems.addAll(ended.problems());
             }
         } else if (report instanceof Report.CheckEnded ended) {
@@ -108,9 +115,11 @@ final class Gathered {
     }
 
     RunResult result() {
+        findings.sort(Comparator.comparingInt(Finding::cell).thenComparingInt(Finding::index));
         results.sort(Comparator.comparingInt(Result::cell).thenComparingInt(Result::index));
         List<Problem> sorted = new ArrayList<>(problems);
         sorted.sort(Comparator.comparingInt(Problem::line).thenComparingInt(Problem::column));
-        return new RunResult(List.copyOf(cells.values()), results, List.copyOf(checks.values()), withoutValue, sorted);
+        return new RunResult(
+                List.copyOf(cells.values()), results, List.copyOf(checks.values()), withoutValue, findings, sorted);
     }
 }

@@ -5,6 +5,7 @@ import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 import sill.sheet.Place;
 import sill.sheet.SheetSource;
@@ -12,6 +13,7 @@ import sill.sheet.SheetSource.CheckLine;
 import sill.sheet.SheetSource.CodeCell;
 import sill.sheet.SheetSource.GivenField;
 import sill.sheet.SheetSource.GivenType;
+import sill.sheet.Span;
 import sill.units.Unit;
 import sill.worksheet.Cell;
 import sill.worksheet.Check;
@@ -45,10 +47,7 @@ final class JobWriter {
             } else if (cell instanceof Cell.Calculation code) {
                 writer.cells.add(new CodeCell(code.number(), code.caption(), code.line(), code.source()));
             } else if (cell instanceof Cell.Tolerance tolerance) {
-                for (ToleranceStudy.Target target : tolerance.study().of()) {
-                    writer.checks.add(
-                            new CheckLine(cell.number(), target.line(), target.column(), target.text(), false, ""));
-                }
+                writer.add(tolerance);
             } else if (cell instanceof Cell.Checks checks) {
                 for (Check check : checks.checks()) {
                     boolean condition = check.requirement() instanceof Check.Requirement.Holds;
@@ -62,7 +61,33 @@ final class JobWriter {
                 }
             }
         }
-        return new Job(new SheetSource(writer.givens, writer.cells, writer.checks), writer.values, leftOut);
+        return new Job(
+                new SheetSource(writer.givens, writer.cells, writer.checks),
+                writer.values,
+                StudyOrders.of(worksheet),
+                leftOut);
+    }
+
+    private static Optional<Job.Spread> spread(Given.Quantity quantity) {
+        return quantity.hasLimits()
+                ? Optional.of(new Job.Spread(quantity.low(), quantity.high(), quantity.distribution()))
+                : Optional.empty();
+    }
+
+    private void add(Cell.Tolerance cell) {
+        List<Span> studied = new ArrayList<>();
+        for (ToleranceStudy.Target target : cell.study().of()) {
+            // The source starts on the line behind the header.
+            int lineStart = 0;
+            for (int line = cell.line() + 1; line < target.line(); line++) {
+                lineStart = cell.source().indexOf('\n', lineStart) + 1;
+            }
+            int start = lineStart + target.column() - 1;
+            studied.add(new Span(start, start + target.text().length()));
+        }
+        if (!studied.isEmpty()) {
+            cells.add(new CodeCell(cell.number(), cell.caption(), cell.line(), cell.source(), studied));
+        }
     }
 
     /** The limits' coherent unit; none when they are bare zeros, which fit anything, or when there are no limits. */
@@ -104,7 +129,7 @@ final class JobWriter {
         if (given.value() instanceof Given.Quantity quantity) {
             type = GivenType.NUMBER;
             unit = quantity.unit().coherent().symbol();
-            values.put(given.name(), new Job.GivenValue.Number(quantity.nominal()));
+            values.put(given.name(), new Job.GivenValue.Number(quantity.nominal(), spread(quantity)));
         } else if (given.value() instanceof Given.Quantities quantities) {
             type = GivenType.NUMBERS;
             unit = quantities.unit().coherent().symbol();

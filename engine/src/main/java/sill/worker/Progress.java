@@ -12,4 +12,7 @@ public interface Progress {
      * @param cell number of the cell that runs; 0 while the sheet is compiled
      */
     void begins(int cell);
+
+    /** The tolerance cell that runs has come so far: of {@code total} repetitions {@code done} are done. */
+    default void studied(long done, long total) {}
 }

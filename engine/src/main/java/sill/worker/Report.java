@@ -5,6 +5,7 @@ import java.util.Optional;
 import sill.sheet.Place;
 import sill.values.CellRun;
 import sill.values.CheckValue;
+import sill.values.Finding;
 import sill.values.Result;
 import sill.worksheet.Problem;
 
@@ -22,6 +23,12 @@ sealed interface Report {
     /** A check line ended, or could not be called; without a value it could not be evaluated, for the reason given. */
     record CheckEnded(int cell, Place place, Optional<CheckValue> value, String reason, List<Problem> problems)
             implements Report {}
+
+    /** A tolerance cell ended, or could not be called. */
+    record StudyEnded(CellRun run, List<Finding> findings, List<Problem> problems) implements Report {}
+
+    /** How far the tolerance cell has come that began last. */
+    record Studied(long done, long total) implements Report {}
 
     /** All is done; these problems show only at the end. */
     record Finished(List<Problem> problems) implements Report {}
@@ -63,6 +70,12 @@ sealed interface Report {
             out.number(4).list(finished.problems(), ValueWire::problem);
         } else if (this instanceof Failed failed) {
             out.number(5).text(failed.what()).text(failed.hint());
+        } else if (this instanceof StudyEnded ended) {
+            out.number(6);
+            ValueWire.cellRun(out, ended.run());
+            out.list(ended.findings(), FindingWire::write).list(ended.problems(), ValueWire::problem);
+        } else if (this instanceof Studied studied) {
+            out.number(7).whole(studied.done()).whole(studied.total());
         }
         return out.bytes();
     }
@@ -98,6 +111,8 @@ sealed interface Report {
                         in.list(ValueWire::problem));
             case 4 -> new Finished(in.list(ValueWire::problem));
             case 5 -> new Failed(in.text(), in.text());
+            case 6 -> new StudyEnded(ValueWire.cellRun(in), in.list(FindingWire::read), in.list(ValueWire::problem));
+            case 7 -> new Studied(in.whole(), in.whole());
             default -> throw new WireIn.BadMessage("there is no kind of report " + kind);
         };
     }

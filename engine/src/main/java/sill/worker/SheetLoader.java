@@ -10,7 +10,17 @@ import jdk.jshell.spi.ExecutionControl.ClassBytecodes;
  * are those of {@code StrictMath}.
  */
 final class SheetLoader implements LoaderDelegate {
-    private final Loader loader = new Loader();
+    private final Loader loader;
+
+    /** A loader to which classes come as they are evaluated. */
+    SheetLoader() {
+        this(Map.of());
+    }
+
+    /** A loader of classes that are known, by name. */
+    SheetLoader(Map<String, byte[]> classes) {
+        loader = new Loader(classes);
+    }
 
     @Override
     public void load(ClassBytecodes[] classes) {
@@ -45,10 +55,11 @@ final class SheetLoader implements LoaderDelegate {
     }
 
     private static final class Loader extends ClassLoader {
-        final Map<String, byte[]> known = new HashMap<>();
+        final Map<String, byte[]> known;
 
-        Loader() {
+        Loader(Map<String, byte[]> classes) {
             super(SheetLoader.class.getClassLoader());
+            known = new HashMap<>(classes);
         }
 
         @Override

@@ -17,10 +17,13 @@ public final class SheetRun implements AutoCloseable {
     private static final String REPORT = "Please report it with the worksheet.";
 
     private final Limits limits;
-    private WorkerProcess worker;
+    private final Pace pace;
+    private volatile WorkerProcess worker;
+    private volatile boolean stopping;
 
-    private SheetRun(Limits limits, WorkerProcess worker) {
+    private SheetRun(Limits limits, Pace pace, WorkerProcess worker) {
         this.limits = limits;
+        this.pace = pace;
         this.worker = worker;
     }
 
@@ -29,13 +32,18 @@ public final class SheetRun implements AutoCloseable {
      *
      * @throws IOException when no process can be started
      */
-    public static SheetRun start(Limits limits) throws IOException {
-        return new SheetRun(limits, WorkerProcess.start(limits));
+    public static SheetRun start(Limits limits, Pace pace) throws IOException {
+        return new SheetRun(limits, pace, WorkerProcess.start(limits, pace));
     }
 
     /** The same run with another time limit; the memory of its first worker is given. */
     public SheetRun within(Limits others) {
-        return new SheetRun(others, worker);
+        return new SheetRun(others, pace, worker);
+    }
+
+    /** What its workers are good at. */
+    public Pace pace() {
+        return pace;
     }
 
     /**
@@ -54,15 +62,22 @@ public final class SheetRun implements AutoCloseable {
                     work(JobWriter.job(worksheet, files, gathered.stopped()), gathered, progress);
             // A step that was stopped before is left out; were it named again, a further worker would not get further.
             again = stop.isPresent()
+                    && !stopping
                     && stop.get().cell() > 0
                     && !gathered.stopped().contains(stop.get().place());
             stop.ifPresent(gathered::stop);
             if (again) {
                 worker.close();
-                worker = WorkerProcess.start(limits);
+                worker = WorkerProcess.start(limits, pace);
             }
         }
         return gathered.result();
+    }
+
+    /** Ends the run, from another thread, at what it has so far. */
+    public void stop() {
+        stopping = true;
+        worker.stop();
     }
 
     @Override
@@ -96,6 +111,8 @@ public final class SheetRun implements AutoCloseable {
                 progress.begins(begun.cell());
             } else if (report instanceof Report.Failed failed) {
                 return Optional.of(Gathered.Stop.at(at, failed.what(), failed.hint()));
+            } else if (report instanceof Report.Studied studied) {
+                progress.studied(studied.done(), studied.total());
             } else {
                 gathered.take(report);
                 if (report instanceof Report.Finished) {

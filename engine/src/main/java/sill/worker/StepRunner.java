@@ -27,6 +27,7 @@ final class StepRunner {
     private final TranslatedSheet sheet;
     private final Class<?> code;
     private final CapturedOutput output;
+    private final Studies studies;
     private final Consumer<Report> reports;
     private final Set<Place> leftOut;
     private final Set<Integer> lostCells = new TreeSet<>();
@@ -34,7 +35,13 @@ final class StepRunner {
     private int firstLine;
 
     StepRunner(
-            TranslatedSheet sheet, Class<?> code, Set<Place> leftOut, CapturedOutput output, Consumer<Report> reports) {
+            TranslatedSheet sheet,
+            Class<?> code,
+            Set<Place> leftOut,
+            CapturedOutput output,
+            Studies studies,
+            Consumer<Report> reports) {
+        this.studies = studies;
         this.sheet = sheet;
         this.code = code;
         this.output = output;
@@ -90,8 +97,11 @@ final class StepRunner {
             reports.accept(new Report.CheckEnded(step.cell(), step.place(), Optional.empty(), reason, problems));
         } else {
             lostCells.add(step.cell());
-            reports.accept(new Report.CellEnded(
-                    new CellRun(step.cell(), state, reason, waitsOn, output.take()), List.of(), problems));
+            CellRun run = new CellRun(step.cell(), state, reason, waitsOn, output.take());
+            reports.accept(
+                    step.study()
+                            ? new Report.StudyEnded(run, List.of(), problems)
+                            : new Report.CellEnded(run, List.of(), problems));
         }
     }
 
@@ -115,9 +125,25 @@ final class StepRunner {
             for (TranslatedSheet.ResultField field : step.results()) {
                 results.add(result(step, field));
             }
-            reports.accept(new Report.CellEnded(
-                    new CellRun(step.cell(), CellState.DONE, "", List.of(), output.take()), results, List.of()));
+            if (step.study()) {
+                study(step, results);
+            } else {
+                reports.accept(new Report.CellEnded(done(step), results, List.of()));
+            }
         }
+    }
+
+    private void study(TranslatedSheet.Step step, List<Result> nominal) {
+        Studies.Outcome outcome = studies.study(step, nominal);
+        if (outcome.failed()) {
+            lose(step, CellState.PROBLEM, "see the problems", List.of(), outcome.problems());
+        } else {
+            reports.accept(new Report.StudyEnded(done(step), outcome.findings(), outcome.problems()));
+        }
+    }
+
+    private CellRun done(TranslatedSheet.Step step) {
+        return new CellRun(step.cell(), CellState.DONE, "", List.of(), output.take());
     }
 
     /** What the author's own text threw; a type that can't be set up wraps it once more. */

@@ -41,6 +41,14 @@ final class WireIn {
         }
     }
 
+    long whole() {
+        try {
+            return bytes.getLong();
+        } catch (BufferUnderflowException e) {
+            throw new BadMessage("message ends too early");
+        }
+    }
+
     double real() {
         try {
             return bytes.getDouble();

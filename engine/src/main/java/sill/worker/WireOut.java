@@ -31,6 +31,15 @@ final class WireOut {
         return this;
     }
 
+    WireOut whole(long value) {
+        try {
+            out.writeLong(value);
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+        return this;
+    }
+
     WireOut real(double value) {
         try {
             out.writeDouble(value);

@@ -29,6 +29,9 @@ final class WorkerProcess implements AutoCloseable {
     /** Where the start script wants the archive written, in the one run that does so. */
     private static final String TRAINING = System.getProperty("sill.cds.train", "");
 
+    /** 128 and the number of the signal that a stop from the keyboard sends, to the worker too. */
+    private static final int STOPPED_BY_KEY = 130;
+
     private static final int KEPT_ERROR_BYTES = 4096;
 
     private final Process process;
@@ -57,9 +60,9 @@ final class WorkerProcess implements AutoCloseable {
     }
 
     /** Starts a worker; it gets ready while the parent does something else. */
-    static WorkerProcess start(Limits limits) throws IOException {
+    static WorkerProcess start(Limits limits, Pace pace) throws IOException {
         Path folder = Files.createTempDirectory("sill-worker");
-        ProcessBuilder builder = new ProcessBuilder(command(limits, folder));
+        ProcessBuilder builder = new ProcessBuilder(command(limits, pace, folder));
         builder.environment().clear();
         builder.directory(folder.toFile());
         WorkerProcess worker = new WorkerProcess(builder.start(), folder);
@@ -67,14 +70,13 @@ final class WorkerProcess implements AutoCloseable {
         return worker;
     }
 
-    private static List<String> command(Limits limits, Path folder) {
+    private static List<String> command(Limits limits, Pace pace, Path folder) {
         List<String> command = new ArrayList<>();
         command.add(Path.of(System.getProperty("java.home"), "bin", "java").toString());
         command.addAll(List.of(
                 "-Xmx" + limits.memoryMegabytes() + "m",
                 "-Xss16m",
                 "-XX:+UseSerialGC",
-                "-XX:TieredStopAtLevel=1",
                 // Where the system has them, fewer and larger pages save a sixth of a run.
                 "-XX:+UseTransparentHugePages",
                 "-XX:+ExitOnOutOfMemoryError",
@@ -83,6 +85,9 @@ final class WorkerProcess implements AutoCloseable {
                 "-XX:-UsePerfData",
                 "-Xshare:auto",
                 "-Xlog:disable"));
+        if (pace == Pace.QUICK_START) {
+            command.add("-XX:TieredStopAtLevel=1");
+        }
         String archives = System.getProperty("sill.cds", "");
         if (!archives.isEmpty()) {
             command.add("-XX:SharedArchiveFile=" + Path.of(archives, ARCHIVE));
@@ -119,6 +124,12 @@ final class WorkerProcess implements AutoCloseable {
         out.writeInt(bytes.length);
         out.write(bytes);
         out.flush();
+    }
+
+    /** Has the next report be that the run was stopped. */
+    void stop() {
+        events.clear();
+        events.offer(new Heard(Optional.empty(), Optional.of(new End("the run was stopped", "Run again.", false))));
     }
 
     /** Waits for the next report. */
@@ -176,6 +187,9 @@ final class WorkerProcess implements AutoCloseable {
     private static End end(int exit, byte[] lastErrors) {
         if (new String(lastErrors, StandardCharsets.UTF_8).contains("OutOfMemoryError")) {
             return new End("it ran out of memory", "Keep fewer values, or allow more with --memory.", false);
+        }
+        if (exit == STOPPED_BY_KEY) {
+            return new End("the run was stopped", "Run again.", false);
         }
         String ended = "its worker ended with status " + exit;
         return exit < 128

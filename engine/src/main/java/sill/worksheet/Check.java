@@ -16,6 +16,15 @@ import sill.units.Unit;
 public record Check(
         int line, String text, String expression, int column, Requirement requirement, Basis basis, String remark) {
 
+    /** The expression without spaces, by which it finds the tolerance cell that studies it. */
+    public String key() {
+        return key(expression);
+    }
+
+    static String key(String expression) {
+        return expression.replaceAll("[\\s\\h]+", "");
+    }
+
     /**
      * A limit as written.
      *

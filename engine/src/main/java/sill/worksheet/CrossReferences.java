@@ -52,7 +52,7 @@ final class CrossReferences {
             studiesAreWhole &= !problems.hasErrorIn(cell.number());
             ToleranceStudy study = tolerance.study();
             for (Target target : study.of()) {
-                String text = spaceless(target.text());
+                String text = target.key();
                 for (Method method : study.methods()) {
                     if (method instanceof Method.WorstCase) {
                         worstCases.add(text);
@@ -104,7 +104,7 @@ final class CrossReferences {
     }
 
     private void basis(Check check) {
-        String expression = spaceless(check.expression());
+        String expression = check.key();
         if (check.basis() instanceof Basis.WorstCase && !worstCases.contains(expression)) {
             missing(check, "worst-case", "worst-case");
         } else if (check.basis() instanceof Basis.Share && !sampled.contains(expression)) {
@@ -119,9 +119,5 @@ final class CrossReferences {
                 "Found " + Quoted.of(check.expression())
                         + " judged over tolerance, expected a tolerance cell that studies it by " + method,
                 "Add it behind 'of:' in a tolerance cell with 'method: " + example + "'.");
-    }
-
-    private static String spaceless(String expression) {
-        return expression.replaceAll("[\\s\\h]+", "");
     }
 }

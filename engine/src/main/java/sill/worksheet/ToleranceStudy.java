@@ -19,7 +19,12 @@ public record ToleranceStudy(List<Target> of, List<Method> methods, List<Target>
     }
 
     /** A piece of text with its place: an expression after {@code of:}, a name after {@code vary:} or {@code hold:}. */
-    public record Target(String text, int line, int column) {}
+    public record Target(String text, int line, int column) {
+        /** The text without spaces: a check that says the same is judged on what is found here. */
+        public String key() {
+            return Check.key(text);
+        }
+    }
 
     /** A way to push tolerances through the calculation. */
     public sealed interface Method {

@@ -22,7 +22,7 @@ class JudgeTest {
         assertThat(worksheet.problems()).isEmpty();
         List<CheckValue> values = value.map(found -> new CheckValue(4, found, "", List.of(), List.of())).stream()
                 .toList();
-        return Judge.judge(worksheet, new RunResult(List.of(), List.of(), values, withoutValue, List.of()))
+        return Judge.judge(worksheet, new RunResult(List.of(), List.of(), values, withoutValue, List.of(), List.of()))
                 .get(0);
     }
 
@@ -35,7 +35,8 @@ class JudgeTest {
             at most 2 kΩ           | 2500  | fails | −500.0 Ω    | -0.25  | ≤ 2 kΩ
             at least 0 V           | 0.2   | holds | +200.0 mV   |        | ≥ 0 V
             equals 5 V ± 0.2 V     | 4.9   | holds | +100.0 mV   | 0.5    | = 5 V ± 0.2 V
-            equals 5 V ± 2 µV      | 5.1   | fails | −100.0 mV   | -49999 | = 5 V ± 2.000 µV
+            equals 5 V ± 2 µV      | 5.1   | fails | −100.0 mV   | -49999 | = 5 V ± 2 µV
+            equals 5 V ± 2.5 µV    | 5     | holds | +2.500 µV   | 1      | = 5 V ± 2.5 µV
             at most 40 °C          | 303.15| holds | +10.00 K    |        | ≤ 40 °C
             at least 1             | NaN   | fails | not a number|        | ≥ 1
             """)

@@ -75,7 +75,7 @@ final class Sheets {
     }
 
     static RunResult inWorker(String text, Map<String, byte[]> files, Limits limits, Progress progress) {
-        try (SheetRun run = SheetRun.start(limits)) {
+        try (SheetRun run = SheetRun.start(limits, Pace.QUICK_START)) {
             return run.run(Worksheet.parse(text), files, progress);
         } catch (IOException | InterruptedException e) {
             throw new IllegalStateException(e);

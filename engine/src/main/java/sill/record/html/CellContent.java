@@ -11,6 +11,7 @@ import sill.record.DesignRecord;
 record CellContent(
         Map<Integer, List<DesignRecord.GivenEntry>> givensByCell,
         Map<Integer, List<DesignRecord.ValueEntry>> valuesByCell,
+        Map<Integer, List<DesignRecord.ToleranceEntry>> tolerancesByCell,
         Map<Integer, List<DesignRecord.CheckEntry>> checksByCell,
         Map<Integer, List<DesignRecord.PlotEntry>> plotsByCell,
         RecordTrace trace) {
@@ -19,6 +20,7 @@ record CellContent(
         return new CellContent(
                 byCell(record.givens(), DesignRecord.GivenEntry::at),
                 byCell(record.values(), DesignRecord.ValueEntry::at),
+                byCell(record.tolerances(), DesignRecord.ToleranceEntry::at),
                 byCell(record.checks(), DesignRecord.CheckEntry::at),
                 byCell(record.plots(), DesignRecord.PlotEntry::at),
                 trace);
@@ -30,6 +32,16 @@ record CellContent(
 
     List<DesignRecord.ValueEntry> values(int cell) {
         return valuesByCell.getOrDefault(cell, List.of());
+    }
+
+    List<DesignRecord.ToleranceEntry> tolerances(int cell) {
+        return tolerancesByCell.getOrDefault(cell, List.of());
+    }
+
+    Map<String, DesignRecord.GivenEntry> givensByName() {
+        Map<String, DesignRecord.GivenEntry> byName = new HashMap<>();
+        givensByCell.values().forEach(those -> those.forEach(given -> byName.put(given.name(), given)));
+        return byName;
     }
 
     List<DesignRecord.CheckEntry> checks(int cell) {

@@ -33,6 +33,7 @@ final class Cells {
             case "note" -> Notes.write(page, cell.source());
             case "given" -> Givens.write(page, cell, content);
             case "calc" -> Calculations.write(page, cell.number(), content);
+            case "tolerance" -> Tolerances.write(page, cell.number(), content);
             case "check" -> {
                 if (!content.checks(cell.number()).isEmpty()) {
                     String caption = "Checks of cell " + cell.number();

@@ -1,0 +1,95 @@
+package sill.record;
+
+import java.math.BigDecimal;
+import java.math.RoundingMode;
+import java.util.LinkedHashMap;
+import java.util.Map;
+import sill.record.DesignRecord.GivenEntry;
+import sill.units.Notation;
+import sill.units.Unit;
+import sill.values.Finding;
+
+/** What a tolerance cell found, as a record prints it. */
+public final class FindingText {
+    private final Unit unit;
+
+    public FindingText(Finding finding) {
+        unit = Units.of(finding.unit());
+    }
+
+    /** A value with its unit. */
+    public String number(double value) {
+        return Notation.shown(value, unit);
+    }
+
+    /** Two values, as in {@code 4.981 V .. 5.312 V}. */
+    public String range(double low, double high) {
+        return number(low) + " .. " + number(high);
+    }
+
+    /** A slope: the result's unit over the given's. */
+    public String slope(double slope, String givenUnit) {
+        return Notation.shown(
+                slope,
+                Unit.ofDimension(unit.dimension().over(Units.of(givenUnit).dimension())));
+    }
+
+    /** Figures of the samples, by name. */
+    public Map<String, String> figures(Finding.MonteCarlo found) {
+        Map<String, String> figures = new LinkedHashMap<>();
+        figures.put("Samples", grouped(found.samples()) + ", seed " + found.seed());
+        if (found.notFinite() > 0) {
+            figures.put(
+                    "Not finite",
+                    grouped(found.notFinite()) + " of them, " + grouped(found.thrown())
+                            + " by an exception; the figures below are those of the others");
+        }
+        figures.put("Mean", withError(found.mean(), found.errors().get("mean")));
+        figures.put("Standard deviation", withError(found.sd(), found.errors().get("sd")));
+        figures.put("Shortest 95 % interval", range(found.low(), found.high()));
+        figures.put("Least, greatest", number(found.min()) + ", " + number(found.max()));
+        return figures;
+    }
+
+    private String withError(double value, Double error) {
+        return number(value) + (error == null ? "" : ", standard error by sampling " + number(error));
+    }
+
+    /** A probability as {@code 99.865 %}. */
+    public static String percent(String probability) {
+        return new BigDecimal(probability)
+                        .scaleByPowerOfTen(2)
+                        .stripTrailingZeros()
+                        .toPlainString() + Notation.SPACE + "%";
+    }
+
+    /** A share to one decimal, as {@code 12.5 %}. */
+    public static String share(double share) {
+        return BigDecimal.valueOf(share)
+                        .scaleByPowerOfTen(2)
+                        .setScale(1, RoundingMode.HALF_EVEN)
+                        .toPlainString() + Notation.SPACE + "%";
+    }
+
+    /** Where a given stands: {@code lower limit}, {@code upper limit}, or its value. */
+    public static String place(GivenEntry given, double value) {
+        if (given.low().filter(low -> low == value).isPresent()) {
+            return "lower limit";
+        }
+        if (given.high().filter(high -> high == value).isPresent()) {
+            return "upper limit";
+        }
+        return Notation.shown(value, Units.of(given.unit()));
+    }
+
+    /** Digits in groups of three: ISO 80000-1:2009, 7.3.1. */
+    static String grouped(long whole) {
+        String digits = Long.toString(whole);
+        StringBuilder grouped = new StringBuilder();
+        for (int i = 0; i < digits.length(); i++) {
+            boolean starts = i > 0 && (digits.length() - i) % 3 == 0 && digits.length() > 4;
+            grouped.append(starts ? String.valueOf(Notation.SPACE) : "").append(digits.charAt(i));
+        }
+        return grouped.toString();
+    }
+}
