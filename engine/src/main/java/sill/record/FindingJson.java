@@ -36,6 +36,9 @@ final class FindingJson {
             j.writeNumberField("slope", each.slope());
             j.writeNumberField("share", each.share());
         });
+        if (finding.sweep().isPresent()) {
+            sweep(json, finding.sweep().get());
+        }
         RecordJson.names(json, "remarks", finding.remarks());
         RecordJson.place(json, entry.at(), entry.line());
     }
@@ -53,6 +56,24 @@ final class FindingJson {
         point(json, "lowAt", finding.varied(), found.low().at());
         point(json, "highAt", finding.varied(), found.high().at());
         json.writeEndObject();
+    }
+
+    private static void sweep(JsonGenerator json, Finding.Sweep sweep) throws IOException {
+        json.writeObjectFieldStart("over");
+        RecordJson.text(json, "given", sweep.given());
+        column(json, "at", sweep.at());
+        column(json, "nominal", sweep.nominal());
+        column(json, "low", sweep.low());
+        column(json, "high", sweep.high());
+        json.writeEndObject();
+    }
+
+    private static void column(JsonGenerator json, String name, List<Double> numbers) throws IOException {
+        json.writeArrayFieldStart(name);
+        for (double number : numbers) {
+            json.writeNumber(number);
+        }
+        json.writeEndArray();
     }
 
     private static void point(JsonGenerator json, String name, List<String> givens, List<Double> values)

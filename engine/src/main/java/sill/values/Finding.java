@@ -18,6 +18,7 @@ import java.util.Optional;
  * @param rootSumSquare the linear estimate, when asked for
  * @param monteCarlo what the samples gave, when asked for
  * @param sensitivities the largest share first
+ * @param sweep the result along one given, when asked for
  * @param remarks what a reader must know of these figures, each a sentence
  */
 public record Finding(
@@ -32,6 +33,7 @@ public record Finding(
         Optional<RootSumSquare> rootSumSquare,
         Optional<MonteCarlo> monteCarlo,
         List<Sensitivity> sensitivities,
+        Optional<Sweep> sweep,
         List<String> remarks) {
     public Finding {
         varied = List.copyOf(varied);
@@ -132,6 +134,19 @@ public record Finding(
     public record Histogram(double from, double to, List<Long> counts) {
         public Histogram {
             counts = List.copyOf(counts);
+        }
+    }
+
+    /**
+     * A result along one given, from its lower limit to its upper one: at its nominal value but for that given, and lowest and
+     * highest with all others varying.
+     */
+    public record Sweep(String given, List<Double> at, List<Double> nominal, List<Double> low, List<Double> high) {
+        public Sweep {
+            at = List.copyOf(at);
+            nominal = List.copyOf(nominal);
+            low = List.copyOf(low);
+            high = List.copyOf(high);
         }
     }
 

@@ -22,6 +22,7 @@ final class FindingWire {
         out.list(
                 finding.sensitivities(),
                 (o, each) -> o.text(each.given()).real(each.slope()).real(each.share()));
+        optional(out, finding.sweep(), FindingWire::sweep);
         out.texts(finding.remarks());
     }
 
@@ -38,7 +39,18 @@ final class FindingWire {
                 optional(in, i -> new Finding.RootSumSquare(i.real(), i.real(), i.real())),
                 optional(in, FindingWire::monteCarlo),
                 in.list(i -> new Finding.Sensitivity(i.text(), i.real(), i.real())),
+                optional(in, FindingWire::sweep),
                 in.texts());
+    }
+
+    private static void sweep(WireOut out, Finding.Sweep sweep) {
+        out.text(sweep.given()).list(sweep.at(), WireOut::real).list(sweep.nominal(), WireOut::real);
+        out.list(sweep.low(), WireOut::real).list(sweep.high(), WireOut::real);
+    }
+
+    private static Finding.Sweep sweep(WireIn in) {
+        return new Finding.Sweep(
+                in.text(), in.list(WireIn::real), in.list(WireIn::real), in.list(WireIn::real), in.list(WireIn::real));
     }
 
     private static void worstCase(WireOut out, Finding.WorstCase found) {

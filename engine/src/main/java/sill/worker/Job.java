@@ -33,6 +33,7 @@ record Job(SheetSource source, Map<String, GivenValue> values, List<StudyOrder> 
      *
      * @param vary givens to vary; empty for all with limits that the results rest on
      * @param hold givens to hold at nominal
+     * @param over a given along which the results are wanted
      * @param shares checks that are judged on a share of the samples
      */
     record StudyOrder(
@@ -40,6 +41,7 @@ record Job(SheetSource source, Map<String, GivenValue> values, List<StudyOrder> 
             List<ToleranceStudy.Method> methods,
             List<String> vary,
             List<String> hold,
+            Optional<String> over,
             List<ShareWanted> shares) {}
 
     /**

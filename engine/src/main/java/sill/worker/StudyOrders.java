@@ -24,6 +24,7 @@ final class StudyOrders {
                         study.methods(),
                         study.vary().stream().map(Target::text).toList(),
                         study.hold().stream().map(Target::text).toList(),
+                        study.over().map(Target::text),
                         shares(worksheet, study)));
             }
         }

@@ -32,7 +32,7 @@ final class StudyWire {
 
     static void order(WireOut out, Job.StudyOrder order) {
         out.number(order.cell()).list(order.methods(), StudyWire::method);
-        out.texts(order.vary()).texts(order.hold());
+        out.texts(order.vary()).texts(order.hold()).texts(order.over().stream().toList());
         out.list(
                 order.shares(),
                 (o, share) -> o.number(share.line())
@@ -47,6 +47,7 @@ final class StudyWire {
                 in.list(StudyWire::method),
                 in.texts(),
                 in.texts(),
+                in.texts().stream().findFirst(),
                 in.list(i -> new Job.ShareWanted(i.number(), i.number(), i.real(), i.real())));
     }
 

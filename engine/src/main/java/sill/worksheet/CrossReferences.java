@@ -66,17 +66,9 @@ final class CrossReferences {
 
     private void names(ToleranceStudy study) {
         Set<String> varied = new HashSet<>();
-        for (Target target : study.vary()) {
-            varied.add(target.text());
-            Given given = given(target);
-            if (given != null && !(given.value() instanceof Quantity quantity && quantity.hasLimits())) {
-                problems.error(
-                        target.line(),
-                        target.column(),
-                        "Found " + Quoted.of(target.text()) + ", expected a given with limits to vary between",
-                        given.value() instanceof Quantity ? "Give it a tolerance on line " + given.line() + "." : "");
-            }
-        }
+        study.vary().forEach(target -> varied.add(target.text()));
+        study.vary().forEach(this::givenWithLimits);
+        study.over().ifPresent(this::givenWithLimits);
         for (Target target : study.hold()) {
             given(target);
             if (varied.contains(target.text())) {
@@ -87,6 +79,17 @@ final class CrossReferences {
                                 + " under 'vary:' and 'hold:', expected it under one of them",
                         "");
             }
+        }
+    }
+
+    private void givenWithLimits(Target target) {
+        Given given = given(target);
+        if (given != null && !(given.value() instanceof Quantity quantity && quantity.hasLimits())) {
+            problems.error(
+                    target.line(),
+                    target.column(),
+                    "Found " + Quoted.of(target.text()) + ", expected a given with limits to vary between",
+                    given.value() instanceof Quantity ? "Give it a tolerance on line " + given.line() + "." : "");
         }
     }
 

@@ -12,7 +12,7 @@ import sill.worksheet.ToleranceStudy.Target;
 
 /** Reads the lines of one tolerance cell. */
 final class ToleranceParser {
-    private static final List<String> KEYS = List.of("of", "method", "vary", "hold");
+    private static final List<String> KEYS = List.of("of", "method", "vary", "hold", "over");
 
     private final ProblemList problems;
     private final Map<String, Integer> lineOfKey = new HashMap<>();
@@ -20,6 +20,7 @@ final class ToleranceParser {
     private final List<Method> methods = new ArrayList<>();
     private final List<Target> vary = new ArrayList<>();
     private final List<Target> hold = new ArrayList<>();
+    private final List<Target> over = new ArrayList<>();
 
     private ToleranceParser(ProblemList problems) {
         this.problems = problems;
@@ -38,7 +39,12 @@ final class ToleranceParser {
         }
         parser.require("of", "what is to be studied", "of: trip.rising(), band", header);
         parser.require("method", "how", "method: worst-case, rss, monte-carlo 200000 seed 7", header);
-        return new ToleranceStudy(parser.of, parser.methods, parser.vary, parser.hold);
+        return new ToleranceStudy(
+                parser.of,
+                parser.methods,
+                parser.vary,
+                parser.hold,
+                parser.over.stream().findFirst());
     }
 
     private void require(String key, String meaning, String example, int header) {
@@ -67,7 +73,19 @@ final class ToleranceParser {
             case "of" -> distinct(TopLevelList.read(cursor, line, "a result or an expression"), line, of);
             case "method" -> methods(cursor, line);
             case "vary" -> names(cursor, line, vary);
-            default -> names(cursor, line, hold);
+            case "hold" -> names(cursor, line, hold);
+            default -> over(cursor, line);
+        }
+    }
+
+    private void over(Cursor cursor, SourceLine line) throws TextException {
+        names(cursor, line, over);
+        if (over.size() > 1) {
+            problems.error(
+                    line.number(),
+                    over.get(1).column(),
+                    "Found " + Quoted.of(over.get(1).text()) + " as a second name behind 'over:', expected one given",
+                    "A tolerance cell of its own may go over another given.");
         }
     }
 

@@ -1,6 +1,7 @@
 package sill.worksheet;
 
 import java.util.List;
+import java.util.Optional;
 
 /**
  * What a tolerance cell asks for.
@@ -9,8 +10,10 @@ import java.util.List;
  * @param methods how; at least one
  * @param vary givens to vary; empty means every given with limits that the results rest on
  * @param hold givens to hold at nominal
+ * @param over a given along which the results are drawn, from limit to limit
  */
-public record ToleranceStudy(List<Target> of, List<Method> methods, List<Target> vary, List<Target> hold) {
+public record ToleranceStudy(
+        List<Target> of, List<Method> methods, List<Target> vary, List<Target> hold, Optional<Target> over) {
     public ToleranceStudy {
         of = List.copyOf(of);
         methods = List.copyOf(methods);

@@ -121,6 +121,7 @@ final class SpecNotation {
         }
         study.vary().forEach(target -> target("vary", target));
         study.hold().forEach(target -> target("hold", target));
+        study.over().ifPresent(target -> target("over", target));
     }
 
     private void target(String key, Target target) {

@@ -12,7 +12,7 @@ import org.junit.jupiter.api.TestFactory;
 
 /** The spec of the worksheet's text is the test: every example of {@code spec/worksheet-text.txt}. */
 class WorksheetTextSpecTest {
-    private static final int EXAMPLES = 201;
+    private static final int EXAMPLES = 203;
 
     private final List<SpecExample> examples = SpecExample.all();
 
