@@ -64,6 +64,7 @@ final class RunReport {
             return check.shownValue();
         }
         String share = check.marginShare()
+                .filter(part -> check.overTolerance().share().isEmpty())
                 .filter(part -> Math.abs(part) < LARGEST_SHARE)
                 .map(part -> " (" + String.valueOf(Math.round(part * 100)).replace('-', Notation.MINUS) + " %)")
                 .orElse("");

@@ -3,6 +3,7 @@ package sill.record;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.HashSet;
+import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
@@ -19,12 +20,14 @@ import sill.record.DesignRecord.Source;
 import sill.record.DesignRecord.ToleranceEntry;
 import sill.record.DesignRecord.ValueEntry;
 import sill.record.DesignRecord.Verdict;
+import sill.units.Unit;
 import sill.values.CellRun;
 import sill.values.CellState;
 import sill.values.Finding;
 import sill.values.Result;
 import sill.values.RunResult;
 import sill.worksheet.Cell;
+import sill.worksheet.Given;
 import sill.worksheet.Problem;
 import sill.worksheet.Worksheet;
 
@@ -118,12 +121,28 @@ public final class Assembly {
 
     private List<ToleranceEntry> tolerances() {
         StudiedChecks studied = new StudiedChecks(worksheet, run.findings());
+        Map<String, Unit> units = givenUnits();
         List<ToleranceEntry> entries = new ArrayList<>();
         for (Finding finding : run.findings()) {
             String at = finding.cell() + "." + finding.index();
-            entries.add(new ToleranceEntry(finding, at, studied.target(finding).line(), studied.limits(finding)));
+            entries.add(
+                    new ToleranceEntry(finding, at, studied.target(finding).line(), studied.limits(finding), units));
         }
         return entries;
+    }
+
+    private Map<String, Unit> givenUnits() {
+        Map<String, Unit> units = new LinkedHashMap<>();
+        for (Cell cell : worksheet.cells()) {
+            if (cell instanceof Cell.Givens givens) {
+                for (Given given : givens.givens()) {
+                    if (given.value() instanceof Given.Quantity quantity) {
+                        units.put(given.name(), quantity.unit());
+                    }
+                }
+            }
+        }
+        return units;
     }
 
     private static ValueEntry value(Result result, KnownValues known) {

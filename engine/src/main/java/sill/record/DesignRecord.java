@@ -5,6 +5,7 @@ import java.util.Map;
 import java.util.Optional;
 import sill.formula.Working;
 import sill.stdlib.Plot;
+import sill.units.Unit;
 import sill.values.CellState;
 import sill.values.Datum;
 import sill.values.Finding;
@@ -234,8 +235,10 @@ public record DesignRecord(
      * @param at its address; the components of a record share one
      * @param line the line of its expression
      * @param limits of the checks that judge the same expression
+     * @param givenUnits units of the varied givens as the worksheet has them
      */
-    public record ToleranceEntry(Finding finding, String at, int line, List<Limit> limits) {}
+    public record ToleranceEntry(
+            Finding finding, String at, int line, List<Limit> limits, Map<String, Unit> givenUnits) {}
 
     /** A limit of a check, and what a drawing calls it. */
     public record Limit(double value, String label) {}

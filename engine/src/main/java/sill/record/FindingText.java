@@ -12,13 +12,20 @@ import sill.values.Finding;
 /** What a tolerance cell found, as a record prints it. */
 public final class FindingText {
     private final Unit unit;
+    private final Unit exact;
 
     public FindingText(Finding finding) {
         unit = Units.of(finding.unit());
+        exact = finding.shownIn().isEmpty() ? null : Units.of(finding.shownIn());
     }
 
     /** A value with its unit. */
     public String number(double value) {
+        return exact == null ? Notation.shown(value, unit) : Notation.shownIn(value, exact);
+    }
+
+    /** A distance of two values with its unit: of temperatures in °C it is in K. */
+    public String distance(double value) {
         return Notation.shown(value, unit);
     }
 
@@ -28,10 +35,8 @@ public final class FindingText {
     }
 
     /** A slope: the result's unit over the given's. */
-    public String slope(double slope, String givenUnit) {
-        return Notation.shown(
-                slope,
-                Unit.ofDimension(unit.dimension().over(Units.of(givenUnit).dimension())));
+    public String slope(double slope, Unit givenUnit) {
+        return Notation.shown(slope, Unit.ofDimension(unit.dimension().over(givenUnit.dimension())));
     }
 
     /** Figures of the samples, by name. */
@@ -44,15 +49,17 @@ public final class FindingText {
                     grouped(found.notFinite()) + " of them, " + grouped(found.thrown())
                             + " by an exception; the figures below are those of the others");
         }
-        figures.put("Mean", withError(found.mean(), found.errors().get("mean")));
-        figures.put("Standard deviation", withError(found.sd(), found.errors().get("sd")));
+        figures.put("Mean", number(found.mean()) + error(found.errors().get("mean")));
+        figures.put(
+                "Standard deviation",
+                distance(found.sd()) + error(found.errors().get("sd")));
         figures.put("Shortest 95 % interval", range(found.low(), found.high()));
         figures.put("Least, greatest", number(found.min()) + ", " + number(found.max()));
         return figures;
     }
 
-    private String withError(double value, Double error) {
-        return number(value) + (error == null ? "" : ", standard error by sampling " + number(error));
+    private String error(Double error) {
+        return error == null ? "" : ", standard error by sampling " + distance(error);
     }
 
     /** A probability as {@code 99.865 %}. */
@@ -72,14 +79,14 @@ public final class FindingText {
     }
 
     /** Where a given stands: {@code lower limit}, {@code upper limit}, or its value. */
-    public static String place(GivenEntry given, double value) {
+    public static String place(GivenEntry given, Unit unit, double value) {
         if (given.low().filter(low -> low == value).isPresent()) {
             return "lower limit";
         }
         if (given.high().filter(high -> high == value).isPresent()) {
             return "upper limit";
         }
-        return Notation.shown(value, Units.of(given.unit()));
+        return unit.offset() == 0 ? Notation.shown(value, unit) : Notation.shownIn(value, unit);
     }
 
     /** Digits in groups of three: ISO 80000-1:2009, 7.3.1. */

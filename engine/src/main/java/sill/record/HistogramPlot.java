@@ -27,30 +27,30 @@ public final class HistogramPlot {
 
     private static Plot plot(Finding finding, Finding.MonteCarlo found, List<Limit> limits) {
         Finding.Histogram histogram = found.histogram();
+        AxisOf axis = AxisOf.result(finding);
         int stretches = histogram.counts().size();
         long all = histogram.counts().stream().mapToLong(Long::longValue).sum();
         double width = (histogram.to() - histogram.from()) / stretches;
         double[] x = new double[stretches + 1];
         double[] y = new double[stretches + 1];
         for (int i = 0; i <= stretches; i++) {
-            x[i] = i == stretches ? histogram.to() : histogram.from() + i * width;
-            y[i] = i == stretches ? 0 : (double) histogram.counts().get(i) / all;
+            x[i] = axis.number(i == stretches ? histogram.to() : histogram.from() + i * width);
+            y[i] = i == stretches ? 0 : 100.0 * histogram.counts().get(i) / all;
         }
-        List<Mark> marks = new ArrayList<>();
-        limits.forEach(limit -> marks.add(new Mark(Side.X, limit.value(), limit.label(), Role.LIMIT)));
-        finding.worstCase().ifPresent(extremes -> {
-            marks.add(new Mark(Side.X, extremes.low().value(), "lowest found", Role.REFERENCE));
-            marks.add(new Mark(Side.X, extremes.high().value(), "highest found", Role.REFERENCE));
-        });
-        String unit = finding.unit().isEmpty() ? "1" : finding.unit();
         FindingText text = new FindingText(finding);
+        List<Mark> marks = new ArrayList<>();
+        limits.forEach(limit -> marks.add(new Mark(Side.X, axis.number(limit.value()), limit.label(), Role.LIMIT)));
+        finding.worstCase().ifPresent(extremes -> {
+            marks.add(new Mark(Side.X, axis.number(extremes.low().value()), "lowest found", Role.REFERENCE));
+            marks.add(new Mark(Side.X, axis.number(extremes.high().value()), "highest found", Role.REFERENCE));
+        });
         return new Plot(
                 "Samples of " + finding.name(),
                 "Share of " + FindingText.grouped(all) + " samples in " + stretches + " stretches from "
                         + text.range(histogram.from(), histogram.to()) + "; the mean is " + text.number(found.mean())
-                        + ", the standard deviation " + text.number(found.sd()) + ".",
-                new Axis(finding.name(), unit, Scale.LINEAR),
-                new Axis("share of samples", "1", Scale.LINEAR),
+                        + ", the standard deviation " + text.distance(found.sd()) + ".",
+                axis.axis(),
+                new Axis("share of samples in %", "1", Scale.LINEAR),
                 List.of(new Plot.Curve("samples", Plot.Style.STEP, false, x, y)),
                 marks);
     }

@@ -68,6 +68,11 @@ record Window(Optional<Double> low, Optional<Double> high, Unit unit, String sho
         double size = low.isPresent() && high.isPresent()
                 ? (high.get() - low.get()) / 2
                 : Math.abs(low.or(() -> high).orElse(0.0));
+        boolean oneSided = low.isEmpty() || high.isEmpty();
+        if (oneSided && unit.offset() != 0) {
+            // A temperature's distance from absolute zero says nothing of a margin.
+            return Optional.empty();
+        }
         return size > 0 && Double.isFinite(margin) ? Optional.of(margin / size) : Optional.empty();
     }
 

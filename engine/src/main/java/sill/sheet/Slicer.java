@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.stream.Stream;
 
 /** Cuts slices out of a translated sheet, statement by statement. */
 public final class Slicer {
@@ -41,6 +42,15 @@ public final class Slicer {
         SlicePlan plan = new SlicePlan(program, types, dependencies, cell, fields(outputs), form);
         SliceText text = new SliceText(program, types, plan, targets(cell), outputs, varied);
         return compiler.compile(text.unit()).map(classes -> new Slice(SliceText.NAME, classes, text.held()));
+    }
+
+    /** Whether the code that makes some results has a word. */
+    public boolean mentions(int cell, List<Slice.Output> outputs, String word) {
+        SlicePlan plan = new SlicePlan(program, types, dependencies, cell, fields(outputs), Slice.Form.FIELDS);
+        return Stream.concat(plan.statements().stream(), plan.members().stream())
+                .map(snippet ->
+                        CodeText.codeOnly(snippet.span().of(snippet.piece().text())))
+                .anyMatch(code -> CodeText.word(code, word, 0) >= 0);
     }
 
     private static List<String> fields(List<Slice.Output> outputs) {

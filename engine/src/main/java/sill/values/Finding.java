@@ -12,6 +12,7 @@ import java.util.Optional;
  * @param of the expression as written
  * @param component the component of a record; empty for a number
  * @param unit coherent SI unit symbol; empty when unknown
+ * @param shownIn the unit that the caption of a studied variable asks for; empty when none
  * @param nominal what the cells gave
  * @param varied the givens that varied, in order
  * @param worstCase the extremes, when asked for
@@ -27,6 +28,7 @@ public record Finding(
         String of,
         String component,
         String unit,
+        String shownIn,
         double nominal,
         List<String> varied,
         Optional<WorstCase> worstCase,

@@ -12,7 +12,7 @@ final class FindingWire {
 
     static void write(WireOut out, Finding finding) {
         out.number(finding.cell()).number(finding.index()).text(finding.of()).text(finding.component());
-        out.text(finding.unit()).real(finding.nominal()).texts(finding.varied());
+        out.text(finding.unit()).text(finding.shownIn()).real(finding.nominal()).texts(finding.varied());
         optional(out, finding.worstCase(), FindingWire::worstCase);
         optional(
                 out,
@@ -30,6 +30,7 @@ final class FindingWire {
         return new Finding(
                 in.number(),
                 in.number(),
+                in.text(),
                 in.text(),
                 in.text(),
                 in.text(),

@@ -46,7 +46,7 @@ final class JobRun {
         problems.addAll(sheet.problems());
         reports.accept(new Report.Translated(problems));
         givens.set(evaluation.sheet());
-        Studies studies = new StudyRunner(translation.slicer(), givens, job, reports);
+        Studies studies = new StudyRunner(translation.slicer(), sheet, givens, job, reports);
         new StepRunner(sheet, evaluation.sheet(), job.leftOut(), output, studies, reports).run(givens.present());
     }
 }

@@ -1,5 +1,6 @@
 package sill.worker;
 
+import java.lang.reflect.UndeclaredThrowableException;
 import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
@@ -8,6 +9,7 @@ import java.util.Optional;
 import java.util.function.BiConsumer;
 import sill.sheet.Slice;
 import sill.sheet.Slicer;
+import sill.study.Model;
 
 /** A slice, ready to be called. */
 final class SliceCode {
@@ -66,6 +68,18 @@ final class SliceCode {
             // The cells gave a value where this did not: it is another calculation.
             return false;
         }
+    }
+
+    /** The same as a model of a study; what the calculation throws comes out as it was. */
+    Model newModel() {
+        BiConsumer<double[], double[]> calculation = newInstance();
+        return (inputs, outputs) -> {
+            try {
+                calculation.accept(inputs, outputs);
+            } catch (UndeclaredThrowableException e) {
+                throw e.getUndeclaredThrowable();
+            }
+        };
     }
 
     /** A calculation with a state of its own, for one thread: takes the values of the varied givens, puts the results. */

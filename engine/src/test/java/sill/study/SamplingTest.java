@@ -63,7 +63,8 @@ class SamplingTest {
 
     @Test
     void classesHoldAllSamples() {
-        Statistics found = new Trial().normal("x", 0.1, 1).samples(50_000, 5).statistics((in, out) -> out[0] = 1 / in[0]);
+        Statistics found =
+                new Trial().normal("x", 0.1, 1).samples(50_000, 5).statistics((in, out) -> out[0] = 1 / in[0]);
         Histogram histogram = found.histogram();
         long inClasses = histogram.counts().stream().mapToLong(Long::longValue).sum();
         assertThat(histogram.below() + inClasses + histogram.above()).isEqualTo(50_000);

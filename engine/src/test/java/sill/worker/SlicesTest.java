@@ -71,17 +71,18 @@ class SlicesTest {
                 return;
             }
             assertThat(nominal.firstForm()).isEqualTo(Optional.of(Slice.Form.valueOf(sheet.form())));
-            double[] slice = new double[nominal.targets.nominal().length];
+            double[] slice = new double[nominal.nominal().length];
             nominal.agreeing().orElseThrow().newInstance().accept(new double[] {9.5, 2900, 6000}, slice);
             try (Evaluator second = new Evaluator(Sheets.classPath())) {
-                assertThat(slice).containsExactly(new Run(sheet.text(9.5, 2900), second).targets.nominal());
+                assertThat(slice).containsExactly(new Run(sheet.text(9.5, 2900), second).nominal());
             }
         }
     }
 
     /** A sheet, run, and its one tolerance cell. */
     private static final class Run {
-        final StudyTargets targets = new StudyTargets();
+        private final List<Double> nominal = new ArrayList<>();
+        private final List<Slice.Output> outputs = new ArrayList<>();
         private final GivenValues givens;
         private final Slicer slicer;
 
@@ -94,29 +95,36 @@ class SlicesTest {
             Class<?> code = evaluator.evaluate(sheet).sheet();
             givens.set(code);
             List<Result> results = new ArrayList<>();
-            Studies studies = (step, nominal) -> {
-                results.addAll(nominal);
+            List<TranslatedSheet.ResultField> fields = new ArrayList<>();
+            Studies studies = (step, found) -> {
+                results.addAll(found);
+                fields.addAll(step.results());
                 return new Studies.Outcome(List.of(), List.of());
             };
             new StepRunner(sheet, code, Set.of(), new CapturedOutput(), studies, report -> {}).run(givens.present());
             assertThat(results).isNotEmpty();
             for (Result result : results) {
-                assertThat(targets.add("$value3_" + result.index(), result)).isTrue();
+                List<StudyTarget> targets = StudyTarget.of(result, "");
+                targets.forEach(target -> nominal.add(target.nominal()));
+                outputs.add(StudyTarget.output(fields.get(result.index() - 1), targets));
             }
             slicer = translation.slicer();
         }
 
+        double[] nominal() {
+            return nominal.stream().mapToDouble(Double::doubleValue).toArray();
+        }
+
         Optional<SliceCode> agreeing() {
-            return SliceCode.agreeing(slicer, 3, targets.outputs(), VARIED, givens.values(), targets.nominal());
+            return SliceCode.agreeing(slicer, 3, outputs, VARIED, givens.values(), nominal());
         }
 
         /** The form that serves, found by asking for each alone. */
         Optional<Slice.Form> firstForm() {
             for (Slice.Form form : Slice.Form.values()) {
-                Optional<Slice> slice = slicer.slice(3, targets.outputs(), VARIED, form);
+                Optional<Slice> slice = slicer.slice(3, outputs, VARIED, form);
                 if (slice.isPresent()
-                        && new SliceCode(slice.get(), givens.values())
-                                .gives(new double[] {9, 3000, 6000}, targets.nominal())) {
+                        && new SliceCode(slice.get(), givens.values()).gives(new double[] {9, 3000, 6000}, nominal())) {
                     return Optional.of(form);
                 }
             }

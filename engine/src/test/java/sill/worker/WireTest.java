@@ -34,7 +34,12 @@ class WireTest {
             double x = nothing;
             :: calc Ends
             double y = 1 / 0;
+            :: tolerance Spread
+            of: vIn / 2, new TripPoints(vIn, vIn - 1 / vIn)
+            method: worst-case, rss, monte-carlo 1000 seed 7
+            over: vIn
             :: check R
+            vIn / 2 at least 2.49 V in 50 %
             t.rising() at least 1 V
             y at most 3
             1 / 0 at most 3

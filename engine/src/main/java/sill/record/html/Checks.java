@@ -51,7 +51,7 @@ final class Checks {
         page.leaf("code", check.text()).close();
         TracePanel.write(page, trace, trace.place(TraceKind.CHECK, check.at()));
         page.close().text(" ");
-        page.leaf("span", basis(check), "class", "basis").close();
+        page.leaf("span", basis(check, trace), "class", "basis").close();
         Tables.cell(page, "Value", "number", check.shownValue());
         Tables.cell(page, "Limit", "number", check.shownLimit());
         margin(page, check);
@@ -67,9 +67,12 @@ final class Checks {
         page.close().line();
     }
 
-    private static String basis(CheckEntry check) {
+    private static String basis(CheckEntry check, RecordTrace trace) {
         return switch (check.basis()) {
-            case "nominal" -> "at the nominal values";
+            case "nominal" ->
+                trace.restsOnTolerances(check)
+                        ? "at the nominal values only, though inputs have tolerances"
+                        : "at the nominal values";
             case "worst-case" -> "at worst case";
             case "share" -> "in a share of samples";
             default -> check.basis();
@@ -79,7 +82,11 @@ final class Checks {
     private static void margin(Markup page, CheckEntry check) {
         page.open("td", "class", "number" + Tables.length(check.shownMargin()), "data-label", "Margin");
         page.leaf("span", check.shownMargin());
-        if (check.marginShare().isPresent() && !check.shownMargin().isEmpty()) {
+        // The margin of a share of samples is one of shares, that share is of the nominal value.
+        boolean ofSamples = check.overTolerance().share().isPresent();
+        if (check.marginShare().isPresent()
+                && !ofSamples
+                && !check.shownMargin().isEmpty()) {
             page.text(" ").leaf("span", Numbers.percent(check.marginShare().get()), "class", "share");
         }
         page.close();

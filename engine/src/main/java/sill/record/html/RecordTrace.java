@@ -22,6 +22,7 @@ import sill.values.Datum;
 final class RecordTrace {
     private final Trace trace;
     private final Map<String, Integer> places = new HashMap<>();
+    private final Set<String> varied = new HashSet<>();
     private final Set<String> mentioned = new HashSet<>();
 
     private RecordTrace(List<TraceNode> nodes) {
@@ -50,6 +51,9 @@ final class RecordTrace {
             nodes.add(node(TraceKind.CHECK, check.at(), "", check.text(), verdict, check.uses(), check.dependsOn()));
         }
         RecordTrace trace = new RecordTrace(nodes);
+        record.givens().stream()
+                .filter(given -> given.low().isPresent())
+                .forEach(given -> trace.varied.add(given.name()));
         record.cells().forEach(trace::readMentions);
         return trace;
     }
@@ -99,6 +103,11 @@ final class RecordTrace {
     boolean isUnused(int place) {
         TraceNode node = trace.nodes().get(place);
         return node.kind() == TraceKind.GIVEN && trace.users(place).isEmpty() && !mentioned.contains(node.name());
+    }
+
+    /** Whether a check's expression rests on a given with limits. */
+    boolean restsOnTolerances(CheckEntry check) {
+        return check.dependsOn().stream().anyMatch(varied::contains);
     }
 
     /** The givens used by nothing, in order. */

@@ -3,14 +3,17 @@ package sill.record.html;
 import java.util.Map;
 import sill.markup.Markup;
 import sill.record.DesignRecord.GivenEntry;
+import sill.record.DesignRecord.ToleranceEntry;
 import sill.record.FindingText;
+import sill.units.Unit;
 import sill.values.Finding;
 
 /** What moves a result, the strongest first: slope, share of the variance, and where each extreme lies. */
 final class Sensitivities {
     private Sensitivities() {}
 
-    static void write(Markup page, Finding finding, Map<String, GivenEntry> givens) {
+    static void write(Markup page, ToleranceEntry entry, Map<String, GivenEntry> givens) {
+        Finding finding = entry.finding();
         if (finding.sensitivities().isEmpty()) {
             return;
         }
@@ -25,26 +28,22 @@ final class Sensitivities {
         page.open("tbody").line();
         for (Finding.Sensitivity each : finding.sensitivities()) {
             GivenEntry given = givens.get(each.given());
+            Unit unit = entry.givenUnits().get(each.given());
             page.open("tr")
                     .open("th", "scope", "row", "class", "name")
                     .leaf("var", each.given())
                     .close();
-            Tables.cell(page, "Slope", "number", new FindingText(finding).slope(each.slope(), given.unit()));
+            Tables.cell(page, "Slope", "number", new FindingText(finding).slope(each.slope(), unit));
             share(page, each.share());
             if (extremes) {
                 int place = finding.varied().indexOf(each.given());
                 Finding.WorstCase found = finding.worstCase().get();
                 Tables.cell(page, "Goes", "word", found.trends().get(place).word());
-                Tables.cell(
-                        page,
-                        "Lowest at",
-                        "word",
-                        FindingText.place(given, found.low().at().get(place)));
-                Tables.cell(
-                        page,
-                        "Highest at",
-                        "word",
-                        FindingText.place(given, found.high().at().get(place)));
+                boolean still = found.trends().get(place) == Finding.Trend.STILL;
+                double low = found.low().at().get(place);
+                double high = found.high().at().get(place);
+                Tables.cell(page, "Lowest at", "word", still ? "" : FindingText.place(given, unit, low));
+                Tables.cell(page, "Highest at", "word", still ? "" : FindingText.place(given, unit, high));
             }
             page.close().line();
         }

@@ -25,9 +25,9 @@ final class Tolerances {
                     .text(" over tolerance")
                     .close();
             entry.finding().remarks().forEach(remark -> page.leaf("p", remark, "class", "state"));
-            Histograms.write(page, entry);
+            ToleranceFigures.write(page, entry);
             samples(page, entry.finding());
-            Sensitivities.write(page, entry.finding(), content.givensByName());
+            Sensitivities.write(page, entry, content.givensByName());
             page.close().line();
         }
     }
