@@ -36,7 +36,16 @@ sealed interface Box {
         }
     }
 
-    record Token(Style style, String text) implements Box {}
+    /**
+     * A token.
+     *
+     * @param name the Java name that it is the symbol of, or the symbol's base; empty for other tokens
+     */
+    record Token(Style style, String text, String name) implements Box {
+        Token(Style style, String text) {
+            this(style, text, "");
+        }
+    }
 
     /**
      * Boxes side by side.

@@ -16,7 +16,7 @@ final class Glyphs {
     /** A name as a symbol. */
     static Box symbol(String name) {
         Symbol symbol = Symbol.of(name);
-        Token base = new Token(symbol.isWord() ? Style.WORD : Style.LETTER, symbol.base());
+        Token base = new Token(symbol.isWord() ? Style.WORD : Style.LETTER, symbol.base(), name);
         return symbol.index().isEmpty() ? base : new Box.Lowered(base, index(symbol.index()));
     }
 

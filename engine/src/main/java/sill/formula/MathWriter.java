@@ -12,35 +12,60 @@ import sill.markup.Markup;
  * between them as it does between words; browsers do not break inside one.
  */
 public final class MathWriter {
+    /** Where the names of a formula lead. */
+    @FunctionalInterface
+    public interface Links {
+        /** The address of the place where a name is set, as a link states it; empty for a name that leads nowhere. */
+        String href(String name);
+    }
+
+    private static final Links NOWHERE = name -> "";
+
     /** A shorter formula stays whole. */
     private static final int SHORT = 16;
 
     /** A longer piece is broken inside its brackets too. */
     private static final int LONG_PIECE = 36;
 
-    private MathWriter() {}
+    private final Markup page;
+    private final Links links;
+
+    private MathWriter(Markup page, Links links) {
+        this.page = page;
+        this.links = links;
+    }
 
     /** Writes the first side of an equation. */
     public static void first(Markup page, Expression expression) {
-        write(page, pieces(Layout.side(expression)));
+        first(page, expression, NOWHERE);
+    }
+
+    /** Writes the first side of an equation, its names as links. */
+    public static void first(Markup page, Expression expression, Links links) {
+        new MathWriter(page, links).write(pieces(Layout.side(expression)));
     }
 
     /** Writes a further side with its equals sign, from which no line break parts it. */
     public static void next(Markup page, Expression expression) {
+        next(page, expression, NOWHERE);
+    }
+
+    /** Writes a further side with its equals sign, its names as links. */
+    public static void next(Markup page, Expression expression, Links links) {
         List<List<Box>> pieces = new ArrayList<>(pieces(Layout.side(expression)));
         List<Box> start = new ArrayList<>(pieces.get(0));
         start.add(0, new Token(Style.BETWEEN, "="));
         pieces.set(0, start);
-        write(page, pieces);
+        new MathWriter(page, links).write(pieces);
     }
 
-    private static void write(Markup page, List<List<Box>> pieces) {
+    private void write(List<List<Box>> pieces) {
         for (int i = 0; i < pieces.size(); i++) {
             if (i > 0) {
                 page.single("wbr");
             }
             page.open("math");
-            pieces.get(i).forEach(box -> write(page, box));
+            pieces.get(i).forEach(box -> write(box));
             page.close();
         }
     }
@@ -89,37 +114,37 @@ public final class MathWriter {
         return split(open);
     }
 
-    private static void write(Markup page, Box box) {
+    private void write(Box box) {
         if (box instanceof Token token) {
-            token(page, token, false);
+            token(token, false);
         } else if (box instanceof Row row) {
             boolean tall = row.boxes().stream().anyMatch(MathWriter::isTall);
             page.open("mrow");
-            row.boxes().forEach(each -> write(page, each, tall));
+            row.boxes().forEach(each -> write(each, tall));
             page.close();
         } else if (box instanceof Box.Fraction fraction) {
-            element(page, "mfrac", List.of(one(fraction.top()), one(fraction.bottom())));
+            element("mfrac", List.of(one(fraction.top()), one(fraction.bottom())));
         } else if (box instanceof Box.Raised raised) {
-            element(page, "msup", List.of(one(raised.base()), one(raised.exponent())));
+            element("msup", List.of(one(raised.base()), one(raised.exponent())));
         } else if (box instanceof Box.Lowered lowered) {
-            element(page, "msub", List.of(one(lowered.base()), one(lowered.index())));
+            element("msub", List.of(one(lowered.base()), one(lowered.index())));
         } else if (box instanceof Box.Root root) {
             if (root.degree().isEmpty()) {
-                element(page, "msqrt", List.of(root.body()));
+                element("msqrt", List.of(root.body()));
             } else {
-                element(page, "mroot", List.of(one(root.body()), new Token(Style.NUMBER, root.degree())));
+                element("mroot", List.of(one(root.body()), new Token(Style.NUMBER, root.degree())));
             }
         } else if (box instanceof Box.Cases cases) {
-            cases(page, cases);
+            cases(cases);
         }
     }
 
     /** Writes a box of a row; brackets grow with a row that is tall, and with no other: not every font does that well. */
-    private static void write(Markup page, Box box, boolean tall) {
+    private void write(Box box, boolean tall) {
         if (box instanceof Token token) {
-            token(page, token, tall);
+            token(token, tall);
         } else {
-            write(page, box);
+            write(box);
         }
     }
 
@@ -132,9 +157,9 @@ public final class MathWriter {
         return box instanceof Box.Fraction || box instanceof Box.Cases;
     }
 
-    private static void element(Markup page, String name, List<Box> boxes) {
+    private void element(String name, List<Box> boxes) {
         page.open(name);
-        boxes.forEach(box -> write(page, box));
+        boxes.forEach(box -> write(box));
         page.close();
     }
 
@@ -143,20 +168,27 @@ public final class MathWriter {
         return box instanceof Row row && row.boxes().size() == 1 ? row.boxes().get(0) : box;
     }
 
-    private static void cases(Markup page, Box.Cases cases) {
+    private void cases(Box.Cases cases) {
         page.open("mrow").leaf("mo", "{", "form", "prefix").open("mtable", "class", "cases");
         for (List<Box> row : cases.rows()) {
             page.open("mtr");
-            row.forEach(cell -> element(page, "mtd", List.of(cell)));
+            row.forEach(cell -> element("mtd", List.of(cell)));
             page.close();
         }
         page.close().close();
     }
 
-    private static void token(Markup page, Token token, boolean tall) {
+    private void token(Token token, boolean tall) {
+        String href = token.name().isEmpty() ? "" : links.href(token.name());
+        String reach = href.isEmpty() ? "" : Reach.of(token.text());
         page.open(token.style().element());
         switch (token.style()) {
-            case WORD -> page.with("class", "word");
+            case WORD -> page.with("class", "word" + reach);
+            case LETTER -> {
+                if (!reach.isEmpty()) {
+                    page.with("class", reach.strip());
+                }
+            }
             case UPRIGHT -> {
                 if (token.text().codePointCount(0, token.text().length()) == 1) {
                     page.with("mathvariant", "normal");
@@ -173,8 +205,11 @@ public final class MathWriter {
         }
         if (token.style() == Style.APPLICATION) {
             page.trusted("&#x2061;");
-        } else {
+        } else if (href.isEmpty()) {
             page.text(token.text());
+        } else {
+            // MathML has no links of its own; HTML's may stand inside its tokens, and only there.
+            page.leaf("a", token.text(), "href", href);
         }
         page.close();
     }

@@ -45,6 +45,35 @@ class MathWriterTest {
     }
 
     @Test
+    void namesLeadToTheirLines() {
+        Markup page = new Markup();
+        Expression formula = over(new Name("vRise"), new Arithmetic(Operator.TIMES, new Name("band"), new Name("x")));
+        MathWriter.next(page, formula, name -> name.equals("x") ? "" : "#at-" + name);
+        assertThat(page.toString())
+                .isEqualTo("<math><mo form=\"infix\">=</mo><mfrac>"
+                        + "<msub><mi><a href=\"#at-vRise\">v</a></mi><mi>Rise</mi></msub>"
+                        + "<mrow><mi class=\"word up\"><a href=\"#at-band\">band</a></mi>"
+                        + "<mo form=\"infix\">⋅</mo><mi>x</mi></mrow></mfrac></math>");
+    }
+
+    @Test
+    void aComponentLeadsToItsRecord() {
+        Markup page = new Markup();
+        MathWriter.first(page, new Expression.Component(new Name("tripLow"), "rising"), name -> "#at-" + name);
+        assertThat(page.toString())
+                .isEqualTo("<math><msub><mi class=\"word up down\"><a href=\"#at-tripLow\">trip</a></mi>"
+                        + "<mrow><mi>Low</mi><mo>,</mo><mi>rising</mi></mrow></msub></math>");
+    }
+
+    @Test
+    void functionsAndIndicesAreNoNames() {
+        Markup page = new Markup();
+        Expression call = new Expression.Call("find", "", List.of(new Expression.Literal("1", 1)));
+        MathWriter.first(page, call, name -> "#at-" + name);
+        assertThat(page.toString()).contains("<mi>find</mi>").doesNotContain("<a ");
+    }
+
+    @Test
     void unitStandsUprightBehindItsNumber() throws Exception {
         assertThat(first(new Expression.Shown(Notation.printed(-0.0015, Unit.parse("V"), 4))))
                 .isEqualTo("<math><mo form=\"prefix\">−</mo><mn>1.500</mn><mtext>\u00A0mV</mtext></math>");

@@ -13,10 +13,14 @@ final class Addresses {
      */
     static void write(Markup page, String at, boolean isPlace) {
         if (isPlace) {
-            page.leaf("a", at, "class", "address", "href", "#" + id(at), "id", id(at));
+            page.leaf("a", at, "class", "address", "href", href(at), "id", id(at));
         } else {
-            page.leaf("a", at, "class", "address", "href", "#" + id(at));
+            page.leaf("a", at, "class", "address", "href", href(at));
         }
+    }
+
+    static String href(String at) {
+        return "#" + id(at);
     }
 
     static String id(String at) {

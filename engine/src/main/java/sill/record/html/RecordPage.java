@@ -10,7 +10,7 @@ import sill.record.RecordJson;
 
 /**
  * A record as one HTML file, laid out as a calculation sheet: verdict, checks and problems first, then the cells in order,
- * the trace, and the title block and digests at the foot. The record's JSON lies inside it, in the element {@code sill-record}.
+ * the trace, and the title block and digests at the foot. The record's JSON lies inside it, in the element {@code sill-record}. The page works without its script.
  */
 public final class RecordPage {
     /** The id of the element that holds the JSON. */
@@ -23,7 +23,8 @@ public final class RecordPage {
         Markup page = new Markup();
         page.trusted("<!DOCTYPE html>").line();
         page.open("html", "lang", language(record.titleBlock())).line();
-        head(page, record);
+        String script = "\n" + Inline.resource(Inline.PEEK);
+        head(page, record, script);
         page.open("body").line();
         Heading.write(page, record);
         page.open("main").line();
@@ -36,12 +37,13 @@ public final class RecordPage {
         Foot.write(page, record);
         page.open("script", "type", "application/json", "id", JSON_ELEMENT);
         page.trusted(inert(RecordJson.write(record))).close().line();
+        page.open("script").trusted(script).close().line();
         page.close().line();
         page.close().line();
         return page.toString();
     }
 
-    private static void head(Markup page, DesignRecord record) {
+    private static void head(Markup page, DesignRecord record, String script) {
         String style = Style.of(record.titleBlock());
         page.open("head").line();
         page.single("meta", "charset", "utf-8").line();
@@ -50,7 +52,8 @@ public final class RecordPage {
                         "http-equiv",
                         "Content-Security-Policy",
                         "content",
-                        "default-src 'none'; style-src '" + Style.digest(style)
+                        "default-src 'none'; style-src '" + Inline.digest(style) + "'; script-src '"
+                                + Inline.digest(script)
                                 + "'; img-src data:; base-uri 'none'; form-action 'none'")
                 .line();
         page.single("meta", "name", "viewport", "content", "width=device-width, initial-scale=1")

@@ -99,6 +99,15 @@ final class RecordTrace {
         return places.get(key(kind, at));
     }
 
+    /** The link from the line at an address to the one where a name is set; empty when that is the same line or none. */
+    String hrefFrom(String at, String name) {
+        return trace.named(name)
+                .map(TraceNode::at)
+                .filter(set -> !set.equals(at))
+                .map(Addresses::href)
+                .orElse("");
+    }
+
     /** Whether a given is used by nothing, as far as the record knows. */
     boolean isUnused(int place) {
         TraceNode node = trace.nodes().get(place);

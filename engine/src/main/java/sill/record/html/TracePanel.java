@@ -96,7 +96,7 @@ final class TracePanel {
 
     /** A link to where a node is set; in full with its address and value. */
     static void link(Markup page, TraceNode node, boolean inFull) {
-        page.open("a", "href", "#" + Addresses.id(node.at()));
+        page.open("a", "href", Addresses.href(node.at()));
         if (node.kind() == TraceKind.CHECK || node.name().isEmpty() && node.kind() == TraceKind.RESULT) {
             page.leaf("code", node.label());
         } else if (node.kind() == TraceKind.PLOT) {

@@ -11,19 +11,22 @@ final class Workings {
     /** An equals sign never ends a line: it goes with the side behind it. */
     private static final String EQUALS = " =\u00A0";
 
+    /** Names of a helper's formula are its own, and numbers have none. */
+    private static final MathWriter.Links NOWHERE = name -> "";
+
     private Workings() {}
 
-    /** Name, formula and numbers, up to the equals sign before the result. */
-    static void line(Markup page, Working.Line line) {
-        line.left().ifPresent(left -> first(page, "name", left));
+    /** Name, formula and numbers, up to the equals sign before the result; the formula's names lead to their lines. */
+    static void line(Markup page, Working.Line line, MathWriter.Links links) {
+        line.left().ifPresent(left -> first(page, "name", left, NOWHERE));
         line.formula().ifPresent(formula -> {
             if (line.left().isPresent()) {
-                next(page, "formula", formula);
+                next(page, "formula", formula, links);
             } else {
-                first(page, "formula", formula);
+                first(page, "formula", formula, links);
             }
         });
-        line.numbers().ifPresent(numbers -> next(page, "numbers", numbers));
+        line.numbers().ifPresent(numbers -> next(page, "numbers", numbers, NOWHERE));
         boolean first = line.left().isEmpty()
                 && line.formula().isEmpty()
                 && line.numbers().isEmpty();
@@ -39,9 +42,9 @@ final class Workings {
         page.open("div", "class", "beneath");
         for (Working.Line line : lines) {
             page.open("div", "class", "by");
-            line.left().ifPresent(left -> first(page, "name", left));
-            line.formula().ifPresent(formula -> next(page, "formula", formula));
-            line.numbers().ifPresent(numbers -> next(page, "numbers", numbers));
+            line.left().ifPresent(left -> first(page, "name", left, NOWHERE));
+            line.formula().ifPresent(formula -> next(page, "formula", formula, NOWHERE));
+            line.numbers().ifPresent(numbers -> next(page, "numbers", numbers, NOWHERE));
             if (!line.shown().isEmpty()) {
                 page.text(EQUALS).leaf("span", line.shown(), "class", "number");
             }
@@ -50,15 +53,15 @@ final class Workings {
         page.close();
     }
 
-    private static void first(Markup page, String kind, Expression expression) {
+    private static void first(Markup page, String kind, Expression expression, MathWriter.Links links) {
         page.open("span", "class", "side " + kind);
-        MathWriter.first(page, expression);
+        MathWriter.first(page, expression, links);
         page.close();
     }
 
-    private static void next(Markup page, String kind, Expression expression) {
+    private static void next(Markup page, String kind, Expression expression, MathWriter.Links links) {
         page.single("wbr").open("span", "class", "side " + kind);
-        MathWriter.next(page, expression);
+        MathWriter.next(page, expression, links);
         page.close();
     }
 }

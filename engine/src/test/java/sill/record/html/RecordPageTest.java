@@ -41,15 +41,20 @@ class RecordPageTest {
     }
 
     @Test
-    void nothingIsFetchedAndNoScriptRuns() {
+    void nothingIsFetchedAndNoScriptRunsButThePagesOwn() {
         Document page = page(Records.ofEverything());
         String policy =
                 page.selectFirst("meta[http-equiv=Content-Security-Policy]").attr("content");
         String style = page.selectFirst("style").data();
         assertThat(policy)
-                .isEqualTo("default-src 'none'; style-src '" + Style.digest(style)
+                .isEqualTo("default-src 'none'; style-src '" + Inline.digest(style) + "'; script-src '"
+                        + Inline.digest(page.select("script").last().data())
                         + "'; img-src data:; base-uri 'none'; form-action 'none'");
-        assertThat(page.select("script")).hasSize(1);
+        assertThat(page.select("script").eachAttr("type")).containsExactly("application/json");
+        assertThat(page.select("script")).hasSize(2);
+        assertThat(page.select("script").last().data())
+                .isEqualTo("\n" + Inline.resource(Inline.PEEK))
+                .doesNotContain("eval(", "Function(", "innerHTML", "fetch(", "import", "</");
         assertThat(page.select("[style], link, img, iframe")).isEmpty();
         assertThat(style).doesNotContain("url(", "@import");
     }
@@ -57,7 +62,7 @@ class RecordPageTest {
     /** Computed with: printf 'a{}' | openssl dgst -sha256 -binary | base64. */
     @Test
     void theStylesDigest() {
-        assertThat(Style.digest("a{}")).isEqualTo("sha256-X1RutGBrXCt9KkSaXMK7tHftWiRscFHOhxsS8tv8hBk=");
+        assertThat(Inline.digest("a{}")).isEqualTo("sha256-X1RutGBrXCt9KkSaXMK7tHftWiRscFHOhxsS8tv8hBk=");
     }
 
     @Test

@@ -57,7 +57,8 @@ final class Linear {
     }
 
     private static String one(Element element) {
-        return element.childrenSize() == 0 ? element.wholeText() : braced(element);
+        boolean token = element.childrenSize() == 0 || element.tagName().equals("mi");
+        return token ? element.wholeText() : braced(element);
     }
 
     private static String braced(Element element) {

@@ -1,0 +1,392 @@
+package sill.tests.browser;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
+
+import java.io.ByteArrayOutputStream;
+import java.io.PrintStream;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.time.Duration;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import org.junit.jupiter.api.AfterAll;
+import org.junit.jupiter.api.BeforeAll;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.TestInstance;
+import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
+import org.openqa.selenium.By;
+import org.openqa.selenium.Keys;
+import org.openqa.selenium.WebElement;
+import org.openqa.selenium.interactions.Actions;
+import org.openqa.selenium.interactions.PointerInput;
+import org.openqa.selenium.interactions.Sequence;
+import org.openqa.selenium.support.ui.ExpectedConditions;
+import org.openqa.selenium.support.ui.WebDriverWait;
+import sill.cli.Main;
+
+/** Names in formulas: links to where they are set, and on hover, focus or tap what the page tells of them. */
+@TestInstance(TestInstance.Lifecycle.PER_CLASS)
+class PeekTest {
+    private static final String SHEET = """
+            sill 1
+            title: Names
+            :: given Supply and parts
+            vSupply = 24 V ± 5 % | cabinet supply
+            rTop = 10 kΩ
+            rBottom = 1 kΩ
+            kappa = 2
+            gains = [1, 2, 5]
+            :: calc Output
+            double vOut = Dividers.output(vSupply, rTop, rBottom); // of the divider
+            double[] steps = {vOut, vSupply};
+            double width = vOut / (kappa * vSupply) + pow(kappa, vOut / vSupply);
+            double step = steps[1] / gains[2];
+            :: check Requirements
+            width at most 3 | REQ-01
+            """;
+
+    private static final By SUPPLY = By.cssSelector("math a[href='#at-1.1']");
+    private static final By PANEL = By.cssSelector(".peek");
+
+    private Path page;
+    private Browser browser;
+
+    @BeforeAll
+    void startBrowser(@TempDir Path folder) throws Exception {
+        Path sheet = Files.writeString(folder.resolve("names.sill"), SHEET);
+        ByteArrayOutputStream out = new ByteArrayOutputStream();
+        PrintStream stream = new PrintStream(out, true, StandardCharsets.UTF_8);
+        assertThat(Main.run(stream, stream, "run", sheet.toString()))
+                .as(out.toString(StandardCharsets.UTF_8))
+                .isZero();
+        page = folder.resolve("names.html");
+        browser = Browser.start();
+    }
+
+    @AfterAll
+    void stopBrowser() {
+        if (browser != null) {
+            browser.close();
+        }
+    }
+
+    @Test
+    void eachNameOfAFormulaLeadsToItsLine() {
+        browser.open(page, 1200, "light");
+        assertThat(browser.evaluate(
+                        "[...document.querySelectorAll('.formula')].map(side => [...side.querySelectorAll('a')]"
+                                + ".map(a => a.textContent + ' ' + a.hash).join(', '))"))
+                .isEqualTo(List.of(
+                        "v #at-1.1, r #at-1.2, r #at-1.3",
+                        // Names of the helper's own formula.
+                        "",
+                        "v #at-2.1, κ #at-1.4, v #at-1.1, κ #at-1.4, v #at-2.1, v #at-1.1",
+                        "steps #at-2.2, gains #at-1.5"));
+        assertThat(browser.evaluate("document.querySelectorAll('.side:not(.formula) a').length"))
+                .isEqualTo(0L);
+    }
+
+    @Test
+    void itIsValidHtml() throws Exception {
+        assertThat(HtmlValidator.complaints(Files.readString(page))).isEmpty();
+    }
+
+    /** Against the same page with the links taken out of its formulas; two pixels are less than a line's gap. */
+    @Test
+    void formulasLookAsTheyDoWithoutLinks() throws Exception {
+        String text = Files.readString(page).replaceAll("(<mi[^>]*>)<a [^>]*>([^<]*)</a></mi>", "$1$2</mi>");
+        Path plain = Files.writeString(
+                page.resolveSibling("plain.html"),
+                text.replaceAll("( up| down)+\">", "\">").replaceAll("<mi class=\"(up|down|up down)\">", "<mi>"));
+        String boxes = "[...document.querySelectorAll('math')].flatMap(math => [math.getBoundingClientRect().width,"
+                + " math.getBoundingClientRect().height])";
+        browser.open(plain, 1200, "light");
+        List<?> expected = (List<?>) browser.evaluate(boxes);
+        assertThat(browser.evaluate("document.querySelectorAll('math a').length"))
+                .isEqualTo(0L);
+        browser.open(page, 1200, "light");
+        List<?> linked = (List<?>) browser.evaluate(boxes);
+        assertThat(linked).hasSameSizeAs(expected).hasSizeGreaterThan(20);
+        for (int i = 0; i < linked.size(); i++) {
+            assertThat(((Number) linked.get(i)).doubleValue())
+                    .as("size %s of %s", i, linked)
+                    .isCloseTo(((Number) expected.get(i)).doubleValue(), within(2.0));
+        }
+        assertThat(browser.evaluate("getComputedStyle(document.querySelector('math a')).textDecorationLine"))
+                .isEqualTo("none");
+        assertThat(browser.evaluate("getComputedStyle(document.querySelector('math a')).color"
+                        + " === getComputedStyle(document.querySelector('math')).color"))
+                .isEqualTo(true);
+    }
+
+    /** The texts that the browser hands to assistive technology, formula by formula. */
+    @Test
+    void aScreenReadersTextIsThatWithoutLinks() {
+        browser.open(page, 1200, "light");
+        List<String> linked = mathTexts();
+        assertThat(linked).contains("=output\u2061(𝑣Supply,𝑟Top,𝑟Bottom)");
+        browser.evaluate("document.querySelectorAll('math a').forEach(a => a.replaceWith(a.textContent))");
+        assertThat(linked).isEqualTo(mathTexts());
+    }
+
+    private List<String> mathTexts() {
+        browser.driver().executeCdpCommand("Accessibility.enable", Map.of());
+        Map<String, Object> tree = browser.driver().executeCdpCommand("Accessibility.getFullAXTree", Map.of());
+        Map<Object, Map<?, ?>> nodes = new LinkedHashMap<>();
+        ((List<?>) tree.get("nodes")).forEach(node -> nodes.put(((Map<?, ?>) node).get("nodeId"), (Map<?, ?>) node));
+        List<String> texts = new ArrayList<>();
+        for (Map<?, ?> node : nodes.values()) {
+            if (of(node, "role").equals("MathMLMath")) {
+                texts.add(text(nodes, node));
+            }
+        }
+        return texts;
+    }
+
+    private static String text(Map<Object, Map<?, ?>> nodes, Map<?, ?> node) {
+        if (of(node, "role").equals("StaticText")) {
+            return of(node, "name");
+        }
+        StringBuilder text = new StringBuilder();
+        for (Object child : (List<?>) node.get("childIds")) {
+            text.append(nodes.containsKey(child) ? text(nodes, nodes.get(child)) : "");
+        }
+        return text.toString();
+    }
+
+    private static String of(Map<?, ?> node, String property) {
+        return node.get(property) instanceof Map<?, ?> value ? String.valueOf(value.get("value")) : "";
+    }
+
+    @Test
+    void hoveringTellsOfANameAndStays() {
+        browser.open(page, 1200, "light");
+        WebElement name = browser.driver().findElement(SUPPLY);
+        new Actions(browser.driver()).moveToElement(name).perform();
+        WebElement panel = shown();
+        assertThat(panel.getText()).isEqualTo("""
+                        1.1 Supply and parts
+                        vSupply = 24 V
+                        cabinet supply
+                        Used by
+                        vOut; steps; width
+                        and so by
+                        step; width at most 3""");
+        assertThat(name.getAttribute("aria-expanded")).isEqualTo("true");
+        new Actions(browser.driver())
+                .moveToElement(panel)
+                .pause(Duration.ofMillis(600))
+                .perform();
+        assertThat(panel.isDisplayed()).isTrue();
+        assertThat(browser.evaluate("document.querySelectorAll('.peek [id]').length"))
+                .isEqualTo(0L);
+        new Actions(browser.driver())
+                .moveToElement(browser.driver().findElement(By.tagName("h1")))
+                .perform();
+        gone();
+        assertThat(name.getAttribute("aria-expanded")).isNull();
+    }
+
+    /** The whole symbol is the link, its index too. */
+    @Test
+    void theIndexBelongsToTheLink() {
+        browser.open(page, 1200, "light");
+        WebElement index =
+                browser.driver().findElement(By.xpath("//*[local-name()='msub'][*/*[@href='#at-1.1']]/*[2]"));
+        new Actions(browser.driver()).moveToElement(index).perform();
+        assertThat(shown().getText()).startsWith("1.1 Supply and parts");
+        new Actions(browser.driver()).moveToElement(index).click().perform();
+        assertThat(browser.evaluate("location.hash")).isEqualTo("#at-1.1");
+        gone();
+    }
+
+    @Test
+    void aResultTellsWhatItRestsOnDownToTheGivens() {
+        browser.open(page, 1200, "light");
+        new Actions(browser.driver())
+                .moveToElement(browser.driver().findElement(By.cssSelector("math a[href='#at-2.2']")))
+                .perform();
+        assertThat(shown().getText()).isEqualTo("""
+                        2.2 Output
+                        steps = 2.182 V, 24.00 V
+                        Made from
+                        vSupply = 24 V (1.1); vOut = 2.182 V (2.1)
+                        and so from
+                        rTop; rBottom
+                        Used by
+                        step""");
+    }
+
+    @Test
+    void escapeClosesAndHoverOpensAgain() {
+        browser.open(page, 1200, "light");
+        WebElement name = browser.driver().findElement(SUPPLY);
+        new Actions(browser.driver()).moveToElement(name).perform();
+        shown();
+        new Actions(browser.driver()).sendKeys(Keys.ESCAPE).perform();
+        gone();
+        new Actions(browser.driver())
+                .moveToElement(browser.driver().findElement(By.tagName("h1")))
+                .moveToElement(name)
+                .perform();
+        shown();
+    }
+
+    @Test
+    void byKeyboardInAndOut() {
+        browser.open(page, 1200, "light");
+        WebElement name = tabTo(SUPPLY);
+        assertThat(shown().getText()).endsWith("Enter: to line 1.1. Arrow down: into this box. Escape: close.");
+        assertThat(browser.evaluate("getComputedStyle(document.activeElement, '::after').outlineStyle"))
+                .isEqualTo("solid");
+        name.sendKeys(Keys.ARROW_DOWN);
+        assertThat(focused().getText()).isEqualTo("1.1");
+        assertThat(browser.evaluate("document.activeElement.closest('.peek') !== null"))
+                .isEqualTo(true);
+        focused().sendKeys(Keys.chord(Keys.SHIFT, Keys.TAB));
+        assertThat(focused()).isEqualTo(name);
+        name.sendKeys(Keys.ARROW_DOWN);
+        for (int i = 0; i < 6; i++) {
+            focused().sendKeys(Keys.TAB);
+        }
+        // Behind the last link of the panel comes the name after this one.
+        assertThat(focused().getAttribute("href")).endsWith("#at-1.2");
+        focused().sendKeys(Keys.ARROW_DOWN);
+        focused().sendKeys(Keys.ESCAPE);
+        gone();
+        assertThat(focused().getAttribute("href")).endsWith("#at-1.2");
+        focused().sendKeys(Keys.ENTER);
+        assertThat(browser.evaluate("location.hash")).isEqualTo("#at-1.2");
+        gone();
+    }
+
+    @Test
+    void aTapTellsAndASecondOneFollows() {
+        browser.open(page, 400, "dark");
+        WebElement name = browser.driver().findElement(SUPPLY);
+        browser.evaluate("document.querySelector(\"math a[href='#at-1.1']\").scrollIntoView({block: 'center'})");
+        tap(name);
+        WebElement panel = shown();
+        assertThat(browser.evaluate("location.hash")).isEqualTo("");
+        assertThat(panel.getRect().getX()).isNotNegative();
+        assertThat(panel.getRect().getX() + panel.getRect().getWidth()).isLessThanOrEqualTo(400);
+        tap(browser.driver().findElement(By.cssSelector(".cell h3")));
+        gone();
+        tap(name);
+        shown();
+        tap(name);
+        gone();
+        assertThat(browser.evaluate("location.hash")).isEqualTo("#at-1.1");
+    }
+
+    @Test
+    void aNameInATraceListTellsToo() {
+        browser.open(page, 1200, "light");
+        browser.evaluate("document.querySelectorAll('details').forEach(part => part.open = true)");
+        new Actions(browser.driver())
+                .moveToElement(browser.driver().findElement(By.cssSelector(".result .trace a[href='#at-1.2']")))
+                .perform();
+        assertThat(shown().getText()).startsWith("1.2 Supply and parts\nrTop = 10 kΩ\nUsed by\nvOut");
+    }
+
+    @ParameterizedTest
+    @CsvSource({"1200, light", "400, dark"})
+    void nothingInTheWayOfAReader(int width, String scheme) {
+        browser.open(page, width, scheme);
+        tabTo(SUPPLY);
+        shown();
+        assertThat(Axe.violations(browser)).isEmpty();
+        assertThat(browser.evaluate("document.documentElement.scrollWidth <= document.documentElement.clientWidth ? []"
+                        + " : [...document.querySelectorAll('body *:not(.scrolling *)')].filter(e => e.getBoundingClientRect().right >"
+                        + " document.documentElement.clientWidth).map(e => e.outerHTML.slice(0, 99))"))
+                .isEqualTo(List.of());
+    }
+
+    @Test
+    void withoutAScriptTheNameIsALink() {
+        browser.driver().executeCdpCommand("Emulation.setScriptExecutionDisabled", Map.of("value", true));
+        try {
+            browser.open(page, 1200, "light");
+            WebElement name = browser.driver().findElement(SUPPLY);
+            new Actions(browser.driver())
+                    .moveToElement(name)
+                    .pause(Duration.ofMillis(500))
+                    .perform();
+            assertThat(browser.driver().findElements(PANEL)).isEmpty();
+            new Actions(browser.driver()).click().perform();
+            assertThat(browser.driver().getCurrentUrl()).endsWith("#at-1.1");
+        } finally {
+            browser.driver().executeCdpCommand("Emulation.setScriptExecutionDisabled", Map.of("value", false));
+        }
+    }
+
+    @Test
+    void nothingOfItShowsOnPaper() {
+        browser.open(page, 1200, "light");
+        tabTo(SUPPLY);
+        WebElement panel = shown();
+        browser.driver()
+                .executeCdpCommand("Emulation.setEmulatedMedia", Map.of("media", "print", "features", List.of()));
+        try {
+            assertThat(panel.isDisplayed()).isFalse();
+            assertThat(browser.evaluate("getComputedStyle(document.querySelector('math a[aria-expanded]'), '::after')"
+                            + ".content"))
+                    .isEqualTo("none");
+        } finally {
+            browser.driver()
+                    .executeCdpCommand("Emulation.setEmulatedMedia", Map.of("media", "", "features", List.of()));
+        }
+    }
+
+    /** Nothing moves, so there is nothing to reduce. */
+    @Test
+    void nothingMoves() {
+        browser.open(page, 1200, "light");
+        tabTo(SUPPLY);
+        shown();
+        assertThat(browser.evaluate("document.getAnimations().length")).isEqualTo(0L);
+        assertThat(browser.evaluate("getComputedStyle(document.querySelector('.peek')).transitionDuration"))
+                .isEqualTo("0s");
+    }
+
+    private WebElement shown() {
+        return new WebDriverWait(browser.driver(), Duration.ofSeconds(10))
+                .until(ExpectedConditions.visibilityOfElementLocated(PANEL));
+    }
+
+    private void gone() {
+        new WebDriverWait(browser.driver(), Duration.ofSeconds(10))
+                .until(ExpectedConditions.numberOfElementsToBe(PANEL, 0));
+    }
+
+    private WebElement focused() {
+        return browser.driver().switchTo().activeElement();
+    }
+
+    private WebElement tabTo(By place) {
+        WebElement wanted = browser.driver().findElement(place);
+        for (int i = 0; i < 60; i++) {
+            new Actions(browser.driver()).sendKeys(Keys.TAB).perform();
+            if (focused().equals(wanted)) {
+                return wanted;
+            }
+        }
+        throw new AssertionError("no tab stop within 60: " + place);
+    }
+
+    private void tap(WebElement place) {
+        PointerInput finger = new PointerInput(PointerInput.Kind.TOUCH, "finger");
+        browser.driver()
+                .perform(List.of(new Sequence(finger, 0)
+                        .addAction(
+                                finger.createPointerMove(Duration.ZERO, PointerInput.Origin.fromElement(place), 0, 0))
+                        .addAction(finger.createPointerDown(PointerInput.MouseButton.LEFT.asArg()))
+                        .addAction(finger.createPointerUp(PointerInput.MouseButton.LEFT.asArg()))));
+    }
+}
