@@ -123,7 +123,7 @@ final class Judge {
                 Optional.of(window.margin(nominal)),
                 new OverTolerance(Optional.empty(), Optional.of(found)),
                 Shares.percent(found.share()) + " inside, at least " + Shares.percent(found.low()),
-                Shares.points(found.low() - wanted),
+                Shares.above(found.low(), wanted),
                 "");
     }
 

@@ -12,18 +12,18 @@ public final class Shares {
 
     /** Such as {@code 99.73 %}; rounded down, lest a share seem to reach what it misses. */
     public static String percent(double share) {
-        return text(share, RoundingMode.FLOOR);
+        return text(BigDecimal.valueOf(share));
     }
 
-    /** The distance of two shares with its sign, such as {@code +0.12 %}. */
-    static String points(double distance) {
-        return (distance > 0 ? "+" : "") + text(distance, RoundingMode.FLOOR);
+    /** How far a share lies above a wanted one, such as {@code +0.12 %}. */
+    static String above(double share, double wanted) {
+        BigDecimal distance = BigDecimal.valueOf(share).subtract(BigDecimal.valueOf(wanted));
+        return (distance.signum() > 0 ? "+" : "") + text(distance);
     }
 
-    private static String text(double share, RoundingMode rounding) {
-        BigDecimal percent = BigDecimal.valueOf(share)
-                .scaleByPowerOfTen(2)
-                .setScale(DECIMALS, rounding)
+    private static String text(BigDecimal share) {
+        BigDecimal percent = share.scaleByPowerOfTen(2)
+                .setScale(DECIMALS, RoundingMode.FLOOR)
                 .stripTrailingZeros();
         return percent.toPlainString().replace('-', Notation.MINUS) + Notation.SPACE + "%";
     }
