@@ -7,6 +7,7 @@ enum Design {
     CONDENSATE_LIFT("condensate-lift", 7, 2, 1),
     DOOR_HEATER("door-heater", 6, 2, 0),
     BATTERY_DISCONNECT("battery-disconnect", 8, 2, 1),
+    CABINET_FAN("cabinet-fan", 5, 1, 0),
     WORKED_EXAMPLE("worked-example", 9, 2, 0);
 
     /** The folder of all worksheets. */

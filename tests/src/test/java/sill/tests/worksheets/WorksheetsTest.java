@@ -77,7 +77,15 @@ class WorksheetsTest {
 
     /** From the value to the nearer limit, as the record's format defines it. */
     private static double margin(JsonNode check) {
-        double value = check.at("/value").asDouble();
+        if (check.hasNonNull("worstLow")) {
+            return Math.min(
+                    margin(check, check.at("/worstLow").asDouble()),
+                    margin(check, check.at("/worstHigh").asDouble()));
+        }
+        return margin(check, check.at("/value").asDouble());
+    }
+
+    private static double margin(JsonNode check, double value) {
         double below = check.hasNonNull("low") ? value - check.at("/low").asDouble() : Double.POSITIVE_INFINITY;
         double above = check.hasNonNull("high") ? check.at("/high").asDouble() - value : Double.POSITIVE_INFINITY;
         return Math.min(below, above);
@@ -119,7 +127,7 @@ class WorksheetsTest {
         Runs.Run run = runs.of(design);
         Set<String> ids = found("\\bid=\"([^\"]*)\"", run.page());
 
-        for (String list : List.of("givens", "values", "plots", "checks")) {
+        for (String list : List.of("givens", "values", "tolerances", "plots", "checks")) {
             for (JsonNode entry : run.record().at("/" + list)) {
                 assertThat(ids).contains("at-" + entry.at("/at").asText());
             }
@@ -166,6 +174,12 @@ class WorksheetsTest {
     }
 
     private static double value(Design design, String name) {
+        String[] words = name.split(" ");
+        for (JsonNode found : runs.of(design).record().at("/tolerances")) {
+            if (words.length == 2 && found.at("/of").asText().equals(words[0])) {
+                return found.at("/worstCase/" + words[1]).asDouble();
+            }
+        }
         String[] path = name.split("\\.", 2);
         for (JsonNode value : runs.of(design).record().at("/values")) {
             if (value.at("/name").asText().equals(path[0])) {
