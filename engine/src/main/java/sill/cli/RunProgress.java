@@ -18,7 +18,10 @@ final class RunProgress implements Progress, AutoCloseable {
     private final Map<Integer, String> captions = new HashMap<>();
     private final Timer timer = new Timer("progress", true);
     private final long start = System.nanoTime();
-    private volatile int cell;
+    private int cell;
+    private long cellStart = start;
+    private long done;
+    private long total;
     private boolean shown;
 
     RunProgress(Terminal terminal, Worksheet worksheet) {
@@ -36,16 +39,37 @@ final class RunProgress implements Progress, AutoCloseable {
     }
 
     @Override
-    public void begins(int cell) {
+    public synchronized void begins(int cell) {
         this.cell = cell;
+        cellStart = System.nanoTime();
+        done = 0;
+    }
+
+    @Override
+    public synchronized void studied(long done, long total) {
+        this.done = done;
+        this.total = total;
     }
 
     private synchronized void show() {
         shown = true;
-        int now = cell;
+        long now = System.nanoTime();
         String what =
-                now == 0 ? "compiling" : "cell " + now + " of " + captions.size() + " \"" + captions.get(now) + "\"";
-        terminal.progress(what + ", " + TimeUnit.NANOSECONDS.toSeconds(System.nanoTime() - start) + " s");
+                cell == 0 ? "compiling" : "cell " + cell + " of " + captions.size() + " \"" + captions.get(cell) + "\"";
+        terminal.progress(what + ", " + seconds(now - start) + " s" + toGo(now));
+    }
+
+    /** How much of a tolerance cell is done, and when the rest will be, at the pace so far. */
+    private String toGo(long now) {
+        if (done == 0 || done >= total) {
+            return "";
+        }
+        double left = (double) (total - done) / done * (now - cellStart);
+        return ", " + done * 100 / total + " % of its repetitions, about " + (seconds((long) left) + 1) + " s to go";
+    }
+
+    private static long seconds(long nanoseconds) {
+        return TimeUnit.NANOSECONDS.toSeconds(nanoseconds);
     }
 
     @Override

@@ -11,7 +11,7 @@ final class MethodReader {
     /** Fewer samples say nothing about the quantiles a record prints; more would not fit in memory beside the rest. */
     private static final int FEWEST = 100;
 
-    private static final int MOST = 10_000_000;
+    private static final int MOST = 1_000_000_000;
     private static final List<String> WORDS = List.of("worst-case", "rss", "monte-carlo");
 
     private MethodReader() {}
