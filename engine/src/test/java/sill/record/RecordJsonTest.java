@@ -49,6 +49,35 @@ class RecordJsonTest {
         assertThat(fields(parse(Records.ofEverything()).at(place))).containsSubsequence(names.split(" "));
     }
 
+    /** From the design's page on the record. */
+    @ParameterizedTest
+    @CsvSource({
+        "/tolerances/0, of unit nominal worstCase rss monteCarlo sensitivities",
+        "/tolerances/0/worstCase, low high monotonic",
+        "/tolerances/0/rss, low high",
+        "/tolerances/0/monteCarlo, samples seed mean sd low high quantiles min max notFinite",
+        "/tolerances/0/sensitivities/0, given slope share"
+    })
+    void theFormatsFieldsOfATolerance(String place, String names) throws Exception {
+        assertThat(fields(parse(Records.ofTolerances()).at(place))).containsSubsequence(names.split(" "));
+    }
+
+    @Test
+    void whatATolerancesFieldsHold() throws Exception {
+        JsonNode found = parse(Records.ofTolerances()).at("/tolerances/0");
+        assertThat(found.at("/of").asText()).isEqualTo("v");
+        assertThat(found.at("/worstCase/monotonic").isBoolean()).isTrue();
+        assertThat(found.at("/worstCase/monotonic").asBoolean()).isFalse();
+        assertThat(found.at("/worstCase/trends/vIn").asText()).isEqualTo("mixed");
+        assertThat(found.at("/worstCase/highAt/vIn").doubleValue()).isEqualTo(24.1);
+        assertThat(found.at("/monteCarlo/quantiles/0.99865").doubleValue()).isEqualTo(2.16);
+        assertThat(found.at("/monteCarlo/notFinite").longValue()).isEqualTo(3);
+        assertThat(found.at("/over/given").asText()).isEqualTo("vIn");
+        assertThat(found.at("/over/high")).hasSize(2);
+        assertThat(found.at("/remarks/0").asText()).isEqualTo("A remark.");
+        assertThat(found.at("/at").asText()).isEqualTo("1.1");
+    }
+
     @Test
     void whatTheFieldsHold() throws Exception {
         JsonNode json = parse(Records.ofEverything());

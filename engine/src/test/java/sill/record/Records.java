@@ -3,9 +3,11 @@ package sill.record;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.TreeMap;
 import sill.stdlib.Plot;
 import sill.values.CellState;
 import sill.values.Datum;
+import sill.values.Finding;
 import sill.worksheet.Problem;
 
 /** Small records for tests; the circuits in them are invented. */
@@ -37,6 +39,25 @@ public final class Records {
                 List.of(Problem.warning(5, 1, 1, "unused", "")));
     }
 
+    /** A record of one tolerance cell, which found all that one can. */
+    public static DesignRecord ofTolerances() {
+        DesignRecord all = ofEverything();
+        return new DesignRecord(
+                all.outcome(),
+                all.titleBlock(),
+                all.made(),
+                all.trial(),
+                all.worksheet(),
+                List.of(),
+                List.of(new DesignRecord.CellEntry(1, "tolerance", "Spread", 4, CellState.DONE, "", "", "of: v")),
+                List.of(given()),
+                List.of(),
+                List.of(tolerance()),
+                List.of(),
+                List.of(),
+                List.of());
+    }
+
     private static DesignRecord record(
             String source,
             List<DesignRecord.GivenEntry> givens,
@@ -57,6 +78,46 @@ public final class Records {
                 checks,
                 List.of(new DesignRecord.PlotEntry("1.9", "", "Ramp", plot(), List.of("v"), List.of("v", "vIn"))),
                 problems);
+    }
+
+    /** What a tolerance cell found of {@code v}, at address 1.1. */
+    static DesignRecord.ToleranceEntry tolerance() {
+        Finding.MonteCarlo sampled = new Finding.MonteCarlo(
+                200_000,
+                7,
+                2.01,
+                0.05,
+                1.91,
+                2.11,
+                new TreeMap<>(Map.of("0.00135", 1.85, "0.5", 2.01, "0.99865", 2.16)),
+                Map.of("mean", 0.0001, "sd", 0.0002),
+                1.82,
+                2.19,
+                3,
+                2,
+                new Finding.Histogram(1.8, 2.2, List.of(50_000L, 99_997L, 50_000L)),
+                List.of(new Finding.Share(5, 0.99, 0.985)));
+        Finding finding = new Finding(
+                1,
+                1,
+                "v",
+                "",
+                "V",
+                "",
+                2,
+                List.of("vIn"),
+                Optional.of(new Finding.WorstCase(
+                        new Finding.Extreme(1.8, List.of(22.8)),
+                        new Finding.Extreme(2.2, List.of(24.1)),
+                        List.of(Finding.Trend.MIXED))),
+                Optional.of(new Finding.RootSumSquare(1.9, 2.1, 0.06)),
+                Optional.of(sampled),
+                List.of(new Finding.Sensitivity("vIn", 0.083, 1)),
+                Optional.of(new Finding.Sweep(
+                        "vIn", List.of(22.8, 25.2), List.of(1.9, 2.1), List.of(1.8, 2.0), List.of(2.0, 2.2))),
+                List.of("A remark."));
+        return new DesignRecord.ToleranceEntry(
+                finding, "1.1", 5, List.of(new DesignRecord.Limit(2.15, "REQ-01")), Map.of("vIn", Units.of("V")));
     }
 
     static DesignRecord.GivenEntry given() {

@@ -79,7 +79,8 @@ final class Tolerances {
             for (String probability : List.of("0.00135", "0.5", "0.99865")) {
                 page.open("span").leaf("span", FindingText.percent(probability), "class", "share");
                 page.text(" " + text.number(found.get().quantiles().get(probability)))
-                        .close();
+                        .close()
+                        .text(" ");
             }
             page.close();
         }

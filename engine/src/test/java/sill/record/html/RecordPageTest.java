@@ -297,4 +297,27 @@ class RecordPageTest {
         assertThat(panel.select("dt").eachText()).containsExactly("Made from", "and so from");
         assertThat(panel.select("dd").eachText()).containsExactly("v = 2.000 V (1.1)", "vIn");
     }
+
+    @Test
+    void whatATolerancesCellFound() {
+        Document page = page(Records.ofTolerances());
+        Element row = page.selectFirst(".cell-tolerance > table tbody tr");
+        assertThat(row.text().replace('\u00a0', ' '))
+                .isEqualTo("1.1 v 2.000 V 1.800 V .. 2.200 V 1.900 V .. 2.100 V"
+                        + " 0.135 % 1.850 V 50 % 2.010 V 99.865 % 2.160 V");
+        assertThat(page.select(".finding .state").eachText()).containsExactly("A remark.");
+        assertThat(page.select(".finding .fields dd").eachText())
+                .extracting(text -> text.replace('\u00a0', ' '))
+                .containsExactly(
+                        "200 000, seed 7",
+                        "3 of them, 2 by an exception; the figures below are those of the others",
+                        "2.010 V, standard error by sampling 100.0 µV",
+                        "50.00 mV, standard error by sampling 200.0 µV",
+                        "1.910 V .. 2.110 V",
+                        "1.820 V, 2.190 V");
+        assertThat(page.selectFirst(".sensitivities tbody tr").text().replace('\u00a0', ' '))
+                .isEqualTo("vIn 0.08300 100.0 % mixed lower limit 24.10 V");
+        assertThat(page.select(".finding svg.plot title").eachText()).containsExactly("Samples of v", "v over vIn");
+        assertThat(page.select(".finding svg.bar rect").attr("width")).isEqualTo("100.0");
+    }
 }
