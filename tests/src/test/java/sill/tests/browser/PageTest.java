@@ -4,6 +4,8 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import com.deque.html.axecore.results.Results;
 import com.deque.html.axecore.selenium.AxeBuilder;
+import java.io.OutputStream;
+import java.io.PrintStream;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -25,8 +27,10 @@ import org.junit.jupiter.params.provider.ValueSource;
 import org.openqa.selenium.By;
 import org.openqa.selenium.Keys;
 import org.openqa.selenium.WebElement;
+import sill.cli.Main;
 import sill.record.DesignRecord;
 import sill.record.html.RecordPage;
+import sill.tests.Clone;
 
 /** The page of a record as people meet it: on a wide and a narrow screen, light and dark, on paper, read aloud. */
 @TestInstance(TestInstance.Lifecycle.PER_CLASS)
@@ -39,6 +43,10 @@ class PageTest {
         folder = temporary;
         write("everything", SampleRecord.everything());
         write("holding", SampleRecord.holding());
+        Path studied = Clone.root().resolve("worksheets/cabinet-fan/cabinet-fan.sill");
+        PrintStream nowhere = new PrintStream(OutputStream.nullOutputStream());
+        assertThat(Main.run(nowhere, nowhere, "run", studied.toString(), "--out", folder.toString(), "--quiet"))
+                .isZero();
         browser = Browser.start();
     }
 
@@ -58,14 +66,14 @@ class PageTest {
     }
 
     static Stream<Arguments> views() {
-        return Stream.of("everything", "holding")
+        return Stream.of("everything", "holding", "cabinet-fan")
                 .flatMap(page -> Stream.of("light", "dark")
                         .flatMap(scheme -> Stream.of(1200, 400).map(width -> Arguments.of(page, scheme, width))));
     }
 
     /** Each takes seconds, so the schemes and widths are spread over the pages. */
     @ParameterizedTest
-    @CsvSource({"everything, light, 1200", "everything, dark, 400", "holding, dark, 1200"})
+    @CsvSource({"everything, light, 1200", "everything, dark, 400", "holding, dark, 1200", "cabinet-fan, light, 400"})
     void nothingInTheWayOfAReader(String page, String scheme, int width) {
         browser.open(file(page), width, scheme);
         // Folded parts count too: a reader opens them.
@@ -101,7 +109,7 @@ class PageTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"everything", "holding"})
+    @ValueSource(strings = {"everything", "holding", "cabinet-fan"})
     void itIsValidHtml(String page) throws Exception {
         assertThat(HtmlValidator.complaints(Files.readString(file(page)))).isEmpty();
     }
