@@ -32,7 +32,7 @@ final class BlockRun {
     BlockTally run(long block, int count, Probe probe, Keeper keeper) throws InterruptedException {
         BlockTally tally = new BlockTally(outputs);
         Stream generator = Stream.of(seed, block);
-        ZigguratSampler normals = ZigguratSampler.NormalizedGaussian.of(generator);
+        ZigguratSampler.NormalizedGaussian normals = ZigguratSampler.NormalizedGaussian.of(generator);
         for (int from = 0; from < count; from += Draws.CHUNK) {
             if (Thread.interrupted()) {
                 throw new InterruptedException();
@@ -73,7 +73,7 @@ final class BlockRun {
     /** The inputs of the first sample of a block that gives an output this value. */
     double[] inputsOf(long block, int count, int output, double value, Probe probe) throws InterruptedException {
         Stream generator = Stream.of(seed, block);
-        ZigguratSampler normals = ZigguratSampler.NormalizedGaussian.of(generator);
+        ZigguratSampler.NormalizedGaussian normals = ZigguratSampler.NormalizedGaussian.of(generator);
         double[] found = new double[inputs];
         for (int from = 0; from < count; from += Draws.CHUNK) {
             int some = Math.min(Draws.CHUNK, count - from);

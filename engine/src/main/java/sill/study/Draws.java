@@ -27,7 +27,7 @@ final class Draws {
     }
 
     /** Fills {@code count} samples, one after another, each with all inputs. */
-    void fill(Stream generator, ZigguratSampler normals, double[] rows, int count) {
+    void fill(Stream generator, ZigguratSampler.NormalizedGaussian normals, double[] rows, int count) {
         for (int i = 0; i < inputs.length; i++) {
             Varied input = inputs[i];
             if (!input.free()) {
@@ -49,7 +49,8 @@ final class Draws {
         }
     }
 
-    private void normal(ZigguratSampler normals, double[] rows, int input, int count, double mean, double sd) {
+    private void normal(
+            ZigguratSampler.NormalizedGaussian normals, double[] rows, int input, int count, double mean, double sd) {
         int inRow = inputs.length;
         for (int at = input, end = count * inRow; at < end; at += inRow) {
             rows[at] = mean + sd * normals.sample();

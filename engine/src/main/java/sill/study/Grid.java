@@ -69,13 +69,12 @@ final class Grid implements Ordered {
         long above = baseAbove;
         long[] cells = counts;
         for (int i = 0; i < count; i++) {
-            double away = values[i] - middle;
-            long key = Double.doubleToRawLongBits(Math.abs(away)) >>> DROPPED;
-            if (away < 0) {
-                cells[SIDE - (int) Math.max(0, Math.min(SIDE, key - below))]++;
-            } else {
-                cells[SIDE + 1 + (int) Math.max(0, Math.min(SIDE, key - above))]++;
-            }
+            long bits = Double.doubleToRawLongBits(values[i] - middle);
+            // All ones below the centre, else 0: a branch would be foretold wrong every other time.
+            long sign = bits >> 63;
+            long key = ((bits & Long.MAX_VALUE) >>> DROPPED) - above + ((above - below) & sign);
+            long cell = Math.max(0, Math.min(SIDE, key));
+            cells[SIDE + 1 + (int) (cell ^ sign)]++;
         }
     }
 
