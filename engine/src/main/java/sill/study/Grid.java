@@ -135,7 +135,10 @@ final class Grid implements Ordered {
 
     @Override
     public double atRank(double rank) {
-        int index = cellOf(rank);
+        return inCell(cellOf(rank), rank);
+    }
+
+    private double inCell(int index, double rank) {
         double below = index == 0 ? 0 : cumulative[index - 1];
         double part = counts[index] == 0 ? 0 : (rank - below) / counts[index];
         double value = edge(index) + Math.max(0, Math.min(1, part)) * (edge(index + 1) - edge(index));
@@ -171,20 +174,24 @@ final class Grid implements Ordered {
         return up - value <= value - down ? up : down;
     }
 
-    /** Looks from the lowest sample and from every cell that holds one. */
+    /** Looks from the first sample of every cell. */
     @Override
     public double closest(double span) {
         double best = 1;
         double shortest = Double.POSITIVE_INFINITY;
+        int upper = 0;
         for (int i = 0; i < cumulative.length; i++) {
             double rank = i == 0 ? 1 : cumulative[i - 1] + 1.0;
             if (rank + span > count()) {
                 break;
             }
-            if (i > 0 && counts[i] == 0) {
+            if (counts[i] == 0) {
                 continue;
             }
-            double length = atRank(rank + span) - atRank(rank);
+            while (cumulative[upper] < rank + span) {
+                upper++;
+            }
+            double length = inCell(upper, rank + span) - inCell(i, rank);
             if (length < shortest) {
                 shortest = length;
                 best = rank;
