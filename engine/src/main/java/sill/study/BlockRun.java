@@ -1,7 +1,6 @@
 package sill.study;
 
 import java.util.List;
-import org.apache.commons.rng.core.source64.XoShiRo256PlusPlus;
 import org.apache.commons.rng.sampling.distribution.ZigguratSampler;
 
 /** Draws and evaluates blocks for one thread. */
@@ -32,8 +31,8 @@ final class BlockRun {
     /** A block's samples through the model. */
     BlockTally run(long block, int count, Probe probe, Keeper keeper) throws InterruptedException {
         BlockTally tally = new BlockTally(outputs);
-        XoShiRo256PlusPlus generator = Draws.generator(seed, block);
-        ZigguratSampler normals = ZigguratSampler.NormalizedGaussian.of(generator);
+        Stream generator = Stream.of(seed, block);
+        ZigguratSampler.NormalizedGaussian normals = ZigguratSampler.NormalizedGaussian.of(generator);
         for (int from = 0; from < count; from += Draws.CHUNK) {
             if (Thread.interrupted()) {
                 throw new InterruptedException();
@@ -73,8 +72,8 @@ final class BlockRun {
 
     /** The inputs of the first sample of a block that gives an output this value. */
     double[] inputsOf(long block, int count, int output, double value, Probe probe) throws InterruptedException {
-        XoShiRo256PlusPlus generator = Draws.generator(seed, block);
-        ZigguratSampler normals = ZigguratSampler.NormalizedGaussian.of(generator);
+        Stream generator = Stream.of(seed, block);
+        ZigguratSampler.NormalizedGaussian normals = ZigguratSampler.NormalizedGaussian.of(generator);
         double[] found = new double[inputs];
         for (int from = 0; from < count; from += Draws.CHUNK) {
             int some = Math.min(Draws.CHUNK, count - from);

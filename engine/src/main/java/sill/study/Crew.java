@@ -86,6 +86,7 @@ final class Crew {
 
         void work(Probe probe) {
             try {
+                probe.settle();
                 for (long number = take(); number < tasks; number = take()) {
                     if (Thread.interrupted()) {
                         throw new InterruptedException();

@@ -1,7 +1,6 @@
 package sill.study;
 
 import java.util.List;
-import org.apache.commons.rng.core.source64.XoShiRo256PlusPlus;
 import org.apache.commons.rng.sampling.distribution.ZigguratSampler;
 
 /**
@@ -21,35 +20,14 @@ final class Draws {
     static final int BLOCK = 4096;
     static final int CHUNK = 256;
 
-    private static final long GOLDEN = 0x9E3779B97F4A7C15L;
-
     private final Varied[] inputs;
 
     Draws(List<Varied> inputs) {
         this.inputs = inputs.toArray(new Varied[0]);
     }
 
-    /** The generator of a block. */
-    static XoShiRo256PlusPlus generator(long seed, long block) {
-        long state = mixed(seed + GOLDEN) ^ mixed(mixed(block + GOLDEN) + GOLDEN);
-        long[] words = new long[4];
-        for (int i = 0; i < words.length; i++) {
-            state += GOLDEN;
-            words[i] = mixed(state);
-        }
-        return new XoShiRo256PlusPlus(words[0], words[1], words[2], words[3]);
-    }
-
-    /** The output function of SplitMix64 (Steele, Lea, Flood 2014). */
-    private static long mixed(long value) {
-        long z = value;
-        z = (z ^ z >>> 30) * 0xBF58476D1CE4E5B9L;
-        z = (z ^ z >>> 27) * 0x94D049BB133111EBL;
-        return z ^ z >>> 31;
-    }
-
     /** Fills {@code count} samples, one after another, each with all inputs. */
-    void fill(XoShiRo256PlusPlus generator, ZigguratSampler normals, double[] rows, int count) {
+    void fill(Stream generator, ZigguratSampler.NormalizedGaussian normals, double[] rows, int count) {
         for (int i = 0; i < inputs.length; i++) {
             Varied input = inputs[i];
             if (!input.free()) {
@@ -59,7 +37,7 @@ final class Draws {
             } else if (input.spread() instanceof Spread.Triangular) {
                 triangular(generator, rows, i, count, input);
             } else {
-                uniform(generator, rows, i, count, input.low(), input.width());
+                generator.uniform(rows, i, inputs.length, count * inputs.length, input.low(), input.width());
             }
         }
     }
@@ -71,31 +49,30 @@ final class Draws {
         }
     }
 
-    private void uniform(XoShiRo256PlusPlus generator, double[] rows, int input, int count, double low, double width) {
-        int inRow = inputs.length;
-        for (int at = input, end = count * inRow; at < end; at += inRow) {
-            rows[at] = low + width * generator.nextDouble();
-        }
-    }
-
-    private void normal(ZigguratSampler normals, double[] rows, int input, int count, double mean, double sd) {
+    private void normal(
+            ZigguratSampler.NormalizedGaussian normals, double[] rows, int input, int count, double mean, double sd) {
         int inRow = inputs.length;
         for (int at = input, end = count * inRow; at < end; at += inRow) {
             rows[at] = mean + sd * normals.sample();
         }
     }
 
-    private void triangular(XoShiRo256PlusPlus generator, double[] rows, int input, int count, Varied varied) {
+    /** Both sides of the mode by one path, for a branch would be foretold wrong every other time. */
+    private void triangular(Stream generator, double[] rows, int input, int count, Varied varied) {
         int inRow = inputs.length;
-        double low = varied.low();
-        double high = varied.high();
-        double below = varied.nominal() - low;
-        double above = high - varied.nominal();
-        double width = varied.width();
-        double share = below / width;
-        for (int at = input, end = count * inRow; at < end; at += inRow) {
-            double u = generator.nextDouble();
-            rows[at] = u < share ? low + Math.sqrt(u * width * below) : high - Math.sqrt((1 - u) * width * above);
+        int end = count * inRow;
+        generator.uniform(rows, input, inRow, end, 0, 1);
+        double below = varied.nominal() - varied.low();
+        double above = varied.high() - varied.nominal();
+        double share = below / varied.width();
+        double[] limit = {varied.high(), varied.low()};
+        double[] sign = {-1, 1};
+        double[] area = {varied.width() * above, varied.width() * below};
+        double[] start = {1, 0};
+        for (int at = input; at < end; at += inRow) {
+            double u = rows[at];
+            int side = (int) (Double.doubleToRawLongBits(u - share) >>> 63);
+            rows[at] = limit[side] + sign[side] * Math.sqrt((start[side] + sign[side] * u) * area[side]);
         }
     }
 }

@@ -2,11 +2,13 @@ package sill.study;
 
 /**
  * Mean and central moments of finite values: of a block about its first value, then put together block by block (Chan,
- * Golub and LeVeque 1979; for the higher moments Pébay 2008). The order of the blocks is part of the result.
+ * Golub and LeVeque 1979; for the higher moments Pébay 2008). The order of the blocks is part of the result. The mean is kept as
+ * its distance from the first of all values, so that a large mean with a small spread costs no digits.
  */
 final class Moments {
     private long count;
-    private double mean;
+    private double shift;
+    private double offset;
     private double second;
     private double third;
     private double fourth;
@@ -44,7 +46,8 @@ final class Moments {
         }
         moments.count = count;
         // What the first pass lost to rounding, the second sees.
-        moments.mean = shift + (mean + rest / count);
+        moments.shift = shift;
+        moments.offset = mean + rest / count;
         moments.second = Math.max(0, second - rest * rest / count);
         moments.third = third;
         moments.fourth = fourth;
@@ -61,7 +64,11 @@ final class Moments {
         double n1 = count;
         double n2 = later.count;
         double n = n1 + n2;
-        double delta = count == 0 ? 0 : later.mean - mean;
+        if (count == 0) {
+            shift = later.shift;
+            offset = later.offset;
+        }
+        double delta = later.shift - shift + (later.offset - offset);
         double part = delta / n;
         double cross = delta * part * n1 * n2;
         fourth += later.fourth
@@ -70,7 +77,7 @@ final class Moments {
                 + 4 * part * (n1 * later.third - n2 * third);
         third += later.third + cross * part * (n1 - n2) + 3 * part * (n1 * later.second - n2 * second);
         second += later.second + cross;
-        mean = count == 0 ? later.mean : mean + part * n2;
+        offset += part * n2;
         count += later.count;
         min = Math.min(min, later.min);
         max = Math.max(max, later.max);
@@ -90,7 +97,7 @@ final class Moments {
 
     /** The mean with its sampling error. */
     Estimate mean() {
-        return new Estimate(mean, Math.sqrt(second / (count - 1) / count));
+        return new Estimate(shift + offset, Math.sqrt(second / (count - 1) / count), 0);
     }
 
     /**
@@ -100,6 +107,6 @@ final class Moments {
         double variance = second / (count - 1);
         double ofVariance = (fourth / count - variance * variance * (count - 3) / (count - 1)) / count;
         double sd = Math.sqrt(variance);
-        return new Estimate(sd, sd > 0 ? Math.sqrt(Math.max(0, ofVariance)) / (2 * sd) : 0);
+        return new Estimate(sd, sd > 0 ? Math.sqrt(Math.max(0, ofVariance)) / (2 * sd) : 0, 0);
     }
 }

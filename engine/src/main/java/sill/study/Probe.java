@@ -5,14 +5,22 @@ import java.util.Arrays;
 /** A thread's model, and what it gave last. */
 final class Probe {
     private final Model model;
-    private final double[] scratch;
-    private final double[] outputs;
+    private double[] scratch;
+    private double[] outputs;
     private Throwable thrown;
 
     Probe(Model model, int inputs, int outputs) {
         this.model = model;
         this.scratch = new double[inputs];
         this.outputs = new double[outputs];
+    }
+
+    /**
+     * Takes new arrays from the calling thread's own memory: arrays of two threads that share a cache line would slow both.
+     */
+    void settle() {
+        scratch = new double[scratch.length];
+        outputs = new double[outputs.length];
     }
 
     /** Results of the last evaluation; not numbers where it threw. */

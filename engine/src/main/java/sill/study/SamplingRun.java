@@ -66,17 +66,35 @@ final class SamplingRun {
                                             System.arraycopy(all, 0, kept[output], from, count));
                 },
                 this::add);
+        List<double[]> errors = errors();
         List<Ordered> ordered = new ArrayList<>();
-        List<double[]> errors = new ArrayList<>();
-        for (int k = 0; k < kept.length; k++) {
-            errors.add(ShortestInterval.errors(kept[k], sampling.samples()));
-            Arrays.sort(kept[k]);
-            ordered.add(new Sorted(kept[k], ShortestInterval.finite(kept[k])));
-        }
+        crew.run(kept.length, (output, probe) -> sorted(kept[(int) output]), ordered::add);
         if (blocks > first) {
             count(first, runs, ordered);
         }
         return found(ordered, errors);
+    }
+
+    /** Sorts slices of the kept samples on the way. */
+    private List<double[]> errors() throws InterruptedException {
+        int slices = ShortestInterval.SLICES;
+        List<Optional<ShortestInterval>> found = new ArrayList<>();
+        crew.run(
+                (long) slices * kept.length,
+                (number, probe) -> ShortestInterval.ofSlice(kept[(int) number / slices], (int) number % slices),
+                found::add);
+        double times = sampling.samples() / (double) (kept[0].length / slices);
+        List<double[]> errors = new ArrayList<>();
+        for (int k = 0; k < kept.length; k++) {
+            errors.add(ShortestInterval.errors(found.subList(k * slices, (k + 1) * slices), times));
+        }
+        return errors;
+    }
+
+    /** The JDK's sort merges the slices, which are sorted already. */
+    private static Ordered sorted(double[] values) {
+        Arrays.sort(values);
+        return new Sorted(values, ShortestInterval.finite(values));
     }
 
     private void add(BlockTally block) {

@@ -1,6 +1,8 @@
 package sill.study;
 
 import java.util.Arrays;
+import java.util.List;
+import java.util.Optional;
 
 /**
  * The shortest interval that holds 95 % of samples: JCGM 101:2008 7.7 (clause from memory).
@@ -12,7 +14,7 @@ import java.util.Arrays;
  */
 record ShortestInterval(double low, double high, double rank, double span) {
     private static final double PROBABILITY = 0.95;
-    private static final int SLICES = 16;
+    static final int SLICES = 16;
     private static final int LEAST_IN_SLICE = 100;
 
     static ShortestInterval of(Ordered samples) {
@@ -22,33 +24,35 @@ record ShortestInterval(double low, double high, double rank, double span) {
     }
 
     /**
-     * How the ends scatter over 16 slices of the samples in the order drawn, for all {@code count} samples: the place of a
-     * shortest interval settles with the cube root of the number of samples where the density is smooth (faster elsewhere),
-     * so the scatter of the slices is divided by the cube root of how many slices make up the count. Sorts the slices.
+     * Sorts one of {@value #SLICES} slices of samples in the order drawn.
      *
-     * @param values samples in the order drawn; those not a number are passed over
-     * @return errors of the lower and the upper end; not numbers where a slice would have less than 100 samples
+     * @return its interval; none where it holds less than 100 samples that are numbers
      */
-    static double[] errors(double[] values, long count) {
+    static Optional<ShortestInterval> ofSlice(double[] values, int slice) {
         int size = values.length / SLICES;
-        if (size < LEAST_IN_SLICE) {
+        double[] sorted = Arrays.copyOfRange(values, slice * size, (slice + 1) * size);
+        BucketSort.sort(sorted);
+        System.arraycopy(sorted, 0, values, slice * size, size);
+        int finite = finite(sorted);
+        return finite < LEAST_IN_SLICE ? Optional.empty() : Optional.of(of(new Sorted(sorted, finite)));
+    }
+
+    /**
+     * Sampling errors of the ends, from their scatter over the slices: the place of a shortest interval settles with the
+     * cube root of the number of samples where the density is smooth (faster elsewhere), so the scatter is divided by the
+     * cube root of how many times the samples exceed a slice.
+     *
+     * @param slices the intervals of all slices
+     * @param times how many times the samples exceed a slice
+     * @return errors of the lower and the upper end; not numbers where a slice has too few samples
+     */
+    static double[] errors(List<Optional<ShortestInterval>> slices, double times) {
+        if (slices.stream().anyMatch(Optional::isEmpty)) {
             return new double[] {Double.NaN, Double.NaN};
         }
-        double[] low = new double[SLICES];
-        double[] high = new double[SLICES];
-        for (int i = 0; i < SLICES; i++) {
-            double[] slice = Arrays.copyOfRange(values, i * size, (i + 1) * size);
-            Arrays.sort(slice);
-            System.arraycopy(slice, 0, values, i * size, size);
-            int finite = finite(slice);
-            if (finite < LEAST_IN_SLICE) {
-                return new double[] {Double.NaN, Double.NaN};
-            }
-            ShortestInterval interval = of(new Sorted(slice, finite));
-            low[i] = interval.low();
-            high[i] = interval.high();
-        }
-        double shrink = StrictMath.cbrt((double) size / count);
+        double[] low = slices.stream().mapToDouble(slice -> slice.get().low()).toArray();
+        double[] high = slices.stream().mapToDouble(slice -> slice.get().high()).toArray();
+        double shrink = 1 / StrictMath.cbrt(times);
         return new double[] {
             Moments.of(low, SLICES).standardDeviation().value() * shrink,
             Moments.of(high, SLICES).standardDeviation().value() * shrink

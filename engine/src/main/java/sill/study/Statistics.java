@@ -12,8 +12,6 @@ import java.util.List;
  * @param quantiles at 0.00135, 0.025, 0.5, 0.975 and 0.99865
  * @param min the lowest sample
  * @param max the highest sample
- * @param resolution quantiles and interval ends are within this distance of those of all samples sorted; 0 up to
- *     1,048,576 samples
  * @param histogram the samples in classes
  */
 public record Statistics(
@@ -24,7 +22,6 @@ public record Statistics(
         List<Quantile> quantiles,
         double min,
         double max,
-        double resolution,
         Histogram histogram) {
     public Statistics {
         quantiles = List.copyOf(quantiles);

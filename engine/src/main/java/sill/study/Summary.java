@@ -31,25 +31,25 @@ final class Summary {
     Statistics statistics(double[] endErrors) {
         ShortestInterval interval = ShortestInterval.of(samples);
         double upper = interval.rank() + interval.span();
-        double resolution = Math.max(samples.resolution(interval.rank()), samples.resolution(upper));
         List<Quantile> quantiles = new ArrayList<>();
         for (double probability : PROBABILITIES) {
-            double value = samples.quantile(probability);
-            quantiles.add(new Quantile(probability, new Estimate(value, error(probability))));
-            resolution = Math.max(resolution, samples.resolution(samples.rank(probability)));
+            quantiles.add(new Quantile(probability, at(samples.rank(probability), error(probability))));
         }
         double lowError = Double.isNaN(endErrors[0]) ? error(probability(interval.rank())) : endErrors[0];
         double highError = Double.isNaN(endErrors[1]) ? error(probability(upper)) : endErrors[1];
         return new Statistics(
                 moments.mean(),
                 moments.standardDeviation(),
-                new Estimate(interval.low(), lowError),
-                new Estimate(interval.high(), highError),
+                at(interval.rank(), lowError),
+                at(upper, highError),
                 quantiles,
                 moments.min(),
                 moments.max(),
-                resolution,
                 histogram());
+    }
+
+    private Estimate at(double rank, double error) {
+        return new Estimate(samples.atRank(rank), error, samples.resolution(rank));
     }
 
     private double probability(double rank) {

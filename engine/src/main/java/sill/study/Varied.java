@@ -19,8 +19,12 @@ public record Varied(String name, double nominal, double low, double high, Sprea
     public Varied {
         Objects.requireNonNull(name, "name");
         Objects.requireNonNull(spread, "spread");
-        if (!(Double.isFinite(low) && Double.isFinite(high) && Double.isFinite(high - low))) {
+        if (!(Double.isFinite(low) && Double.isFinite(high))) {
             throw new IllegalArgumentException("limits of \"" + name + "\" must be finite, got " + low + " .. " + high);
+        }
+        if (!Double.isFinite(high - low)) {
+            throw new IllegalArgumentException(
+                    "limits of \"" + name + "\" must be finite and so must their distance, got " + low + " .. " + high);
         }
         if (!(low <= nominal && nominal <= high)) {
             throw new IllegalArgumentException(

@@ -40,6 +40,27 @@ class WorstCaseTest {
         assertThat(found.failures().count()).isZero();
     }
 
+    /**
+     * By interval reasoning: a comparator with input resistor a, feedback b, reference r and output low l trips at
+     * r + (r − l) a / b, and r stays above l; so it rises with r and a, falls with b and l.
+     */
+    @Test
+    void aComparatorsTripPointHasItsExtremesAtTwoCorners() {
+        WorstCase found = worst(
+                new Trial()
+                        .uniform("r", 5, 4.95, 5.05)
+                        .uniform("a", 8200, 8118, 8282)
+                        .uniform("b", 220e3, 217.8e3, 222.2e3)
+                        .uniform("l", 0.02, 0, 0.06),
+                (in, out) -> out[0] = in[0] * (1 + in[1] / in[2]) - in[3] * in[1] / in[2]);
+        assertThat(found.low().value()).isCloseTo(4.95 + 4.89 * 8118 / 222.2e3, within(1e-14));
+        assertThat(found.high().value()).isCloseTo(5.05 + 5.05 * 8282 / 217.8e3, within(1e-14));
+        assertThat(places(found.low())).containsExactly(Place.LOW, Place.LOW, Place.HIGH, Place.HIGH);
+        assertThat(places(found.high())).containsExactly(Place.HIGH, Place.HIGH, Place.LOW, Place.LOW);
+        assertThat(found.directions())
+                .containsExactly(Direction.RISING, Direction.RISING, Direction.FALLING, Direction.FALLING);
+    }
+
     /** Maximum power transfer theorem: a source of resistance R gives a load most, v² / 4 R, where the load is R too. */
     @Test
     void aMatchedLoadPeaksInsideTheBox() {

@@ -117,6 +117,17 @@ class PackageRulesTest {
     }
 
     @Test
+    void toleranceRunsAreNumericsAlone() {
+        classes()
+                .that()
+                .resideInAPackage("sill.study")
+                .should()
+                .onlyDependOnClassesThat()
+                .resideInAnyPackage("sill.study", "org.apache.commons.math3..", "org.apache.commons.rng..", "java..")
+                .check(HOUSE);
+    }
+
+    @Test
     void modelsAndRecordKnowNeitherCompilerNorWorker() {
         noClasses()
                 .that()
