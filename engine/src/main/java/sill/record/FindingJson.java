@@ -95,6 +95,7 @@ final class FindingJson {
         json.writeNumberField("high", found.high());
         numbers(json, "quantiles", found.quantiles());
         numbers(json, "standardErrors", found.errors());
+        json.writeNumberField("resolution", found.resolution());
         json.writeNumberField("min", found.min());
         json.writeNumberField("max", found.max());
         json.writeNumberField("notFinite", found.notFinite());

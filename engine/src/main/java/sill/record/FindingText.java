@@ -54,6 +54,11 @@ public final class FindingText {
                 "Standard deviation",
                 distance(found.sd()) + error(found.errors().get("sd")));
         figures.put("Shortest 95 % interval", range(found.low(), found.high()));
+        if (found.resolution() > 0) {
+            figures.put(
+                    "Counted in cells",
+                    "quantiles and interval within " + distance(found.resolution()) + " of all samples sorted");
+        }
         figures.put("Least, greatest", number(found.min()) + ", " + number(found.max()));
         return figures;
     }

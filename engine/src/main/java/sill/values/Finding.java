@@ -108,6 +108,7 @@ public record Finding(
      * @param quantiles by probability, as text
      * @param errors standard errors by sampling, by the name of the figure: {@code mean}, {@code sd}, {@code low}, {@code high} and
      *     each probability
+     * @param resolution quantiles and ends of the interval lie this near those of all samples sorted; 0 where they are those
      * @param notFinite samples that gave no finite number
      * @param thrown of these, samples that ended in an exception
      * @param shares of samples inside the limits of checks
@@ -121,6 +122,7 @@ public record Finding(
             double high,
             Map<String, Double> quantiles,
             Map<String, Double> errors,
+            double resolution,
             double min,
             double max,
             long notFinite,

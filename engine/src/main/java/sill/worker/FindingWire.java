@@ -75,7 +75,9 @@ final class FindingWire {
     private static void monteCarlo(WireOut out, Finding.MonteCarlo found) {
         out.number(found.samples()).whole(found.seed());
         out.real(found.mean()).real(found.sd()).real(found.low()).real(found.high());
-        out.map(found.quantiles(), WireOut::real).map(found.errors(), WireOut::real);
+        out.map(found.quantiles(), WireOut::real)
+                .map(found.errors(), WireOut::real)
+                .real(found.resolution());
         out.real(found.min()).real(found.max());
         out.whole(found.notFinite()).whole(found.thrown());
         out.real(found.histogram().from()).real(found.histogram().to());
@@ -95,6 +97,7 @@ final class FindingWire {
                 in.real(),
                 in.map(WireIn::real),
                 in.map(WireIn::real),
+                in.real(),
                 in.real(),
                 in.real(),
                 in.whole(),

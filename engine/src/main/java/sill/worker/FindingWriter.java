@@ -124,6 +124,7 @@ final class FindingWriter {
                     statistics.high().value(),
                     quantiles(statistics),
                     errors,
+                    resolution(statistics),
                     statistics.min(),
                     statistics.max(),
                     found.failures().count(),
@@ -131,6 +132,16 @@ final class FindingWriter {
                     histogram(statistics),
                     shares(found.shares(), shareLines));
         });
+    }
+
+    private static double resolution(Statistics statistics) {
+        double quantiles = statistics.quantiles().stream()
+                .mapToDouble(quantile -> quantile.estimate().resolution())
+                .max()
+                .orElse(0);
+        return Math.max(
+                quantiles,
+                Math.max(statistics.low().resolution(), statistics.high().resolution()));
     }
 
     private static void put(Map<String, Double> errors, String name, Estimate estimate) {

@@ -91,6 +91,7 @@ class JudgeTest {
                         6,
                         Map.of("0.5", 5.0),
                         Map.of(),
+                        0,
                         4,
                         6,
                         0,

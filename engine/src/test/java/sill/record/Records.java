@@ -91,6 +91,7 @@ public final class Records {
                 2.11,
                 new TreeMap<>(Map.of("0.00135", 1.85, "0.5", 2.01, "0.99865", 2.16)),
                 Map.of("mean", 0.0001, "sd", 0.0002),
+                0,
                 1.82,
                 2.19,
                 3,
