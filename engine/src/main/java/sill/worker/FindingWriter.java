@@ -9,6 +9,7 @@ import java.util.stream.Collectors;
 import sill.study.Doubt;
 import sill.study.Estimate;
 import sill.study.Extreme;
+import sill.study.Failures;
 import sill.study.Findings;
 import sill.study.MonteCarlo;
 import sill.study.Quantile;
@@ -42,25 +43,7 @@ final class FindingWriter {
     Finding write(StudyTarget target, Findings found, List<Integer> shareLines, Optional<Finding.Sweep> sweep) {
         List<String> remarks = new ArrayList<>(notes);
         found.rss().ifPresent(rss -> rss.doubts().stream().limit(1).forEach(doubt -> remarks.add(remark(doubt))));
-        found.worstCase().ifPresent(extremes -> {
-            if (extremes.failures().count() > 0) {
-                remarks.add(extremes.failures().count() + " of " + extremes.evaluations()
-                        + " points within the limits gave no finite value"
-                        + extremes.failures()
-                                .message()
-                                .map(first -> ", the first " + first)
-                                .orElse("") + ".");
-            }
-        });
-        found.monteCarlo().ifPresent(sampled -> {
-            if (sampled.failures().count() > 0) {
-                remarks.add(sampled.failures().count() + " of " + sampled.samples() + " samples gave no finite value"
-                        + sampled.failures()
-                                .message()
-                                .map(first -> ", the first " + first)
-                                .orElse("") + ".");
-            }
-        });
+        notFinite(found).ifPresent(remarks::add);
         return new Finding(
                 target.cell(),
                 target.index(),
@@ -78,6 +61,24 @@ final class FindingWriter {
                         .toList(),
                 sweep,
                 remarks);
+    }
+
+    /** How many repetitions gave no finite value, if some did not: a sentence. */
+    static Optional<String> notFinite(Findings found) {
+        Optional<String> samples =
+                found.monteCarlo().flatMap(sampled -> notFinite(sampled.failures(), sampled.samples(), "samples"));
+        return samples.or(() -> found.worstCase()
+                .flatMap(extremes ->
+                        notFinite(extremes.failures(), extremes.evaluations(), "points within the limits")));
+    }
+
+    private static Optional<String> notFinite(Failures failures, long all, String what) {
+        return failures.count() == 0
+                ? Optional.empty()
+                : Optional.of(failures.count() + " of " + all + " " + what + " gave no finite value"
+                        + failures.message()
+                                .map(first -> ", the first " + first)
+                                .orElse("") + ".");
     }
 
     private static String remark(Doubt doubt) {

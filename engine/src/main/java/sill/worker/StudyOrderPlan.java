@@ -102,8 +102,7 @@ final class StudyOrderPlan {
             if (withWindows) {
                 shares(target).forEach(share -> windows.add(new Window(share.low(), share.high())));
             }
-            String name = target.component().isEmpty() ? target.of() : target.of() + "." + target.component();
-            studied.add(new Studied(name, windows));
+            studied.add(new Studied(target.name(), windows));
         }
         return studied;
     }

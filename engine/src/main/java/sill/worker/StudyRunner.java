@@ -56,7 +56,8 @@ final class StudyRunner implements Studies {
     @Override
     public Outcome study(TranslatedSheet.Step step, List<Result> nominal) {
         try {
-            return new Outcome(findings(step, nominal), List.of());
+            List<Problem> problems = new ArrayList<>();
+            return new Outcome(findings(step, nominal, problems), problems);
         } catch (NotStudied e) {
             return new Outcome(List.of(), e.problems);
         } catch (InterruptedException e) {
@@ -64,8 +65,10 @@ final class StudyRunner implements Studies {
         }
     }
 
-    private List<Finding> findings(TranslatedSheet.Step step, List<Result> nominal)
+    private List<Finding> findings(TranslatedSheet.Step step, List<Result> nominal, List<Problem> problems)
             throws NotStudied, InterruptedException {
+        Map<Integer, Integer> lines = new HashMap<>();
+        nominal.forEach(result -> lines.put(result.index(), result.line()));
         List<StudyTarget> targets = new ArrayList<>();
         List<Slice.Output> outputs = new ArrayList<>();
         collect(step, nominal, targets, outputs);
@@ -94,7 +97,17 @@ final class StudyRunner implements Studies {
         FindingWriter writer = new FindingWriter(varied, notes(step.cell(), outputs));
         List<Finding> findings = new ArrayList<>();
         for (int i = 0; i < targets.size(); i++) {
-            findings.add(writer.write(targets.get(i), found.get(i), plans.shareLines(targets.get(i)), sweeps.get(i)));
+            StudyTarget target = targets.get(i);
+            FindingWriter.notFinite(found.get(i))
+                    .ifPresent(words -> problems.add(Problem.error(
+                            lines.get(target.index()),
+                            1,
+                            step.cell(),
+                            step.where() + ", " + Quoted.of(target.name()) + ": found "
+                                    + words.substring(0, words.length() - 1) + ", expected one in every repetition",
+                            "Guard the calculation where it fails, or narrow the limits that lead there. The figures are those"
+                                    + " of the others.")));
+            findings.add(writer.write(target, found.get(i), plans.shareLines(target), sweeps.get(i)));
         }
         return findings;
     }

@@ -55,6 +55,11 @@ record StudyTarget(int cell, int index, String of, String component, String unit
         return value instanceof Datum.Whole whole ? Optional.of(Double.valueOf(whole.digits())) : Optional.empty();
     }
 
+    /** What it is called: the expression, with a component behind a point. */
+    String name() {
+        return component.isEmpty() ? of : of + "." + component;
+    }
+
     /** What the slice is to give for an expression with these targets. */
     static Slice.Output output(ResultField field, List<StudyTarget> targets) {
         List<String> components = targets.stream()

@@ -118,7 +118,7 @@ class StudyRunTest {
 
     @Test
     void samplesThatThrowAreCounted() {
-        Finding found = only(run("""
+        RunResult result = run("""
                 :: calc D
                 double vMost = 10.25; // [V] stated
                 double picky(double v) {
@@ -131,7 +131,8 @@ class StudyRunTest {
                 :: tolerance T
                 of: checked
                 method: monte-carlo 4000 seed 1
-                """));
+                """);
+        Finding found = result.findings().get(0);
         Finding.MonteCarlo sampled = found.monteCarlo().orElseThrow();
 
         assertThat(sampled.thrown()).isBetween(850L, 1150L).isEqualTo(sampled.notFinite());
@@ -140,6 +141,13 @@ class StudyRunTest {
                 .containsExactly(
                         sampled.thrown()
                                 + " of 4000 samples gave no finite value, the first java.lang.IllegalStateException: too high.");
+        assertThat(result.problems())
+                .extracting(problem ->
+                        problem.line() + ":" + problem.column() + " " + problem.message() + " " + problem.hint())
+                .containsExactly("22:1 Cell 4 'T', 'checked': found " + sampled.thrown()
+                        + " of 4000 samples gave no finite value, the first java.lang.IllegalStateException: too high,"
+                        + " expected one in every repetition Guard the calculation where it fails, or narrow the limits"
+                        + " that lead there. The figures are those of the others.");
     }
 
     @Test
