@@ -59,6 +59,11 @@ public final class MathWriter {
         new MathWriter(page, links).write(pieces);
     }
 
+    /** Whether a formula writes a name letter by letter as Java does: without an index, and not as a Greek letter. */
+    public static boolean isAsTyped(String name) {
+        return Symbol.of(name).equals(new Symbol(name, ""));
+    }
+
     private void write(List<List<Box>> pieces) {
         for (int i = 0; i < pieces.size(); i++) {
             if (i > 0) {

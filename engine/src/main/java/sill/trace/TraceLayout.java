@@ -14,7 +14,9 @@ import sill.plot.TextWidth;
  * @param lines from what is used to what uses it, in steps of one layer
  */
 public record TraceLayout(double width, double height, List<Box> boxes, List<Line> lines) {
-    private static final double EDGE = 8;
+    /** What stands free around the drawing. */
+    static final double EDGE = 8;
+
     private static final double BOX_HEIGHT = 42;
     private static final double GAP = 10;
     private static final double LINE_HEIGHT = 2;

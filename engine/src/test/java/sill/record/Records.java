@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
+import sill.formula.Working;
 import sill.stdlib.Plot;
 import sill.values.CellState;
 import sill.values.Datum;
@@ -164,8 +165,39 @@ public final class Records {
                 List.of("vIn"));
     }
 
+    /** A value with its working. */
+    public static DesignRecord.ValueEntry worked(DesignRecord.ValueEntry value, Working working) {
+        return new DesignRecord.ValueEntry(
+                value.name(),
+                value.formula(),
+                value.type(),
+                value.value(),
+                value.unit(),
+                value.componentUnits(),
+                value.shown(),
+                value.shownFull(),
+                value.shownComponents(),
+                value.caption(),
+                value.at(),
+                value.line(),
+                value.uses(),
+                value.dependsOn(),
+                Optional.of(working));
+    }
+
     /** A record of one given cell with one given, and a calculation cell without results. */
     public static DesignRecord ofGivens(String source, CellState state) {
+        return ofGivens(source, state, given());
+    }
+
+    /** A record of one given cell with one given without limits. */
+    public static DesignRecord ofBareGiven(String name) {
+        DesignRecord.GivenEntry given = new DesignRecord.GivenEntry(
+                name, new Datum.Real(24), "V", "24 V", Optional.empty(), Optional.empty(), "", "", "supply", "1.1", 5);
+        return ofGivens("", CellState.DONE, given);
+    }
+
+    private static DesignRecord ofGivens(String source, CellState state, DesignRecord.GivenEntry given) {
         DesignRecord all = ofValues();
         return new DesignRecord(
                 all.outcome(),
@@ -177,7 +209,7 @@ public final class Records {
                 List.of(
                         new DesignRecord.CellEntry(1, "given", "A", 4, CellState.DONE, "", "", "vIn = 24 V"),
                         new DesignRecord.CellEntry(2, "calc", "B", 6, state, "", "", source)),
-                List.of(given()),
+                List.of(given),
                 List.of(),
                 List.of(),
                 List.of(),

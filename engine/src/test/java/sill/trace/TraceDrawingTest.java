@@ -3,6 +3,7 @@ package sill.trace;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.io.StringReader;
+import java.util.ArrayList;
 import java.util.List;
 import javax.xml.parsers.DocumentBuilderFactory;
 import org.junit.jupiter.api.Test;
@@ -12,8 +13,12 @@ import org.w3c.dom.NodeList;
 import org.xml.sax.InputSource;
 
 class TraceDrawingTest {
+    private static String svg(Trace trace) {
+        return TraceDrawing.of(trace, "t").svg("at-");
+    }
+
     private static Document parse(Trace trace) throws Exception {
-        String svg = TraceDrawing.svg(trace, "t", "at-");
+        String svg = svg(trace);
         return DocumentBuilderFactory.newInstance().newDocumentBuilder().parse(new InputSource(new StringReader(svg)));
     }
 
@@ -34,7 +39,10 @@ class TraceDrawingTest {
         assertThat(svg.getElementsByTagName("desc").item(0).getTextContent())
                 .isEqualTo("Lines lead from what is used, on the left, to what uses it: 2 givens, 1 result, 1 plot,"
                         + " 1 check. Each box leads to its line.");
-        assertThat(svg.getDocumentElement().getAttribute("aria-labelledby")).isEqualTo("t-title");
+        Element whole = (Element) svg.getElementsByTagName("g").item(0);
+        assertThat(whole.getAttribute("role")).isEqualTo("group");
+        assertThat(whole.getAttribute("aria-labelledby")).isEqualTo("t-title");
+        assertThat(whole.getAttribute("aria-describedby")).isEqualTo("t-desc");
     }
 
     @Test
@@ -59,16 +67,49 @@ class TraceDrawingTest {
 
     @Test
     void kindsDifferInShape() {
-        assertThat(TraceDrawing.svg(Traces.of("given a"), "t", "")).contains("rx=\"0\"");
-        assertThat(TraceDrawing.svg(Traces.of("result a"), "t", "")).contains("rx=\"10\"");
-        assertThat(TraceDrawing.svg(Traces.of("plot a"), "t", "").split("class=\"box\""))
-                .hasSize(3);
-        assertThat(TraceDrawing.svg(Traces.of("check a"), "t", "")).doesNotContain("<rect");
+        assertThat(svg(Traces.of("given a"))).contains("rx=\"0\"");
+        assertThat(svg(Traces.of("result a"))).contains("rx=\"10\"");
+        assertThat(svg(Traces.of("plot a")).split("class=\"box\"")).hasSize(3);
+        assertThat(svg(Traces.of("check a"))).doesNotContain("<rect");
+    }
+
+    @Test
+    void boxesOfAKindAreAGroupAndSayWhatTheyAreMadeFrom() throws Exception {
+        Document svg = parse(Traces.of("given a", "given b", "result c = a b", "plot d = c", "check e = c"));
+        List<String> groups = new ArrayList<>();
+        NodeList found = svg.getElementsByTagName("g");
+        for (int i = 0; i < found.getLength(); i++) {
+            Element group = (Element) found.item(i);
+            groups.add(group.getAttribute("aria-label") + " "
+                    + group.getElementsByTagName("a").getLength());
+        }
+        assertThat(groups).containsExactly(" 5", "Givens 2", "Results 1", "Plots 1", "Checks 1");
+        NodeList links = svg.getElementsByTagName("a");
+        assertThat(((Element) links.item(0)).getElementsByTagName("desc").getLength())
+                .isZero();
+        assertThat(((Element) links.item(2))
+                        .getElementsByTagName("desc")
+                        .item(0)
+                        .getTextContent())
+                .isEqualTo("made from a, b");
+    }
+
+    @Test
+    void aPartShowsASpanOfTheWhole() {
+        Trace trace = Traces.ofSize(60, 3);
+        TraceSheets sheets = TraceSheets.of(TraceLayout.of(trace));
+        List<String> parts = TraceDrawing.of(trace, "t").parts();
+        assertThat(parts).hasSameSizeAs(sheets.parts()).hasSizeGreaterThan(1);
+        assertThat(parts.get(0))
+                .startsWith("<svg class=\"trace-part\" viewBox=\"0 0 ")
+                .endsWith("<use href=\"#t-whole\"/></svg>");
+        assertThat(svg(trace)).contains("class=\"trace-drawing wide parted\"").contains("<g id=\"t-whole\" ");
+        assertThat(TraceDrawing.of(Traces.of("given a"), "t").parts()).isEmpty();
+        assertThat(svg(Traces.of("given a"))).contains("class=\"trace-drawing\"");
     }
 
     @Test
     void theSameTraceIsTheSameDrawing() {
-        assertThat(TraceDrawing.svg(Traces.ofSize(60, 3), "t", "at-"))
-                .isEqualTo(TraceDrawing.svg(Traces.ofSize(60, 3), "t", "at-"));
+        assertThat(svg(Traces.ofSize(60, 3))).isEqualTo(svg(Traces.ofSize(60, 3)));
     }
 }

@@ -1,6 +1,9 @@
 package sill.record.html;
 
+import java.util.ArrayList;
 import java.util.List;
+import sill.formula.Expression;
+import sill.formula.MathWriter;
 import sill.markup.Markup;
 import sill.record.DesignRecord.CellEntry;
 import sill.record.DesignRecord.GivenEntry;
@@ -19,7 +22,14 @@ final class Givens {
         page.open("table", "class", "stacking givens");
         page.leaf("caption", "Givens of cell " + cell.number(), "class", "unseen")
                 .line();
-        Tables.head(page, "At", "Name", "Value", "Limits", "Distribution", "Remark");
+        // A column that no given of the cell has anything in says nothing.
+        boolean limits = givens.stream().anyMatch(given -> !given.shownLimits().isEmpty());
+        boolean distributions =
+                givens.stream().anyMatch(given -> !given.distribution().isEmpty());
+        List<String> columns = new ArrayList<>(List.of("At", "Name", "Value", "Limits", "Distribution", "Remark"));
+        columns.removeIf(
+                column -> column.equals("Limits") && !limits || column.equals("Distribution") && !distributions);
+        Tables.head(page, columns.toArray(String[]::new));
         page.open("tbody").line();
         for (GivenEntry given : givens) {
             page.open("tr");
@@ -32,19 +42,29 @@ final class Givens {
             page.open("td", "class", "number" + Tables.length(brief), "data-label", "Value");
             value(page, given, brief);
             page.close();
-            Tables.cell(page, "Limits", "number", given.shownLimits());
-            Tables.cell(page, "Distribution", "word", given.distribution());
+            if (limits) {
+                Tables.cell(page, "Limits", "number", given.shownLimits());
+            }
+            if (distributions) {
+                Tables.cell(page, "Distribution", "word", given.distribution());
+            }
             remark(page, given, content.trace().isUnused(place));
             page.close().line();
         }
         page.close().close().line();
     }
 
-    /** The name, and on demand what uses it. */
+    /** The name, as formulas write it and as the worksheet does where that differs, and on demand what uses it. */
     private static void name(Markup page, GivenEntry given, RecordTrace trace, int place) {
         page.open("th", "scope", "row", "class", "name");
         page.open("details", "class", "traced").open("summary");
-        page.leaf("var", given.name()).close();
+        if (MathWriter.isAsTyped(given.name())) {
+            page.leaf("var", given.name());
+        } else {
+            MathWriter.first(page, new Expression.Name(given.name()));
+            page.text(" ").leaf("code", given.name());
+        }
+        page.close();
         TracePanel.write(page, trace, place);
         page.close().close();
     }

@@ -42,10 +42,21 @@ final class TraceSection {
                             "key")
                     .line();
             Tables.openScrolling(page, "Drawing of the trace");
-            page.trusted(TraceDrawing.svg(trace, "trace", Addresses.id(""))).line();
+            TraceDrawing drawing = TraceDrawing.of(trace, "trace");
+            page.trusted(drawing.svg(Addresses.id(""))).line();
             page.close().line();
+            parts(page, drawing.parts());
         }
         page.close().line();
+    }
+
+    /** On paper a drawing that would be too small stands on several sheets. */
+    private static void parts(Markup page, List<String> parts) {
+        for (int i = 0; i < parts.size(); i++) {
+            page.open("div", "class", "part", "aria-hidden", "true");
+            page.leaf("p", "Part " + (i + 1) + " of " + parts.size());
+            page.trusted(parts.get(i)).close().line();
+        }
     }
 
     private static void unused(Markup page, List<TraceNode> unused) {

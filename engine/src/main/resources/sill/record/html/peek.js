@@ -21,7 +21,7 @@
     const meaning = first('.meaning', 'td.remark', 'figcaption'), trace = first('.trace');
     add('p', 'peek-head', address, ' ' + address.closest('.cell').querySelector('h3').childNodes[1].data.trim());
     add('p', 'peek-value', ...(symbol?.matches('summary') ? symbol.childNodes : [symbol ?? '']),
-      symbol && value ? (symbol.querySelector('code') ? ': ' : ' = ') : '', value?.textContent.trim() ?? '');
+      symbol && value ? (line.className.startsWith('verdict') ? ': ' : ' = ') : '', value?.textContent.trim() ?? '');
     if (meaning) add('p', 'meaning', meaning.textContent);
     if (trace) panel.append(trace.cloneNode(true));
     if (byKey) add('p', 'peek-keys', 'Enter: to line ' + address.textContent + '. Arrow down: into this box. Escape: close.');

@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.stream.IntStream;
 import org.jsoup.Jsoup;
 import org.jsoup.nodes.Document;
@@ -12,6 +13,8 @@ import org.jsoup.nodes.Element;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import sill.formula.Expression;
+import sill.formula.Working;
 import sill.record.DesignRecord;
 import sill.record.DesignRecord.Verdict;
 import sill.record.RecordJson;
@@ -264,6 +267,46 @@ class RecordPageTest {
         assertThat(page(Records.ofGivens("double a = vIn2 / 2;", CellState.PROBLEM))
                         .select(".unused"))
                 .hasSize(1);
+    }
+
+    /** A reader of a formula must find the given, and a reader of the worksheet too. */
+    @ParameterizedTest
+    @CsvSource({
+        "vIn, <math><msub><mi>v</mi><mi>In</mi></msub></math> <code>vIn</code>",
+        "kappa, <math><mi>κ</mi></math> <code>kappa</code>",
+        "band, <var>band</var>",
+        "n, <var>n</var>"
+    })
+    void aGivensNameIsShownAsFormulasAndAsTheWorksheetWriteIt(String name, String shown) {
+        assertThat(RecordPage.write(Records.ofBareGiven(name))).contains("<summary>" + shown + "</summary>");
+    }
+
+    @Test
+    void columnsThatNoGivenOfTheCellNeedsAreLeftOut() {
+        Document bare = page(Records.ofBareGiven("n"));
+        assertThat(bare.select(".givens thead th").eachText()).containsExactly("At", "Name", "Value", "Remark");
+        assertThat(bare.select(".givens tbody tr").first().children()).hasSize(4);
+        Document limited = page(Records.ofGivens("", CellState.DONE));
+        assertThat(limited.select(".givens thead th").eachText())
+                .containsExactly("At", "Name", "Value", "Limits", "Distribution", "Remark");
+        assertThat(limited.select(".givens tbody tr").first().children()).hasSize(6);
+    }
+
+    @Test
+    void aNameOfAFormulaLeadsToItsLineUnlessItIsThisOne() {
+        DesignRecord.ValueEntry value = Records.value("v", new Datum.Real(2), "2.000 V");
+        Expression sum =
+                new Expression.Arithmetic(Expression.Operator.PLUS, new Expression.Name("v"), new Expression.Name("w"));
+        Working working = new Working(List.of(
+                new Working.Line(Optional.of(new Expression.Name("v")), Optional.of(sum), Optional.empty(), ""),
+                new Working.Line(Optional.of(new Expression.Name("w")), Optional.of(sum), Optional.empty(), "")));
+        String page = RecordPage.write(Records.ofValues(Records.worked(value, working), Records.valueAt("w", "1.2")));
+        assertThat(page)
+                .contains("<span class=\"side formula\"><math><mo form=\"infix\">=</mo><mi>v</mi>"
+                        + "<mo form=\"infix\">+</mo><mi><a href=\"#at-1.2\">w</a></mi></math></span>")
+                // A helper's own names.
+                .contains("<span class=\"side formula\"><math><mo form=\"infix\">=</mo><mi>v</mi>"
+                        + "<mo form=\"infix\">+</mo><mi>w</mi></math></span>");
     }
 
     @Test

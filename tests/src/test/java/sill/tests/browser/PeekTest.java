@@ -172,6 +172,8 @@ class PeekTest {
         WebElement panel = shown();
         assertThat(panel.getText()).isEqualTo("""
                         1.1 Supply and parts
+                        v
+                        Supply
                         vSupply = 24 V
                         cabinet supply
                         Used by
@@ -292,7 +294,7 @@ class PeekTest {
         new Actions(browser.driver())
                 .moveToElement(browser.driver().findElement(By.cssSelector(".result .trace a[href='#at-1.2']")))
                 .perform();
-        assertThat(shown().getText()).startsWith("1.2 Supply and parts\nrTop = 10 kΩ\nUsed by\nvOut");
+        assertThat(shown().getText()).startsWith("1.2 Supply and parts\nr\nTop\nrTop = 10 kΩ\nUsed by\nvOut");
     }
 
     @ParameterizedTest
