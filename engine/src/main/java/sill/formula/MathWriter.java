@@ -12,14 +12,14 @@ import sill.markup.Markup;
  * between them as it does between words; browsers do not break inside one.
  */
 public final class MathWriter {
-    /** Where the names of a formula lead. */
+    /** Where the names of a formula are set. */
     @FunctionalInterface
-    public interface Links {
-        /** The address of the place where a name is set, as a link states it; empty for a name that leads nowhere. */
-        String href(String name);
+    public interface Places {
+        /** The id of the place where a name is set; empty for a name that leads nowhere. */
+        String of(String name);
     }
 
-    private static final Links NOWHERE = name -> "";
+    private static final Places NOWHERE = name -> "";
 
     /** A shorter formula stays whole. */
     private static final int SHORT = 16;
@@ -28,11 +28,11 @@ public final class MathWriter {
     private static final int LONG_PIECE = 36;
 
     private final Markup page;
-    private final Links links;
+    private final Places places;
 
-    private MathWriter(Markup page, Links links) {
+    private MathWriter(Markup page, Places places) {
         this.page = page;
-        this.links = links;
+        this.places = places;
     }
 
     /** Writes the first side of an equation. */
@@ -40,9 +40,9 @@ public final class MathWriter {
         first(page, expression, NOWHERE);
     }
 
-    /** Writes the first side of an equation, its names as links. */
-    public static void first(Markup page, Expression expression, Links links) {
-        new MathWriter(page, links).write(pieces(Layout.side(expression)));
+    /** Writes the first side of an equation, each name with its place for a class. */
+    public static void first(Markup page, Expression expression, Places places) {
+        new MathWriter(page, places).write(pieces(Layout.side(expression)));
     }
 
     /** Writes a further side with its equals sign, from which no line break parts it. */
@@ -50,13 +50,13 @@ public final class MathWriter {
         next(page, expression, NOWHERE);
     }
 
-    /** Writes a further side with its equals sign, its names as links. */
-    public static void next(Markup page, Expression expression, Links links) {
+    /** Writes a further side with its equals sign, each name with its place for a class. */
+    public static void next(Markup page, Expression expression, Places places) {
         List<List<Box>> pieces = new ArrayList<>(pieces(Layout.side(expression)));
         List<Box> start = new ArrayList<>(pieces.get(0));
         start.add(0, new Token(Style.BETWEEN, "="));
         pieces.set(0, start);
-        new MathWriter(page, links).write(pieces);
+        new MathWriter(page, places).write(pieces);
     }
 
     /** Whether a formula writes a name letter by letter as Java does: without an index, and not as a Greek letter. */
@@ -184,14 +184,13 @@ public final class MathWriter {
     }
 
     private void token(Token token, boolean tall) {
-        String href = token.name().isEmpty() ? "" : links.href(token.name());
-        String reach = href.isEmpty() ? "" : Reach.of(token.text());
+        String place = token.name().isEmpty() ? "" : places.of(token.name());
         page.open(token.style().element());
         switch (token.style()) {
-            case WORD -> page.with("class", "word" + reach);
+            case WORD -> page.with("class", place.isEmpty() ? "word" : "word " + place);
             case LETTER -> {
-                if (!reach.isEmpty()) {
-                    page.with("class", reach.strip());
+                if (!place.isEmpty()) {
+                    page.with("class", place);
                 }
             }
             case UPRIGHT -> {
@@ -210,11 +209,8 @@ public final class MathWriter {
         }
         if (token.style() == Style.APPLICATION) {
             page.trusted("&#x2061;");
-        } else if (href.isEmpty()) {
-            page.text(token.text());
         } else {
-            // MathML has no links of its own; HTML's may stand inside its tokens, and only there.
-            page.leaf("a", token.text(), "href", href);
+            page.text(token.text());
         }
         page.close();
     }

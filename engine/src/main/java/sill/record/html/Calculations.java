@@ -35,7 +35,7 @@ final class Calculations {
         boolean inOwnWords = value.shown().isEmpty() || Values.isTable(value.value());
         String shown = inOwnWords ? Values.brief(value.value(), value.unit()) : value.shown();
         if (value.working().isPresent()) {
-            Workings.line(page, value.working().get().lines().get(0), name -> trace.hrefFrom(value.at(), name));
+            Workings.line(page, value.working().get().lines().get(0), name -> trace.placeFrom(value.at(), name));
         } else {
             source(page, value, shown);
         }

@@ -99,12 +99,12 @@ final class RecordTrace {
         return places.get(key(kind, at));
     }
 
-    /** The link from the line at an address to the one where a name is set; empty when that is the same line or none. */
-    String hrefFrom(String at, String name) {
+    /** The id of the line where a name is set that another line mentions; empty when that is the same line or none. */
+    String placeFrom(String at, String name) {
         return trace.named(name)
                 .map(TraceNode::at)
                 .filter(set -> !set.equals(at))
-                .map(Addresses::href)
+                .map(Addresses::id)
                 .orElse("");
     }
 

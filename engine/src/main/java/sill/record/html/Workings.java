@@ -12,18 +12,18 @@ final class Workings {
     private static final String EQUALS = " =\u00A0";
 
     /** Names of a helper's formula are its own, and numbers have none. */
-    private static final MathWriter.Links NOWHERE = name -> "";
+    private static final MathWriter.Places NOWHERE = name -> "";
 
     private Workings() {}
 
-    /** Name, formula and numbers, up to the equals sign before the result; the formula's names lead to their lines. */
-    static void line(Markup page, Working.Line line, MathWriter.Links links) {
+    /** Name, formula and numbers, up to the equals sign before the result; the formula's names tell where they are set. */
+    static void line(Markup page, Working.Line line, MathWriter.Places places) {
         line.left().ifPresent(left -> first(page, "name", left, NOWHERE));
         line.formula().ifPresent(formula -> {
             if (line.left().isPresent()) {
-                next(page, "formula", formula, links);
+                next(page, "formula", formula, places);
             } else {
-                first(page, "formula", formula, links);
+                first(page, "formula", formula, places);
             }
         });
         line.numbers().ifPresent(numbers -> next(page, "numbers", numbers, NOWHERE));
@@ -53,15 +53,15 @@ final class Workings {
         page.close();
     }
 
-    private static void first(Markup page, String kind, Expression expression, MathWriter.Links links) {
+    private static void first(Markup page, String kind, Expression expression, MathWriter.Places places) {
         page.open("span", "class", "side " + kind);
-        MathWriter.first(page, expression, links);
+        MathWriter.first(page, expression, places);
         page.close();
     }
 
-    private static void next(Markup page, String kind, Expression expression, MathWriter.Links links) {
+    private static void next(Markup page, String kind, Expression expression, MathWriter.Places places) {
         page.single("wbr").open("span", "class", "side " + kind);
-        MathWriter.next(page, expression, links);
+        MathWriter.next(page, expression, places);
         page.close();
     }
 }

@@ -1,17 +1,23 @@
-// Shows beside a name what the page tells of it, copied from the line where it is set; without this script names just lead there.
+// Shows beside a name what the page tells of it, copied from the line where it is set. Names are the links of the trace lists, and
+// in formulas the symbols whose class is the place where they are set; without this script the lists' links lead there.
 (() => {
-  const OPENS_AFTER = 200, CLOSES_AFTER = 300, GAP = 6;
+  const NAME = 'math [class*="at-"]', OPENS_AFTER = 200, CLOSES_AFTER = 300, GAP = 6;
   let name, panel, timer, away = true, touched, before, quiet = false;
 
   const inPanel = node => panel?.contains(node);
-  const nameAt = node => inPanel(node) ? null : node.closest('math a, .trace a');
+  const placeOf = name => name.hash ? name.hash.slice(1) : [...name.classList].find(each => each.startsWith('at-'));
+  const nameAt = node => {
+    const symbol = node.closest('msub') ?? node.closest('mi');
+    if (inPanel(node)) return null;
+    return node.closest('.trace a') ?? (symbol?.matches(NAME) ? symbol : symbol?.querySelector(NAME)) ?? null;
+  };
   const later = (act, wait) => { clearTimeout(timer); timer = setTimeout(act, wait); };
   const add = (tag, cssClass, ...parts) => {
     const added = panel.appendChild(document.createElement(tag));
     added.className = cssClass;
     parts.forEach(part => added.append(part.cloneNode?.(true) ?? part));
   };
-  const focusName = () => { quiet = true; name.focus(); quiet = false; };
+  const focusName = () => { quiet = true; name.focus?.(); quiet = false; };
 
   function fill(address, byKey) {
     const line = address.closest('.line, tr');
@@ -29,10 +35,11 @@
   }
 
   function open(link, byKey) {
-    const address = document.getElementById(link.hash.slice(1)), symbol = link.closest('msub') ?? link;
+    const address = document.getElementById(placeOf(link)), symbol = link.closest('msub') ?? link;
     close();
     name = link;
-    name.setAttribute('aria-expanded', 'true');
+    if (link.hash) name.setAttribute('aria-expanded', 'true');
+    name.classList.add('peeked');
     panel = document.querySelector('main').appendChild(document.createElement('div'));
     panel.className = 'peek';
     panel.setAttribute('role', 'group');
@@ -48,6 +55,7 @@
     clearTimeout(timer);
     if (inPanel(document.activeElement)) focusName();
     name?.removeAttribute('aria-expanded');
+    name?.classList.remove('peeked');
     panel?.remove();
     name = panel = null;
   }
@@ -70,9 +78,12 @@
   document.addEventListener('click', event => {
     const link = nameAt(event.target);
     if (link && touched && event.detail && link !== before) {
-      // The first tap shows the panel, a second one follows the link.
+      // The first tap shows the panel, a second one goes there.
       event.preventDefault();
       open(link);
+    } else if (link && !link.hash) {
+      close();
+      location.hash = placeOf(link);
     } else if (event.target.closest('a')) close();
   });
   document.addEventListener('focusin', ({ target }) => {

@@ -293,7 +293,7 @@ class RecordPageTest {
     }
 
     @Test
-    void aNameOfAFormulaLeadsToItsLineUnlessItIsThisOne() {
+    void aNameOfAFormulaTellsItsPlaceUnlessItIsThisLine() {
         DesignRecord.ValueEntry value = Records.value("v", new Datum.Real(2), "2.000 V");
         Expression sum =
                 new Expression.Arithmetic(Expression.Operator.PLUS, new Expression.Name("v"), new Expression.Name("w"));
@@ -303,7 +303,7 @@ class RecordPageTest {
         String page = RecordPage.write(Records.ofValues(Records.worked(value, working), Records.valueAt("w", "1.2")));
         assertThat(page)
                 .contains("<span class=\"side formula\"><math><mo form=\"infix\">=</mo><mi>v</mi>"
-                        + "<mo form=\"infix\">+</mo><mi><a href=\"#at-1.2\">w</a></mi></math></span>")
+                        + "<mo form=\"infix\">+</mo><mi class=\"at-1.2\">w</mi></math></span>")
                 // A helper's own names.
                 .contains("<span class=\"side formula\"><math><mo form=\"infix\">=</mo><mi>v</mi>"
                         + "<mo form=\"infix\">+</mo><mi>w</mi></math></span>");

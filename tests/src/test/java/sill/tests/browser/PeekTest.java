@@ -1,7 +1,6 @@
 package sill.tests.browser;
 
 import static org.assertj.core.api.Assertions.assertThat;
-import static org.assertj.core.api.Assertions.within;
 
 import java.io.ByteArrayOutputStream;
 import java.io.PrintStream;
@@ -9,8 +8,6 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Duration;
-import java.util.ArrayList;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import org.junit.jupiter.api.AfterAll;
@@ -30,7 +27,7 @@ import org.openqa.selenium.support.ui.ExpectedConditions;
 import org.openqa.selenium.support.ui.WebDriverWait;
 import sill.cli.Main;
 
-/** Names in formulas: links to where they are set, and on hover, focus or tap what the page tells of them. */
+/** Names in formulas and trace lists: on hover, focus or tap what the page tells of them. */
 @TestInstance(TestInstance.Lifecycle.PER_CLASS)
 class PeekTest {
     private static final String SHEET = """
@@ -51,7 +48,10 @@ class PeekTest {
             width at most 3 | REQ-01
             """;
 
-    private static final By SUPPLY = By.cssSelector("math a[href='#at-1.1']");
+    private static final By SUPPLY = By.cssSelector("math .at-1\\.1");
+    /** The same name in the trace list of a result. */
+    private static final By LISTED = By.cssSelector(".result .trace a[href='#at-1.1']");
+
     private static final By PANEL = By.cssSelector(".peek");
 
     private Path page;
@@ -79,89 +79,17 @@ class PeekTest {
     @Test
     void eachNameOfAFormulaLeadsToItsLine() {
         browser.open(page, 1200, "light");
-        assertThat(browser.evaluate(
-                        "[...document.querySelectorAll('.formula')].map(side => [...side.querySelectorAll('a')]"
-                                + ".map(a => a.textContent + ' ' + a.hash).join(', '))"))
+        assertThat(browser.evaluate("[...document.querySelectorAll('.formula')].map(side =>"
+                        + " [...side.querySelectorAll('[class*=at-]')].map(name =>"
+                        + " name.textContent + ' ' + name.className.replace('word ', '')).join(', '))"))
                 .isEqualTo(List.of(
-                        "v #at-1.1, r #at-1.2, r #at-1.3",
+                        "v at-1.1, r at-1.2, r at-1.3",
                         // Names of the helper's own formula.
                         "",
-                        "v #at-2.1, κ #at-1.4, v #at-1.1, κ #at-1.4, v #at-2.1, v #at-1.1",
-                        "steps #at-2.2, gains #at-1.5"));
-        assertThat(browser.evaluate("document.querySelectorAll('.side:not(.formula) a').length"))
+                        "v at-2.1, κ at-1.4, v at-1.1, κ at-1.4, v at-2.1, v at-1.1",
+                        "steps at-2.2, gains at-1.5"));
+        assertThat(browser.evaluate("document.querySelectorAll('.side:not(.formula) [class*=at-]').length"))
                 .isEqualTo(0L);
-    }
-
-    @Test
-    void itIsValidHtml() throws Exception {
-        assertThat(HtmlValidator.complaints(Files.readString(page))).isEmpty();
-    }
-
-    /** Against the same page with the links taken out of its formulas; two pixels are less than a line's gap. */
-    @Test
-    void formulasLookAsTheyDoWithoutLinks() throws Exception {
-        String text = Files.readString(page).replaceAll("(<mi[^>]*>)<a [^>]*>([^<]*)</a></mi>", "$1$2</mi>");
-        Path plain = Files.writeString(
-                page.resolveSibling("plain.html"),
-                text.replaceAll("( up| down)+\">", "\">").replaceAll("<mi class=\"(up|down|up down)\">", "<mi>"));
-        String boxes = "[...document.querySelectorAll('math')].flatMap(math => [math.getBoundingClientRect().width,"
-                + " math.getBoundingClientRect().height])";
-        browser.open(plain, 1200, "light");
-        List<?> expected = (List<?>) browser.evaluate(boxes);
-        assertThat(browser.evaluate("document.querySelectorAll('math a').length"))
-                .isEqualTo(0L);
-        browser.open(page, 1200, "light");
-        List<?> linked = (List<?>) browser.evaluate(boxes);
-        assertThat(linked).hasSameSizeAs(expected).hasSizeGreaterThan(20);
-        for (int i = 0; i < linked.size(); i++) {
-            assertThat(((Number) linked.get(i)).doubleValue())
-                    .as("size %s of %s", i, linked)
-                    .isCloseTo(((Number) expected.get(i)).doubleValue(), within(2.0));
-        }
-        assertThat(browser.evaluate("getComputedStyle(document.querySelector('math a')).textDecorationLine"))
-                .isEqualTo("none");
-        assertThat(browser.evaluate("getComputedStyle(document.querySelector('math a')).color"
-                        + " === getComputedStyle(document.querySelector('math')).color"))
-                .isEqualTo(true);
-    }
-
-    /** The texts that the browser hands to assistive technology, formula by formula. */
-    @Test
-    void aScreenReadersTextIsThatWithoutLinks() {
-        browser.open(page, 1200, "light");
-        List<String> linked = mathTexts();
-        assertThat(linked).contains("=output\u2061(𝑣Supply,𝑟Top,𝑟Bottom)");
-        browser.evaluate("document.querySelectorAll('math a').forEach(a => a.replaceWith(a.textContent))");
-        assertThat(linked).isEqualTo(mathTexts());
-    }
-
-    private List<String> mathTexts() {
-        browser.driver().executeCdpCommand("Accessibility.enable", Map.of());
-        Map<String, Object> tree = browser.driver().executeCdpCommand("Accessibility.getFullAXTree", Map.of());
-        Map<Object, Map<?, ?>> nodes = new LinkedHashMap<>();
-        ((List<?>) tree.get("nodes")).forEach(node -> nodes.put(((Map<?, ?>) node).get("nodeId"), (Map<?, ?>) node));
-        List<String> texts = new ArrayList<>();
-        for (Map<?, ?> node : nodes.values()) {
-            if (of(node, "role").equals("MathMLMath")) {
-                texts.add(text(nodes, node));
-            }
-        }
-        return texts;
-    }
-
-    private static String text(Map<Object, Map<?, ?>> nodes, Map<?, ?> node) {
-        if (of(node, "role").equals("StaticText")) {
-            return of(node, "name");
-        }
-        StringBuilder text = new StringBuilder();
-        for (Object child : (List<?>) node.get("childIds")) {
-            text.append(nodes.containsKey(child) ? text(nodes, nodes.get(child)) : "");
-        }
-        return text.toString();
-    }
-
-    private static String of(Map<?, ?> node, String property) {
-        return node.get(property) instanceof Map<?, ?> value ? String.valueOf(value.get("value")) : "";
     }
 
     @Test
@@ -180,7 +108,7 @@ class PeekTest {
                         vOut; steps; width
                         and so by
                         step; width at most 3""");
-        assertThat(name.getAttribute("aria-expanded")).isEqualTo("true");
+        assertThat(name.getAttribute("class")).isEqualTo("at-1.1 peeked");
         new Actions(browser.driver())
                 .moveToElement(panel)
                 .pause(Duration.ofMillis(600))
@@ -192,15 +120,14 @@ class PeekTest {
                 .moveToElement(browser.driver().findElement(By.tagName("h1")))
                 .perform();
         gone();
-        assertThat(name.getAttribute("aria-expanded")).isNull();
+        assertThat(name.getAttribute("class")).isEqualTo("at-1.1");
     }
 
-    /** The whole symbol is the link, its index too. */
+    /** The whole symbol tells, its index too. */
     @Test
-    void theIndexBelongsToTheLink() {
+    void theIndexBelongsToTheName() {
         browser.open(page, 1200, "light");
-        WebElement index =
-                browser.driver().findElement(By.xpath("//*[local-name()='msub'][*/*[@href='#at-1.1']]/*[2]"));
+        WebElement index = browser.driver().findElement(By.xpath("//*[local-name()='msub'][*[@class='at-1.1']]/*[2]"));
         new Actions(browser.driver()).moveToElement(index).perform();
         assertThat(shown().getText()).startsWith("1.1 Supply and parts");
         new Actions(browser.driver()).moveToElement(index).click().perform();
@@ -212,7 +139,7 @@ class PeekTest {
     void aResultTellsWhatItRestsOnDownToTheGivens() {
         browser.open(page, 1200, "light");
         new Actions(browser.driver())
-                .moveToElement(browser.driver().findElement(By.cssSelector("math a[href='#at-2.2']")))
+                .moveToElement(browser.driver().findElement(By.cssSelector("math .at-2\\.2")))
                 .perform();
         assertThat(shown().getText()).isEqualTo("""
                         2.2 Output
@@ -243,9 +170,11 @@ class PeekTest {
     @Test
     void byKeyboardInAndOut() {
         browser.open(page, 1200, "light");
-        WebElement name = tabTo(SUPPLY);
+        browser.evaluate("document.querySelector('.result').open = true");
+        WebElement name = tabTo(LISTED);
         assertThat(shown().getText()).endsWith("Enter: to line 1.1. Arrow down: into this box. Escape: close.");
-        assertThat(browser.evaluate("getComputedStyle(document.activeElement, '::after').outlineStyle"))
+        assertThat(name.getAttribute("aria-expanded")).isEqualTo("true");
+        assertThat(browser.evaluate("getComputedStyle(document.activeElement).outlineStyle"))
                 .isEqualTo("solid");
         name.sendKeys(Keys.ARROW_DOWN);
         assertThat(focused().getText()).isEqualTo("1.1");
@@ -272,7 +201,7 @@ class PeekTest {
     void aTapTellsAndASecondOneFollows() {
         browser.open(page, 400, "dark");
         WebElement name = browser.driver().findElement(SUPPLY);
-        browser.evaluate("document.querySelector(\"math a[href='#at-1.1']\").scrollIntoView({block: 'center'})");
+        browser.evaluate("document.querySelector('math .at-1\\\\.1').scrollIntoView({block: 'center'})");
         tap(name);
         WebElement panel = shown();
         assertThat(browser.evaluate("location.hash")).isEqualTo("");
@@ -301,7 +230,7 @@ class PeekTest {
     @CsvSource({"1200, light", "400, dark"})
     void nothingInTheWayOfAReader(int width, String scheme) {
         browser.open(page, width, scheme);
-        tabTo(SUPPLY);
+        hover(SUPPLY);
         shown();
         assertThat(Axe.violations(browser)).isEmpty();
         assertThat(browser.evaluate("document.documentElement.scrollWidth <= document.documentElement.clientWidth ? []"
@@ -311,17 +240,17 @@ class PeekTest {
     }
 
     @Test
-    void withoutAScriptTheNameIsALink() {
+    void withoutAScriptTheListsHaveLinks() {
         browser.driver().executeCdpCommand("Emulation.setScriptExecutionDisabled", Map.of("value", true));
         try {
             browser.open(page, 1200, "light");
-            WebElement name = browser.driver().findElement(SUPPLY);
             new Actions(browser.driver())
-                    .moveToElement(name)
+                    .moveToElement(browser.driver().findElement(SUPPLY))
                     .pause(Duration.ofMillis(500))
                     .perform();
             assertThat(browser.driver().findElements(PANEL)).isEmpty();
-            new Actions(browser.driver()).click().perform();
+            browser.driver().findElement(By.cssSelector(".result summary")).click();
+            browser.driver().findElement(LISTED).click();
             assertThat(browser.driver().getCurrentUrl()).endsWith("#at-1.1");
         } finally {
             browser.driver().executeCdpCommand("Emulation.setScriptExecutionDisabled", Map.of("value", false));
@@ -331,15 +260,15 @@ class PeekTest {
     @Test
     void nothingOfItShowsOnPaper() {
         browser.open(page, 1200, "light");
-        tabTo(SUPPLY);
+        hover(SUPPLY);
         WebElement panel = shown();
         browser.driver()
                 .executeCdpCommand("Emulation.setEmulatedMedia", Map.of("media", "print", "features", List.of()));
         try {
             assertThat(panel.isDisplayed()).isFalse();
-            assertThat(browser.evaluate("getComputedStyle(document.querySelector('math a[aria-expanded]'), '::after')"
-                            + ".content"))
-                    .isEqualTo("none");
+            assertThat(browser.evaluate("getComputedStyle(document.querySelector('math .peeked')).color"
+                            + " === getComputedStyle(document.querySelector('math')).color"))
+                    .isEqualTo(true);
         } finally {
             browser.driver()
                     .executeCdpCommand("Emulation.setEmulatedMedia", Map.of("media", "", "features", List.of()));
@@ -350,11 +279,17 @@ class PeekTest {
     @Test
     void nothingMoves() {
         browser.open(page, 1200, "light");
-        tabTo(SUPPLY);
+        hover(SUPPLY);
         shown();
         assertThat(browser.evaluate("document.getAnimations().length")).isEqualTo(0L);
         assertThat(browser.evaluate("getComputedStyle(document.querySelector('.peek')).transitionDuration"))
                 .isEqualTo("0s");
+    }
+
+    private void hover(By place) {
+        new Actions(browser.driver())
+                .moveToElement(browser.driver().findElement(place))
+                .perform();
     }
 
     private WebElement shown() {
