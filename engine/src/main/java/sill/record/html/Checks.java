@@ -52,8 +52,8 @@ final class Checks {
         TracePanel.write(page, trace, trace.place(TraceKind.CHECK, check.at()));
         page.close().text(" ");
         page.leaf("span", basis(check, trace), "class", "basis").close();
-        Tables.cell(page, "Value", "number", check.shownValue());
-        Tables.cell(page, "Limit", "number", check.shownLimit());
+        judged(page, check, "Value", check.shownValue());
+        judged(page, check, "Limit", check.shownLimit());
         margin(page, check);
         page.open("td", "data-label", "Verdict");
         page.open("span", "class", "verdict");
@@ -77,6 +77,15 @@ final class Checks {
             case "share" -> "in a share of samples";
             default -> check.basis();
         };
+    }
+
+    /** What is said of a share of samples is long, and may break. */
+    private static void judged(Markup page, CheckEntry check, String column, String shown) {
+        if (check.basis().equals("share") && !shown.isEmpty()) {
+            page.leaf("td", shown, "class", "number", "data-label", column);
+        } else {
+            Tables.cell(page, column, "number", shown);
+        }
     }
 
     private static void margin(Markup page, CheckEntry check) {
