@@ -93,9 +93,12 @@ public final class SheetRun implements AutoCloseable {
         } catch (IOException e) {
             // The worker is gone already: the next report says how.
         }
+        long begun = System.nanoTime();
         while (true) {
             Duration limit = at.cell() == 0 ? limits.translationTime() : limits.cellTime();
-            WorkerProcess.Heard heard = worker.next(limit);
+            // What a cell says of its progress gives it no more time.
+            Duration left = limit.minusNanos(System.nanoTime() - begun);
+            WorkerProcess.Heard heard = worker.next(left.isNegative() ? Duration.ZERO : left);
             if (heard.timedOut()) {
                 return Optional.of(Gathered.Stop.at(at, "it took longer than " + words(limit), TOO_LONG));
             }
@@ -106,9 +109,10 @@ public final class SheetRun implements AutoCloseable {
                 return Optional.of(Gathered.Stop.at(at, end.words(), ours ? REPORT : end.hint()));
             }
             Report report = heard.report().orElseThrow();
-            if (report instanceof Report.Begun begun) {
-                at = begun;
-                progress.begins(begun.cell());
+            if (report instanceof Report.Begun step) {
+                at = step;
+                begun = System.nanoTime();
+                progress.begins(step.cell());
             } else if (report instanceof Report.Failed failed) {
                 return Optional.of(Gathered.Stop.at(at, failed.what(), failed.hint()));
             } else if (report instanceof Report.Studied studied) {

@@ -78,6 +78,31 @@ class SheetRunTest {
                                 + " > Look for a loop without an end, or allow more with --time-limit.");
     }
 
+    /** That it tells how far it is gives it no more time. */
+    @Test
+    void aToleranceCellThatTakesTooLongIsStopped() {
+        RunResult run = Sheets.inWorker("""
+                sill 1
+                title: T
+                :: given G
+                vIn = 5 V ± 1 %
+                :: calc C
+                double v = 2 * vIn;
+                :: tolerance Long
+                of: v
+                method: monte-carlo 1000000000 seed 1
+                :: tolerance Short
+                of: v
+                method: monte-carlo 1000 seed 1
+                """, new Limits(Duration.ofSeconds(3), 256));
+
+        assertThat(states(run)).containsExactly("done", "stopped", "done");
+        assertThat(run.findings()).hasSize(1);
+        assertThat(problems(run))
+                .containsExactly("7:1 cell 3: Cell 3 'Long': stopped, it took longer than 3 s"
+                        + " > Look for a loop without an end, or allow more with --time-limit.");
+    }
+
     @Test
     void aCellThatTakesAllMemoryIsStopped() {
         RunResult run = Sheets.inWorker(
