@@ -4,6 +4,7 @@ import java.math.BigDecimal;
 import java.math.RoundingMode;
 import java.util.LinkedHashMap;
 import java.util.Map;
+import java.util.stream.Collectors;
 import sill.record.DesignRecord.GivenEntry;
 import sill.units.Notation;
 import sill.units.Unit;
@@ -39,8 +40,16 @@ public final class FindingText {
         return Notation.shown(slope, Unit.ofDimension(unit.dimension().over(givenUnit.dimension())));
     }
 
-    /** Figures of the samples, by name. */
-    public Map<String, String> figures(Finding.MonteCarlo found) {
+    /** Figures that the table has no room for, by name. */
+    public Map<String, String> figures(Finding finding) {
+        Map<String, String> figures = new LinkedHashMap<>();
+        finding.rootSumSquare()
+                .ifPresent(found -> figures.put("Standard uncertainty", distance(found.standardUncertainty())));
+        finding.monteCarlo().ifPresent(found -> figures.putAll(figures(found)));
+        return figures;
+    }
+
+    private Map<String, String> figures(Finding.MonteCarlo found) {
         Map<String, String> figures = new LinkedHashMap<>();
         figures.put("Samples", grouped(found.samples()) + ", seed " + found.seed());
         if (found.notFinite() > 0) {
@@ -53,7 +62,22 @@ public final class FindingText {
         figures.put(
                 "Standard deviation",
                 distance(found.sd()) + error(found.errors().get("sd")));
-        figures.put("Shortest 95 % interval", range(found.low(), found.high()));
+        Double low = found.errors().get("low");
+        Double high = found.errors().get("high");
+        figures.put(
+                "Shortest 95 % interval",
+                range(found.low(), found.high())
+                        + (low == null || high == null
+                                ? ""
+                                : ", standard errors " + distance(low) + " and " + distance(high)));
+        String quantileErrors = found.quantiles().keySet().stream()
+                .filter(found.errors()::containsKey)
+                .map(probability ->
+                        percent(probability) + " " + distance(found.errors().get(probability)))
+                .collect(Collectors.joining(", "));
+        if (!quantileErrors.isEmpty()) {
+            figures.put("Standard errors of quantiles", quantileErrors);
+        }
         if (found.resolution() > 0) {
             figures.put(
                     "Counted in cells",

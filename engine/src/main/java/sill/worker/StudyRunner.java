@@ -80,7 +80,7 @@ final class StudyRunner implements Studies {
                     "found no given to vary, expected one with limits on which the studied values rest",
                     "Give such a given a tolerance; 'hold:' and 'vary:' leave out others.");
         }
-        StudyOrderPlan plans = new StudyOrderPlan(order, targets, varied, givens.values(), spreads);
+        StudyPlans plans = new StudyPlans(order, targets, varied, givens.values(), spreads);
         SliceCode code = SliceCode.agreeing(slicer, step.cell(), outputs, varied, givens.values(), plans.nominal())
                 .orElseThrow(() -> problem(
                         step,

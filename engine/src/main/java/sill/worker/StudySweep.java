@@ -13,12 +13,12 @@ import sill.values.Finding;
 final class StudySweep {
     private static final int STEPS = 40;
 
-    private final StudyOrderPlan plans;
+    private final StudyPlans plans;
     private final SliceCode code;
     private final String given;
     private final int place;
 
-    StudySweep(StudyOrderPlan plans, SliceCode code, String given) {
+    StudySweep(StudyPlans plans, SliceCode code, String given) {
         this.plans = plans;
         this.code = code;
         this.given = given;

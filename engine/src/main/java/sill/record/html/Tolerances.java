@@ -26,7 +26,7 @@ final class Tolerances {
                     .close();
             entry.finding().remarks().forEach(remark -> page.leaf("p", remark, "class", "state"));
             ToleranceFigures.write(page, entry);
-            samples(page, entry.finding());
+            figures(page, entry.finding());
             Sensitivities.write(page, entry, content.givensByName());
             page.close().line();
         }
@@ -87,16 +87,13 @@ final class Tolerances {
         page.close();
     }
 
-    private static void samples(Markup page, Finding finding) {
-        if (finding.monteCarlo().isEmpty()) {
+    private static void figures(Markup page, Finding finding) {
+        Map<String, String> figures = new FindingText(finding).figures(finding);
+        if (figures.isEmpty()) {
             return;
         }
-        FindingText text = new FindingText(finding);
         page.open("dl", "class", "fields");
-        for (Map.Entry<String, String> figure :
-                text.figures(finding.monteCarlo().get()).entrySet()) {
-            page.leaf("dt", figure.getKey()).leaf("dd", figure.getValue());
-        }
+        figures.forEach((name, figure) -> page.leaf("dt", name).leaf("dd", figure));
         page.close().line();
     }
 }

@@ -352,11 +352,13 @@ class RecordPageTest {
         assertThat(page.select(".finding .fields dd").eachText())
                 .extracting(text -> text.replace('\u00a0', ' '))
                 .containsExactly(
+                        "60.00 mV",
                         "200 000, seed 7",
                         "3 of them, 2 by an exception; the figures below are those of the others",
                         "2.010 V, standard error by sampling 100.0 µV",
                         "50.00 mV, standard error by sampling 200.0 µV",
-                        "1.910 V .. 2.110 V",
+                        "1.910 V .. 2.110 V, standard errors 1.000 mV and 2.000 mV",
+                        "50 % 300.0 µV",
                         "1.820 V, 2.190 V");
         assertThat(page.selectFirst(".sensitivities tbody tr").text().replace('\u00a0', ' '))
                 .isEqualTo("vIn 0.08300 100.0 % mixed lower limit 24.10 V");

@@ -14,7 +14,7 @@ import sill.worksheet.Given.Distribution;
 import sill.worksheet.ToleranceStudy.Method;
 
 /** What a tolerance cell asks for, as plans of studies. */
-final class StudyOrderPlan {
+final class StudyPlans {
     private final Job.StudyOrder order;
     private final List<StudyTarget> targets;
     private final List<String> varied;
@@ -26,7 +26,7 @@ final class StudyOrderPlan {
      * @param values values of all givens
      * @param spreads of the givens with limits
      */
-    StudyOrderPlan(
+    StudyPlans(
             Job.StudyOrder order,
             List<StudyTarget> targets,
             List<String> varied,
