@@ -25,11 +25,13 @@ public final class ColdRunBenchmark {
     private final Path folder;
     private final Path javaHome = Path.of(System.getProperty("java.home"));
     private final Path none;
+    private final SillCommand sill;
 
     private ColdRunBenchmark(int runs, Path folder) throws IOException {
         this.runs = runs;
         this.folder = Files.createDirectories(folder);
         none = Files.writeString(folder.resolve("none"), "");
+        sill = new SillCommand(this.folder, javaHome);
     }
 
     /**
@@ -67,16 +69,16 @@ public final class ColdRunBenchmark {
 
     private List<Figure> measure(Workload usual, Workload large) throws IOException, InterruptedException {
         String size = usual.cells() + " cells, " + usual.javaLines() + " Java lines";
-        Contender sheet = sheet("a  sill run: " + size, "usual.sill", usual.worksheet());
+        Contender sheet = sill.run("a  sill run: " + size, "usual.sill", usual.worksheet());
         Contender launcher = launcher("b  source launcher: the same Java", usual.sourceFile());
         Contender prompt = prompt("c  snippet prompt, default engine: the same Java", usual.promptInput());
         Contender plots =
-                sheet("d  sill run: the sheet of a and two plots", "plots.sill", usual.worksheetWithTwoPlots());
-        Contender longer = sheet(
+                sill.run("d  sill run: the sheet of a and two plots", "plots.sill", usual.worksheetWithTwoPlots());
+        Contender longer = sill.run(
                 "e  sill run: " + large.cells() + " cells, " + large.javaLines() + " Java lines",
                 "large.sill",
                 large.worksheet());
-        makeArchives();
+        sill.makeArchives();
         Map<String, List<Double>> times = new TreeMap<>();
         for (int run = runs == 1 ? 1 : 0; run <= runs; run++) {
             String launcherSaid = "";
@@ -95,7 +97,7 @@ public final class ColdRunBenchmark {
             }
         }
         List<Figure> figures = new ArrayList<>();
-        times.forEach((name, all) -> figures.add(new Figure(name, median(all), "ms", Double.NaN)));
+        times.forEach((name, all) -> figures.add(new Figure(name, Median.of(all), "ms", Double.NaN)));
         double a = figures.get(0).value();
         double b = figures.get(1).value();
         figures.add(new Figure("a / b", a / b, "", 1.5));
@@ -118,15 +120,9 @@ public final class ColdRunBenchmark {
             proportional.add(peak.proportional());
             resident.add(peak.resident());
         }
-        figures.add(new Figure("a  peak memory of all processes, shared pages once", median(proportional), "MiB", 400));
-        figures.add(new Figure("a  the same, shared pages once for each", median(resident), "MiB", Double.NaN));
-    }
-
-    private Contender sheet(String name, String file, String text) throws IOException {
-        Path sheet = Files.writeString(folder.resolve(file), text);
-        String script = Clone.root().resolve("engine/sill").toString();
-        return new Contender(
-                name, List.of(script, "run", sheet.toString(), "--out", folder.toString()), none, javaHome);
+        figures.add(
+                new Figure("a  peak memory of all processes, shared pages once", Median.of(proportional), "MiB", 400));
+        figures.add(new Figure("a  the same, shared pages once for each", Median.of(resident), "MiB", Double.NaN));
     }
 
     private Contender launcher(String name, String text) throws IOException {
@@ -153,21 +149,7 @@ public final class ColdRunBenchmark {
         }
     }
 
-    private void makeArchives() throws IOException, InterruptedException {
-        ProcessBuilder builder =
-                new ProcessBuilder(Clone.root().resolve("engine/sill").toString());
-        builder.environment().put("SILL_TASK", "archives");
-        builder.environment().put("JAVA_HOME", javaHome.toString());
-        builder.inheritIO().start().waitFor();
-    }
-
     private static String withoutPrompts(String said) {
         return said.replaceAll("(?m)^(-> *\\x08*)+", "").strip();
-    }
-
-    private static double median(List<Double> values) {
-        List<Double> sorted = values.stream().sorted().toList();
-        int middle = sorted.size() / 2;
-        return sorted.size() % 2 == 1 ? sorted.get(middle) : (sorted.get(middle - 1) + sorted.get(middle)) / 2;
     }
 }

@@ -51,11 +51,15 @@ class ColdRunBenchmarkTest {
         List<Figure> figures = List.of(
                 new Figure("a  a run", 532.4, "ms", Double.NaN),
                 new Figure("a / b", 0.7312, "", 1.5),
+                new Figure("b  rate", 0.94, "", 0.9, true),
+                new Figure("c  rate", 0.84, "", 0.9, true),
                 new Figure("a  memory", 412.6, "MiB", 400));
         assertThat(Figure.table("Heading", figures)).isEqualTo("""
                 Heading
                 a  a run        532 ms
                 a / b         0.731       aim: at most 1.5 (reached)
+                b  rate       0.940       aim: at least 0.9 (reached)
+                c  rate       0.840       aim: at least 0.9 (MISSED)
                 a  memory       413 MiB   aim: at most 400 (MISSED)
                 """);
     }

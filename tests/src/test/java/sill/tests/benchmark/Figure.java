@@ -9,14 +9,33 @@ import java.util.Locale;
  * @param name what was measured
  * @param value the figure
  * @param unit its unit; empty for a ratio
- * @param aim what it shall not exceed; NaN when nothing is asked of it
+ * @param aim what it shall not exceed or not fall below; NaN when nothing is asked of it
+ * @param atLeast whether it shall not fall below the aim
  */
-record Figure(String name, double value, String unit, double aim) {
+record Figure(String name, double value, String unit, double aim, boolean atLeast) {
+    /** A figure that shall not exceed its aim. */
+    Figure(String name, double value, String unit, double aim) {
+        this(name, value, unit, aim, false);
+    }
+
+    /** A figure of which nothing is asked. */
+    Figure(String name, double value, String unit) {
+        this(name, value, unit, Double.NaN);
+    }
+
+    private boolean reached() {
+        return atLeast ? value >= aim : value <= aim;
+    }
+
     private String line(int width) {
         String verdict = Double.isNaN(aim)
                 ? ""
                 : String.format(
-                        Locale.ROOT, "   aim: at most %s %s", trimmed(aim), value <= aim ? "(reached)" : "(MISSED)");
+                        Locale.ROOT,
+                        "   aim: at %s %s %s",
+                        atLeast ? "least" : "most",
+                        trimmed(aim),
+                        reached() ? "(reached)" : "(MISSED)");
         return String.format(Locale.ROOT, "%-" + width + "s %9s %-3s%s", name, number(), unit, verdict)
                 .stripTrailing();
     }

@@ -174,7 +174,17 @@ record Workload(int calcCells) {
         return worksheet(PLOTS);
     }
 
-    private String worksheet(String plots) {
+    /**
+     * With a tolerance cell of three results.
+     *
+     * @param method as the cell has it
+     */
+    String worksheetWithTolerances(String method) {
+        return worksheet(":: tolerance Trip points over tolerance\nof: " + String.join(", ", CHECKED) + "\nmethod: "
+                + method + "\n\n");
+    }
+
+    private String worksheet(String more) {
         StringBuilder sheet = new StringBuilder("""
                 sill 1
                 title: Kiln fan supervision
@@ -194,7 +204,7 @@ record Workload(int calcCells) {
                     .append('\n')
                     .append(lines(cell));
         }
-        return sheet.append('\n').append(plots).append("""
+        return sheet.append('\n').append(more).append("""
 
                 :: check Requirements
                 rising1 within 6 V .. 7 V
