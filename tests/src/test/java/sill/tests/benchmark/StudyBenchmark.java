@@ -29,6 +29,7 @@ public final class StudyBenchmark {
     private final Extent extent;
     private final Path folder;
     private final Path javaHome = Path.of(System.getProperty("java.home"));
+    private final Workload usual = new Workload(9);
     private final List<Figure> figures = new ArrayList<>();
     private final Map<StudySheet, SheetStudy> studies = new HashMap<>();
 
@@ -94,7 +95,7 @@ public final class StudyBenchmark {
         Contender through =
                 rounds("a  sheet's Java", StudyRounds.Task.SHEET, sheet, extent.samples, extent.repetitions);
         Contender byHand = rounds("b  by hand", StudyRounds.Task.HAND, sheet, extent.samples, extent.repetitions);
-        Contender sums = rounds("c  sums", StudyRounds.Task.SUMS, sheet, extent.samples, extent.repetitions);
+        Contender sums = rounds("c  sums", StudyRounds.Task.SUMS, sheet, extent.samples, 4 * extent.repetitions);
         Map<Contender, double[]> times = alternating(List.of(through, byHand, sums));
         double a = times.get(through)[0];
         double b = times.get(byHand)[0];
@@ -115,8 +116,11 @@ public final class StudyBenchmark {
         double[] times = alternating(List.of(cores)).get(cores);
         figures.add(new Figure("d  sheet's Java, one thread: time passed", times[1], "ms"));
         figures.add(new Figure("e  sheet's Java, two threads: time passed", times[3], "ms"));
-        figures.add(new Figure("rate of e / rate of d", times[1] / times[3], "", 1.8, true));
-        figures.add(new Figure("two hand-written loops at once / one, rates", 2 * times[5] / times[7], ""));
+        double gain = times[1] / times[3];
+        double machine = 2 * times[5] / times[7];
+        figures.add(new Figure("rate of e / rate of d", gain, "", 1.8, true));
+        figures.add(new Figure("rate of two hand-written loops at once / of one", machine, ""));
+        figures.add(new Figure("the former as a share of the latter", gain / machine, "", 0.9, true));
         figures.add(new Figure("processor time of e / of d", times[2] / times[0], ""));
         figures.add(new Figure("processors that e had", times[2] / times[3], ""));
     }
@@ -124,16 +128,14 @@ public final class StudyBenchmark {
     private void corners() throws IOException, InterruptedException {
         StudySheet sheet = StudySheet.dividers();
         // The sampled works take as long as dozens of these.
-        int repetitions = 8 * extent.repetitions;
+        int repetitions = 40 * extent.repetitions;
         Contender through = rounds("f", StudyRounds.Task.CORNERS, sheet, 1, repetitions);
         Contender byHand = rounds("g", StudyRounds.Task.HAND_CORNERS, sheet, 1, repetitions);
         Map<Contender, double[]> times = alternating(List.of(through, byHand));
-        // Processor time of a process is told in steps that are long for these; the median of many is of the
-        // undisturbed.
-        double f = times.get(through)[1];
-        double g = times.get(byHand)[1];
-        figures.add(new Figure("f  sheet's Java, worst case of 16 givens", 1000 * f, "µs"));
-        figures.add(new Figure("g  hand-written loop over the 2^16 corners", 1000 * g, "µs"));
+        double f = times.get(through)[0];
+        double g = times.get(byHand)[0];
+        figures.add(new Figure("f  sheet's Java, worst case of 16 givens: processor time", 1000 * f, "µs"));
+        figures.add(new Figure("g  hand-written loop over the 2^16 corners: processor time", 1000 * g, "µs"));
         figures.add(new Figure("f / g", f / g, "", 1.3));
     }
 
@@ -143,20 +145,30 @@ public final class StudyBenchmark {
             return;
         }
         StudySheet sheet = StudySheet.tripPoints();
-        double few = peak(rounds("few", StudyRounds.Task.ONCE, sheet, extent.few, 0));
-        double many = peak(rounds("many", StudyRounds.Task.ONCE, sheet, extent.many, 0));
-        figures.add(new Figure("h  peak memory, " + extent.few + " samples", few, "MiB"));
-        figures.add(new Figure("i  peak memory, " + extent.many + " samples", many, "MiB"));
-        figures.add(new Figure("i / h", many / few, ""));
+        double h = peak(rounds("few", StudyRounds.Task.ONCE, sheet, extent.few, 0));
+        double i = peak(rounds("some", StudyRounds.Task.ONCE, sheet, extent.samples, 0));
+        double j = peak(rounds("many", StudyRounds.Task.ONCE, sheet, extent.many, 0));
+        figures.add(new Figure("h  peak memory, a JVM with the study alone: " + extent.few + " samples", h, "MiB"));
+        figures.add(new Figure("i  the same, " + extent.samples + " samples", i, "MiB"));
+        figures.add(new Figure("j  the same, " + extent.many + " samples", j, "MiB"));
+        figures.add(new Figure("j / h", j / h, ""));
+        figures.add(new Figure("j / i", j / i, ""));
+        SillCommand sill = new SillCommand(folder, javaHome);
+        double k = peak(
+                sill.run("few", "few.sill", usual.worksheetWithTolerances("monte-carlo " + extent.few + " seed 41")));
+        double l = peak(sill.run(
+                "many", "many.sill", usual.worksheetWithTolerances("monte-carlo " + extent.many + " seed 41")));
+        figures.add(new Figure("k  peak memory, all processes of sill run: " + extent.few + " samples", k, "MiB"));
+        figures.add(new Figure("l  the same, " + extent.many + " samples", l, "MiB"));
+        figures.add(new Figure("l / k", l / k, ""));
     }
 
     private double peak(Contender contender) throws IOException, InterruptedException {
-        return contender.peakMemory().resident();
+        return contender.peakMemory().proportional();
     }
 
     private void coldRun() throws IOException, InterruptedException {
         SillCommand sill = new SillCommand(folder, javaHome);
-        Workload usual = new Workload(9);
         String sampling = "monte-carlo " + extent.cold + " seed 41";
         Contender without = sill.run("without", "usual.sill", usual.worksheet());
         Contender sampled = sill.run("sampled", "sampled.sill", usual.worksheetWithTolerances(sampling));
@@ -172,14 +184,14 @@ public final class StudyBenchmark {
                 }
             }
         }
-        double j = Median.of(times.get(without));
-        double k = Median.of(times.get(sampled));
-        double l = Median.of(times.get(all));
-        figures.add(new Figure("j  sill run: " + usual.javaLines() + " Java lines", j, "ms"));
-        figures.add(new Figure("k  the same and " + extent.cold + " samples of three results", k, "ms"));
-        figures.add(new Figure("l  the same, worst case and root sum square too", l, "ms"));
-        figures.add(new Figure("(k - j) / j", (k - j) / j, "", 0.8));
-        figures.add(new Figure("(l - j) / j", (l - j) / j, ""));
+        double m = Median.of(times.get(without));
+        double n = Median.of(times.get(sampled));
+        double o = Median.of(times.get(all));
+        figures.add(new Figure("m  sill run: " + usual.javaLines() + " Java lines", m, "ms"));
+        figures.add(new Figure("n  the same and " + extent.cold + " samples of three results", n, "ms"));
+        figures.add(new Figure("o  the same, worst case and root sum square too", o, "ms"));
+        figures.add(new Figure("(n - m) / m", (n - m) / m, "", 0.8));
+        figures.add(new Figure("(o - m) / m", (o - m) / m, ""));
     }
 
     /** Medians over the rounds of what each contender printed. */

@@ -6,6 +6,7 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.DoubleStream;
 import sill.study.Sampling;
 
 /**
@@ -13,13 +14,16 @@ import sill.study.Sampling;
  * this one thing needs and nothing else.
  *
  * <p>Arguments: a {@link Task}, the folder of the slice's class files, the slice's class, samples, how often the work is
- * timed, milliseconds to get warm. For each of its works it prints the medians of milliseconds of processor time of the whole
- * process, and of milliseconds passed.
+ * timed, milliseconds to get warm. For each of its works it prints the mean of milliseconds of processor time of the whole
+ * process (told in steps of some milliseconds, which a median would show), and the median of milliseconds passed.
  */
 public final class StudyRounds {
     private static final OperatingSystemMXBean MACHINE =
             ManagementFactory.getPlatformMXBean(OperatingSystemMXBean.class);
     private static final long SEED = 7;
+
+    /** Milliseconds of processor time that can be told. */
+    private static final double LEAST = 50;
 
     private final Path classes;
     private final String slice;
@@ -63,7 +67,11 @@ public final class StudyRounds {
         return switch (task) {
             case SHEET -> List.of(() -> sampled(1));
             case HAND -> List.of(this::byHand);
-            case SUMS -> List.of(() -> HandWritten.tripPointSums(samples, SEED)[0]);
+            case SUMS ->
+                List.of(() -> {
+                    double[] means = HandWritten.tripPointSums(samples, SEED);
+                    return means[0] + means[1] + means[2];
+                });
             case CORES -> List.of(() -> sampled(1), () -> sampled(2), this::byHand, this::twoByHand);
             case CORNERS -> {
                 SheetStudy study = new SheetStudy(StudySheet.dividers(), classes, slice);
@@ -115,23 +123,20 @@ public final class StudyRounds {
                 checksum += work.run();
             }
         } while (System.nanoTime() - begin < warmUp * 1_000_000L * works.size());
-        List<List<Double>> processor = new ArrayList<>();
+        double[] processor = new double[works.size()];
         List<List<Double>> passed = new ArrayList<>();
-        works.forEach(work -> {
-            processor.add(new ArrayList<>());
-            passed.add(new ArrayList<>());
-        });
-        for (int i = 0; i < times; i++) {
+        works.forEach(work -> passed.add(new ArrayList<>()));
+        for (int i = 0; i < times || DoubleStream.of(processor).min().orElseThrow() < LEAST; i++) {
             for (int k = 0; k < works.size(); k++) {
                 long cpu = MACHINE.getProcessCpuTime();
                 long start = System.nanoTime();
                 checksum += works.get(k).run();
                 passed.get(k).add((System.nanoTime() - start) / 1e6);
-                processor.get(k).add((MACHINE.getProcessCpuTime() - cpu) / 1e6);
+                processor[k] += (MACHINE.getProcessCpuTime() - cpu) / 1e6;
             }
         }
         for (int k = 0; k < works.size(); k++) {
-            System.out.println(Median.of(processor.get(k)) + " " + Median.of(passed.get(k)));
+            System.out.println(processor[k] / passed.get(k).size() + " " + Median.of(passed.get(k)));
         }
         if (!Double.isFinite(checksum)) {
             throw new IllegalStateException("a work gave no finite number");
