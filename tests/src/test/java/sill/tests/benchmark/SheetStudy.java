@@ -6,6 +6,7 @@ import java.net.URL;
 import java.net.URLClassLoader;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.BiConsumer;
@@ -20,13 +21,35 @@ import sill.study.StudyPlan;
 import sill.tests.Clone;
 
 /**
- * A sheet's slice, repeated by the engine's study as the worker has it repeated.
- *
- * @param sheet the sheet
- * @param classes folder of the slice's class files
- * @param slice name of its class
+ * A sheet's slice, repeated by the engine's study as the worker has it repeated. A model is loaded once and stays, as in a
+ * worker, which studies its cell once: else the JVM would compile the slice anew for each run.
  */
-record SheetStudy(StudySheet sheet, Path classes, String slice) {
+final class SheetStudy {
+    private final StudySheet sheet;
+    private final Path classes;
+    private final String slice;
+    private final List<Model> models = new ArrayList<>();
+
+    /**
+     * One that is compiled already.
+     *
+     * @param classes folder of the slice's class files
+     * @param slice name of its class
+     */
+    SheetStudy(StudySheet sheet, Path classes, String slice) {
+        this.sheet = sheet;
+        this.classes = classes;
+        this.slice = slice;
+    }
+
+    Path classes() {
+        return classes;
+    }
+
+    String slice() {
+        return slice;
+    }
+
     /** Cuts the slice out of a sheet and leaves its class files below a folder. */
     static SheetStudy of(StudySheet sheet, Path folder) throws IOException {
         Path classes = Files.createDirectories(folder.resolve(sheet.studied().get(0)));
@@ -47,7 +70,10 @@ record SheetStudy(StudySheet sheet, Path classes, String slice) {
     List<Findings> run(Optional<Sampling> sampling, int cores) throws InterruptedException {
         List<Studied> studied = sheet.studied().stream().map(Studied::of).toList();
         StudyPlan plan = new StudyPlan(sheet.givens(), studied, sampling.isEmpty(), false, sampling, cores);
-        return Study.run(plan, this::model, Progress.NONE);
+        while (models.size() < cores) {
+            models.add(model());
+        }
+        return Study.run(plan, models.iterator()::next, Progress.NONE);
     }
 
     private Model model() {

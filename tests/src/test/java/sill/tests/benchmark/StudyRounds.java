@@ -25,14 +25,14 @@ public final class StudyRounds {
     /** Milliseconds of processor time that can be told. */
     private static final double LEAST = 50;
 
-    private final Path classes;
-    private final String slice;
+    private final SheetStudy tripPoints;
+    private final SheetStudy dividers;
     private final int samples;
     private double checksum;
 
     private StudyRounds(Path classes, String slice, int samples) {
-        this.classes = classes;
-        this.slice = slice;
+        tripPoints = new SheetStudy(StudySheet.tripPoints(), classes, slice);
+        dividers = new SheetStudy(StudySheet.dividers(), classes, slice);
         this.samples = samples;
     }
 
@@ -73,15 +73,13 @@ public final class StudyRounds {
                     return means[0] + means[1] + means[2];
                 });
             case CORES -> List.of(() -> sampled(1), () -> sampled(2), this::byHand, this::twoByHand);
-            case CORNERS -> {
-                SheetStudy study = new SheetStudy(StudySheet.dividers(), classes, slice);
-                yield List.of(() -> study.run(Optional.empty(), 1)
+            case CORNERS ->
+                List.of(() -> dividers.run(Optional.empty(), 1)
                         .get(0)
                         .worstCase()
                         .orElseThrow()
                         .low()
                         .value());
-            }
             case HAND_CORNERS -> {
                 double[] low = StudySheet.dividers().lows();
                 double[] high = StudySheet.dividers().highs();
@@ -92,7 +90,7 @@ public final class StudyRounds {
     }
 
     private double sampled(int cores) throws InterruptedException {
-        return new SheetStudy(StudySheet.tripPoints(), classes, slice)
+        return tripPoints
                 .run(Optional.of(new Sampling(samples, SEED)), cores)
                 .get(0)
                 .monteCarlo()
