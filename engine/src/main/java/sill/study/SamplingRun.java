@@ -1,7 +1,6 @@
 package sill.study;
 
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.IdentityHashMap;
 import java.util.List;
 import java.util.Map;
@@ -91,9 +90,9 @@ final class SamplingRun {
         return errors;
     }
 
-    /** The JDK's sort merges the slices, which are sorted already. */
+    /** The slices are sorted already, so that buckets are filled from one end to the other, a slice at a time. */
     private static Ordered sorted(double[] values) {
-        Arrays.sort(values);
+        BucketSort.sort(values);
         return new Sorted(values, ShortestInterval.finite(values));
     }
 
