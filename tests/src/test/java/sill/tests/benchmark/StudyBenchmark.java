@@ -54,11 +54,11 @@ public final class StudyBenchmark {
     /**
      * Prints the table and writes it to {@code tests/target/benchmark/study.txt}.
      *
-     * @param arguments the number of processes of each contender, if another than 7 is wanted, and the samples of the large
+     * @param arguments the number of processes of each contender, if another than 3 is wanted, and the samples of the large
      *     memory figure, if others than 10^8
      */
     public static void main(String[] arguments) throws IOException, InterruptedException {
-        int rounds = arguments.length < 1 ? 7 : Integer.parseInt(arguments[0]);
+        int rounds = arguments.length < 1 ? 3 : Integer.parseInt(arguments[0]);
         int many = arguments.length < 2 ? 100_000_000 : Integer.parseInt(arguments[1]);
         Path folder = Clone.root().resolve("tests/target/benchmark");
         String heading = String.format(
