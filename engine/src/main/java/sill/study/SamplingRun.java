@@ -149,20 +149,22 @@ final class SamplingRun {
         }
     }
 
-    private List<MonteCarlo> found(List<Ordered> ordered, List<double[]> errors) {
+    private List<MonteCarlo> found(List<Ordered> ordered, List<double[]> errors) throws InterruptedException {
         List<MonteCarlo> found = new ArrayList<>();
-        for (int k = 0; k < kept.length; k++) {
-            Optional<Statistics> statistics = ordered.get(k).count() < 2
-                    ? Optional.empty()
-                    : Optional.of(new Summary(tally.moments(k), ordered.get(k)).statistics(errors.get(k)));
-            found.add(new MonteCarlo(
-                    sampling.samples(),
-                    sampling.seed(),
-                    tally.failures(k),
-                    statistics,
-                    tally.shares(k, sampling.samples())));
-        }
+        crew.run(kept.length, (output, probe) -> found((int) output, ordered, errors), found::add);
         return found;
+    }
+
+    private MonteCarlo found(int output, List<Ordered> ordered, List<double[]> errors) {
+        Optional<Statistics> statistics = ordered.get(output).count() < 2
+                ? Optional.empty()
+                : Optional.of(new Summary(tally.moments(output), ordered.get(output)).statistics(errors.get(output)));
+        return new MonteCarlo(
+                sampling.samples(),
+                sampling.seed(),
+                tally.failures(output),
+                statistics,
+                tally.shares(output, sampling.samples()));
     }
 
     /** Looks again at the samples with the lowest and highest results, where they lie within the limits. */
