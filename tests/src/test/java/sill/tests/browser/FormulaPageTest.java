@@ -2,9 +2,6 @@ package sill.tests.browser;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import java.io.ByteArrayOutputStream;
-import java.io.PrintStream;
-import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
@@ -16,7 +13,6 @@ import org.junit.jupiter.api.TestInstance;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
-import sill.cli.Main;
 
 /** Formulas as a browser lays them out and hands them to a screen reader. */
 @TestInstance(TestInstance.Lifecycle.PER_CLASS)
@@ -43,13 +39,7 @@ class FormulaPageTest {
 
     @BeforeAll
     void startBrowser(@TempDir Path folder) throws Exception {
-        Path sheet = Files.writeString(folder.resolve("formulas.sill"), SHEET);
-        ByteArrayOutputStream out = new ByteArrayOutputStream();
-        PrintStream stream = new PrintStream(out, true, StandardCharsets.UTF_8);
-        assertThat(Main.run(stream, stream, "run", sheet.toString()))
-                .as(out.toString(StandardCharsets.UTF_8))
-                .isZero();
-        page = folder.resolve("formulas.html");
+        page = RecordFile.of(SHEET, folder);
         browser = Browser.start();
     }
 

@@ -2,10 +2,6 @@ package sill.tests.browser;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import java.io.ByteArrayOutputStream;
-import java.io.PrintStream;
-import java.nio.charset.StandardCharsets;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Duration;
 import java.util.List;
@@ -25,7 +21,6 @@ import org.openqa.selenium.interactions.PointerInput;
 import org.openqa.selenium.interactions.Sequence;
 import org.openqa.selenium.support.ui.ExpectedConditions;
 import org.openqa.selenium.support.ui.WebDriverWait;
-import sill.cli.Main;
 
 /** Names in formulas and trace lists: on hover, focus or tap what the page tells of them. */
 @TestInstance(TestInstance.Lifecycle.PER_CLASS)
@@ -59,13 +54,7 @@ class PeekTest {
 
     @BeforeAll
     void startBrowser(@TempDir Path folder) throws Exception {
-        Path sheet = Files.writeString(folder.resolve("names.sill"), SHEET);
-        ByteArrayOutputStream out = new ByteArrayOutputStream();
-        PrintStream stream = new PrintStream(out, true, StandardCharsets.UTF_8);
-        assertThat(Main.run(stream, stream, "run", sheet.toString()))
-                .as(out.toString(StandardCharsets.UTF_8))
-                .isZero();
-        page = folder.resolve("names.html");
+        page = RecordFile.of(SHEET, folder);
         browser = Browser.start();
     }
 

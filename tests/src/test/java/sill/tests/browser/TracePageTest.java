@@ -2,8 +2,6 @@ package sill.tests.browser;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import java.io.ByteArrayOutputStream;
-import java.io.PrintStream;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -15,7 +13,6 @@ import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.TestInstance;
 import org.junit.jupiter.api.io.TempDir;
-import sill.cli.Main;
 
 /** The drawing of a trace of 60 names: on paper, and read aloud. */
 @TestInstance(TestInstance.Lifecycle.PER_CLASS)
@@ -25,13 +22,7 @@ class TracePageTest {
 
     @BeforeAll
     void startBrowser(@TempDir Path folder) throws Exception {
-        Path file = Files.writeString(folder.resolve("sixty.sill"), sheet());
-        ByteArrayOutputStream out = new ByteArrayOutputStream();
-        PrintStream stream = new PrintStream(out, true, StandardCharsets.UTF_8);
-        assertThat(Main.run(stream, stream, "run", file.toString()))
-                .as(out.toString(StandardCharsets.UTF_8))
-                .isZero();
-        page = folder.resolve("sixty.html");
+        page = RecordFile.of(sheet(), folder);
         browser = Browser.start();
     }
 
